@@ -1,0 +1,34 @@
+import * as collisions from './collisions.ts';
+import * as emittedAtoms from './emitted-atoms.ts';
+import * as equipment from './equipment.ts';
+import * as flow from './flow.ts';
+import * as gas from './gas.ts';
+import * as lengths from './lengths.ts';
+import * as regime from './regime.ts';
+import * as residual from './residual.ts';
+import * as surfaces from './surfaces.ts';
+import * as transport from './transport.ts';
+import type { Quantity } from './quantity.ts';
+
+/** The topics of the catalogue, in the order in which lists print them. */
+const TOPICS = { gas, collisions, transport, lengths, flow, regime, surfaces, residual, emittedAtoms, equipment };
+
+const BY_ID: ReadonlyMap<string, Quantity> = new Map(
+  Object.values(TOPICS)
+    .flatMap((topic) => Object.values(topic).filter(isQuantity))
+    .map((quantity) => [quantity.id, quantity]),
+);
+
+/** The entry of the catalogue with this id. */
+export function quantityNamed(id: string): Quantity | undefined {
+  return BY_ID.get(id);
+}
+
+/** Every entry of the catalogue, by topic. */
+export function allQuantities(): readonly Quantity[] {
+  return [...BY_ID.values()];
+}
+
+function isQuantity(exported: unknown): exported is Quantity {
+  return typeof exported === 'object' && exported !== null && 'id' in exported && 'from' in exported;
+}

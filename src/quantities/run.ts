@@ -1,0 +1,157 @@
+import type { Given } from '../steps/given.ts';
+import type { Site } from '../steps/site.ts';
+import type { Recipe, Step } from '../steps/step.ts';
+import type { Library } from '../substances/library.ts';
+import { evaluate, lawAt, type Values } from './evaluate.ts';
+import { Plan, type Node } from './plan.ts';
+import type { Known, Reading, Slope } from './reading.ts';
+import type { Reference } from './reference.ts';
+import { Scope } from './scope.ts';
+import { slopesOf, standardUncertainty } from './slopes.ts';
+
+/** Another value for a given: what `with` moves. */
+export interface Change {
+  readonly address: string;
+  /** In SI. */
+  readonly value: number;
+}
+
+/** One line of a derivation: a number or a given, what it is read from, and what a reader must know of it. */
+export interface Derivation {
+  readonly name: string;
+  readonly node: Node;
+  readonly reading: Reading;
+  /** Standard. */
+  readonly uncertainty: number;
+  readonly given?: Given;
+  readonly inputs: readonly Derivation[];
+  readonly remarks: readonly string[];
+}
+
+/** A step whose numbers can be read. Reading one works out those it needs, once, and keeps them. A run never changes. */
+export class StepRun implements Values {
+  readonly step: Step;
+  readonly plan: Plan;
+  readonly givens: ReadonlyMap<string, Given>;
+  readonly readings: (Reading | undefined)[] = [];
+  readonly uncertain: boolean[] = [];
+  readonly partials: (readonly number[] | undefined)[] = [];
+
+  constructor(step: Step, plan: Plan, givens: ReadonlyMap<string, Given> = step.givens) {
+    this.step = step;
+    this.plan = plan;
+    this.givens = givens;
+  }
+
+  read(reference: Reference): Reading {
+    return evaluate(this, this.plan.number(reference));
+  }
+
+  /** Standard uncertainty of a known number; zero where it is judged at its setpoint. */
+  uncertainty(reference: Reference): number {
+    return standardUncertainty(this, this.plan.number(reference));
+  }
+
+  /** How every given moves the number, strongest contribution first. */
+  slopes(reference: Reference): readonly Slope[] {
+    return slopesOf(this, this.plan.number(reference));
+  }
+
+  /** All that was read on the way to a number, down to the givens. */
+  derive(reference: Reference): Derivation {
+    return derivation(this, this.plan.number(reference));
+  }
+
+  /** The given that stands at an address in this run, or the default that stands in for it. */
+  given(address: string): Given | undefined {
+    const node = this.plan.given(address);
+    return node.kind === 'given' ? givenAt(this, node.address, node.fallback) : undefined;
+  }
+
+  /** Another run of the step with some values moved; it shares every number that they do not reach. */
+  with(...changes: readonly Change[]): StepRun {
+    const givens = new Map(this.givens);
+    for (const { address, value } of changes) {
+      const given = this.given(address);
+      if (given !== undefined) givens.set(address, { ...given, value });
+    }
+    const other = new StepRun(this.step, this.plan, givens);
+    shareUnreached(this, other, new Set(changes.map(({ address }) => address)));
+    return other;
+  }
+}
+
+/** A recipe on its chamber and site, whose steps can be read. */
+export interface Run {
+  readonly site: Site;
+  readonly recipe: Recipe;
+  readonly steps: readonly StepRun[];
+}
+
+/** A resolved recipe as a run. Plans of the setups met so far are kept, so that steps alike work out only once what is read from what. */
+export function runOf(site: Site, recipe: Recipe): Run {
+  return { site, recipe, steps: recipe.steps.map((step) => new StepRun(step, planOf(step, site.library))) };
+}
+
+const PLANS = new WeakMap<Library, Map<string, Plan>>();
+/** A repository of very different recipes must not fill the memory with plans. */
+const MOST_PLANS = 500;
+
+function planOf(step: Step, library: Library): Plan {
+  let plans = PLANS.get(library);
+  if (plans === undefined) PLANS.set(library, (plans = new Map<string, Plan>()));
+  const signature = signatureOf(step);
+  let plan = plans.get(signature);
+  if (plan === undefined) {
+    if (plans.size >= MOST_PLANS) plans.clear();
+    plan = new Plan(new Scope(step, library));
+    plans.set(signature, plan);
+  }
+  return plan;
+}
+
+function signatureOf(step: Step): string {
+  let signature = JSON.stringify(step.setup);
+  for (const address of step.givens.keys()) signature += `\n${address}`;
+  for (const address of step.unknown) signature += `\n?${address}`;
+  for (const address of step.none) signature += `\n-${address}`;
+  return signature;
+}
+
+/** Copies the readings that no changed address reaches. */
+function shareUnreached(from: StepRun, to: StepRun, changed: ReadonlySet<string>): void {
+  const reached: boolean[] = [];
+  for (const node of from.plan.nodes) {
+    const moved = node.kind === 'given' ? changed.has(node.address) : node.inputs.some((input) => reached[input.slot]);
+    reached[node.slot] = moved;
+    if (moved) continue;
+    to.readings[node.slot] = from.readings[node.slot];
+    to.uncertain[node.slot] = from.uncertain[node.slot] ?? false;
+    to.partials[node.slot] = from.partials[node.slot];
+  }
+}
+
+export function givenAt(run: StepRun, address: string, fallback: Given | undefined): Given | undefined {
+  return run.givens.get(address) ?? fallback;
+}
+
+function derivation(run: StepRun, node: Node): Derivation {
+  const reading = evaluate(run, node);
+  const given = node.kind === 'given' ? givenAt(run, node.address, node.fallback) : undefined;
+  return {
+    name: node.name,
+    node,
+    reading,
+    uncertainty: standardUncertainty(run, node),
+    ...(given === undefined ? {} : { given }),
+    inputs: node.inputs.map((input) => derivation(run, input)),
+    remarks: remarksOf(run, node, reading),
+  };
+}
+
+function remarksOf(run: StepRun, node: Node, reading: Reading): readonly string[] {
+  if (node.kind !== 'law' || reading.kind !== 'known') return [];
+  return node.quantity.remarks(node.reference, run.plan.scope, lawAt(run, node));
+}
+
+export type { Known };

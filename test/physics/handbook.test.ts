@@ -1,0 +1,69 @@
+import { describe, expect, test } from 'vitest';
+import { entriesOf, halfLastDigit, physicsFiles, type Entry } from './handbook.ts';
+
+/** Units that doc comments may use: powers and products of these, of SI and of nothing else. */
+const SYMBOL = /^(?:1|none|any|(?:m|kg|s|K|mol|A|J|Pa|W|V|C|F)(?:\d+(?:\.\d+)?)?)$/;
+
+describe.each(physicsFiles())('%s', (file) => {
+  const entries = entriesOf(file);
+
+  test.each(entries)('$name documents its parameters in order', ({ parameters, documented }) => {
+    expect(documented.map(({ name }) => name)).toEqual(parameters);
+  });
+
+  test.each(entries)('$name states an SI unit for each parameter and its result', ({ documented, returns }) => {
+    for (const unit of [...documented.map((parameter) => parameter.unit), returns]) {
+      for (const part of unit?.split(', ') ?? ['']) expect(part.split(/[ /()]+/).filter(Boolean)).toSatisfy(allSymbols);
+    }
+  });
+
+  test.each(entries)('$name names its source', ({ source }) => {
+    expect(source ?? '').not.toBe('');
+  });
+
+  test.each(entries)('$name gives its worked values to the printed digits', async (entry) => {
+    expect(entry.examples).not.toEqual([]);
+    const law = await lawOf(entry);
+    for (const { arguments: given, result } of entry.examples) expectPrinted(law(...given), result);
+  });
+});
+
+test('every exported function is found by the reader of doc comments', async () => {
+  for (const file of physicsFiles()) {
+    const module: Record<string, unknown> = await import(`../../src/physics/${file}`);
+    const functions = Object.keys(module).filter((name) => typeof module[name] === 'function');
+    expect(entriesOf(file).map(({ name }) => name).sort()).toEqual(functions.sort());
+  }
+});
+
+test('half of the last printed digit is the tolerance', () => {
+  expect(halfLastDigit('397.5')).toBeCloseTo(0.05, 12);
+  expect(halfLastDigit('2.47e20')).toBeCloseTo(0.5e18, -5);
+  expect(halfLastDigit('12')).toBe(0.5);
+});
+
+function allSymbols(parts: readonly string[]): boolean {
+  return parts.length > 0 && parts.every((part) => SYMBOL.test(part));
+}
+
+async function lawOf({ file, name }: Entry): Promise<(...given: readonly unknown[]) => unknown> {
+  const module: Record<string, unknown> = await import(`../../src/physics/${file}`);
+  const law = module[name];
+  if (typeof law !== 'function') throw new Error(`${file} exports no ${name}`);
+  return (...given) => Reflect.apply(law, undefined, given);
+}
+
+/** A number must agree to the printed digits; of an object each member; a text exactly. */
+function expectPrinted(actual: unknown, printed: string): void {
+  if (printed.startsWith('{')) {
+    const members = [...printed.matchAll(/"(\w+)": ([^,}]+)/g)];
+    expect(Object.keys(Object(actual))).toEqual(members.map(([, name]) => name));
+    for (const [, name = '', member = ''] of members) expectPrinted(Reflect.get(Object(actual), name), member);
+  } else if (printed.startsWith('"')) {
+    expect(actual).toBe(JSON.parse(printed));
+  } else {
+    expect(Math.abs(Number(actual) - Number(printed)), `${String(actual)} against ${printed}`).toBeLessThanOrEqual(
+      halfLastDigit(printed) * (1 + 1e-9),
+    );
+  }
+}
