@@ -1,5 +1,5 @@
 import type { Place } from '../shelf/place.ts';
-import type { Measure } from '../units/measure.ts';
+import type { Measure, Tolerance } from '../units/measure.ts';
 
 /** A physical value as a document writes it. `place` is that of the whole value. */
 export type Setpoint = Fixed | Ramp | Range | Unknown | None;
@@ -44,5 +44,12 @@ export interface None {
 /** `rest`: what the other shares leave of one. */
 export interface Rest {
   readonly kind: 'rest';
+  readonly place: Place;
+}
+
+/** How well a gauge, a gas line or a site's setpoints hold: `1 % of full scale`, `0.25 % of reading`, `0.1 s`. */
+export interface Accuracy {
+  readonly kind: 'accuracy';
+  readonly tolerance: Tolerance;
   readonly place: Place;
 }

@@ -17,7 +17,7 @@ export const COLLISION_INTEGRAL_RANGE = { from: 0.3, to: 100 } as const;
  * @returns Ω11*: reduced collision integral [1]
  * @source Neufeld, Janzen & Aziz, J. Chem. Phys. 57, 1100 (1972); dipole term Brokaw, Ind. Eng. Chem. Process Des. Dev. 8, 240 (1969)
  * @example omega11(100) -> 0.5167177
- * @example omega11(2, 0.5) -> 1.12294
+ * @example omega11(2, 0.5) -> 1.12286
  */
 export function omega11(reducedTemperature: number, polarity = 0): number {
   const t = reducedTemperature;
@@ -44,8 +44,8 @@ export function omega11(reducedTemperature: number, polarity = 0): number {
  * @param polarity δ²: square of the pair's reduced dipole [1]
  * @returns Ω22*: reduced collision integral [1]
  * @source Neufeld, Janzen & Aziz, J. Chem. Phys. 57, 1100 (1972); dipole term Brokaw, Ind. Eng. Chem. Process Des. Dev. 8, 240 (1969)
- * @example omega22(1) -> 1.5925
- * @example omega22(1, 0.5) -> 1.6925
+ * @example omega22(1) -> 1.59315
+ * @example omega22(1, 0.5) -> 1.69315
  */
 export function omega22(reducedTemperature: number, polarity = 0): number {
   const t = reducedTemperature;

@@ -15,7 +15,7 @@ import { meanSpeed } from './state.ts';
  * @param temperature T: gas temperature [K]
  * @returns d: effective hard-sphere diameter [m]
  * @source Hirschfelder, Curtiss & Bird 1954, sec. 8.2; Ω22* of Neufeld, Janzen & Aziz 1972
- * @example collisionDiameter(3.33e-10, 136.5, 0, 298.15) -> 3.5714e-10
+ * @example collisionDiameter(3.33e-10, 136.5, 0, 298.15) -> 3.5573e-10
  */
 export function collisionDiameter(diameter: number, wellDepth: number, polarity: number, temperature: number): number {
   return diameter * Math.sqrt(omega22(temperature / wellDepth, polarity));
@@ -34,7 +34,7 @@ export function collisionDiameter(diameter: number, wellDepth: number, polarity:
  * @param temperature T: gas temperature [K]
  * @returns Q: cross-section [m2]
  * @source Hirschfelder, Curtiss & Bird 1954, sec. 8.2; Ω11* of Neufeld, Janzen & Aziz 1972
- * @example diffusionCrossSection(3.33e-10, 136.5, 0, 298.15) -> 3.6443e-19
+ * @example diffusionCrossSection(3.33e-10, 136.5, 0, 298.15) -> 3.6363e-19
  */
 export function diffusionCrossSection(
   diameter: number,
@@ -87,7 +87,7 @@ export function meanFreePath(
  * @param path λ: mean free path [m]
  * @returns z: collision frequency [1/s]
  * @source Chapman & Cowling 1970, sec. 5.21
- * @example collisionFrequency(458.94, 6.6332e-8) -> 6.9189e9
+ * @example collisionFrequency(458.94, 6.6332e-8) -> 6.919e9
  */
 export function collisionFrequency(speed: number, path: number): number {
   return speed / path;
@@ -164,7 +164,7 @@ export function thermalAtomPath(
  * @param temperature T: gas temperature [K]
  * @returns λ: mean free path [m]
  * @source Kaye & Laby, Tables of Physical and Chemical Constants, sec. 2.2.4
- * @example pathFromViscosity(17.8e-6, 100000, 0.028014, 298.15) -> 6.7600e-8
+ * @example pathFromViscosity(17.8e-6, 100000, 0.028014, 298.15) -> 6.7597e-8
  */
 export function pathFromViscosity(viscosity: number, pressure: number, molarMass: number, temperature: number): number {
   return ((4 * viscosity) / (5 * pressure)) * meanSpeed(molarMass, temperature);

@@ -52,7 +52,7 @@ export function longTubeConductance(diameter: number, length: number, speed: num
  * @param viscosity μ: viscosity, from which λ_M is Maxwell's path [Pa s]
  * @returns C: conductance [m3/s]
  * @source Knudsen, Ann. Phys. 333 (28), 75 (1909); constants for the radius over Maxwell's path as in Dushman 1962
- * @example knudsenTubeConductance(0.02, 1, 10, 293.15, 0.02896, 18.2e-6) -> 0.0029422
+ * @example knudsenTubeConductance(0.02, 1, 10, 293.15, 0.02896, 18.2e-6) -> 0.0029469
  */
 export function knudsenTubeConductance(
   diameter: number,
@@ -126,7 +126,7 @@ export function criticalPressureRatio(heatCapacityRatio: number): number {
  * @param heatCapacityRatio γ: ratio of the heat capacities [1]
  * @returns C/A: conductance per area [m/s]
  * @source Cengel & Cimbala 2006, ch. 12; Umrath et al., Fundamentals of Vacuum Technology, 1998
- * @example chokedConductancePerArea(293.15, 0.02896, 1.4) -> 198.64
+ * @example chokedConductancePerArea(293.15, 0.02896, 1.4) -> 198.647
  */
 export function chokedConductancePerArea(temperature: number, molarMass: number, heatCapacityRatio: number): number {
   const soundSpeed = Math.sqrt((heatCapacityRatio * GAS_CONSTANT * temperature) / molarMass);
@@ -158,7 +158,7 @@ export function chokedConductancePerArea(temperature: number, molarMass: number,
  * @param heatCapacityRatio γ: ratio of the heat capacities [1]
  * @returns p_up: pressure upstream of the holes [Pa]
  * @source Knudsen 1909; Dagan, Weinbaum & Pfeffer, J. Fluid Mech. 115, 505 (1982); Santeler, J. Vac. Sci. Technol. A 4, 338 (1986)
- * @example plenumPressure(1e18, 4, 300, 0.5e-3, 6e-3, 0.03995, 22.7e-6, 1.6667) -> 487
+ * @example plenumPressure(1e18, 4, 300, 0.5e-3, 6e-3, 0.03995, 22.7e-6, 1.6667) -> 750.91
  */
 export function plenumPressure(
   flowPerHole: number,

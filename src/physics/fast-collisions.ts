@@ -29,7 +29,7 @@ export const UNIVERSAL_CROSS_SECTION_RANGE = { from: -14.5, to: -4.1 } as const;
  * @param temperature T: gas temperature [K]
  * @returns r: collisions per length [1/m]
  * @source Chapman & Cowling 1970, sec. 5.4 (path of a molecule of given speed); cross-section as `fastCrossSection`
- * @example fastCollisionRate(1.5243e-18, 0.063546, 29, 1.2e20, 3.66e-10, 170, 0.03995, 18, 1, 300) -> 20
+ * @example fastCollisionRate(1.5243e-18, 0.063546, 29, 1.2e20, 3.66e-10, 170, 0.03995, 18, 1, 300) -> 21.784
  */
 export function fastCollisionRate(
   energy: number,
@@ -90,7 +90,7 @@ const SOFT_ABOVE = 0.1 * ELEMENTARY_CHARGE;
  * @param gasAtoms a: atoms in a molecule of the gas [1]
  * @returns Q: cross-section [m2]
  * @source Neufeld, Janzen & Aziz 1972; Ziegler, Biersack & Littmark, The Stopping and Range of Ions in Solids, 1985 (universal potential); own fit and bridge
- * @example fastCrossSection(5.9e-19, 3.66e-10, 170, 29, 18, 1) -> 1.6e-19
+ * @example fastCrossSection(5.9e-19, 3.66e-10, 170, 29, 18, 1) -> 1.81317e-19
  */
 export function fastCrossSection(
   relativeEnergy: number,
@@ -124,7 +124,7 @@ export function fastCrossSection(
  * @param gasAtoms a_gas: atoms in a molecule of the gas [1]
  * @returns x: logarithm of the reduced energy [1]
  * @source Ziegler, Biersack & Littmark 1985, ch. 2
- * @example logReducedEnergy(1.602176634e-19, 29, 18, 1) -> -11.098
+ * @example logReducedEnergy(1.602176634e-19, 29, 18, 1) -> -11.0973
  */
 export function logReducedEnergy(
   relativeEnergy: number,

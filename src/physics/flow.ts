@@ -93,7 +93,7 @@ export function pumpingSpeed(flow: number, pumpTemperature: number, pressure: nu
  * @param area A: area normal to the flow [m2]
  * @returns u: velocity [m/s]
  * @source conservation of molecules; ideal gas law
- * @example bulkVelocity(4.47797e20, 900, 50, 0.03) -> 3.7096
+ * @example bulkVelocity(4.47797e20, 900, 50, 0.03) -> 3.7095
  */
 export function bulkVelocity(flow: number, temperature: number, pressure: number, area: number): number {
   return (flow * BOLTZMANN * temperature) / (pressure * area);
@@ -187,7 +187,7 @@ export function plugRemainder(turnovers: number, peclet: number): number {
  * @param conductivity κ: thermal conductivity at the film temperature [W/(m K)]
  * @returns Ra: Rayleigh number [1]
  * @source Chandrasekhar, Hydrodynamic and Hydromagnetic Stability, 1961, ch. II
- * @example rayleigh(600, 0.05, 0.569, 1075, 600, 2.96e-5, 0.0448) -> 321719
+ * @example rayleigh(600, 0.05, 0.569, 1075, 600, 2.96e-5, 0.0448) -> 321732
  */
 export function rayleigh(
   temperatureDifference: number,

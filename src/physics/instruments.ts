@@ -50,7 +50,7 @@ export function transpirationLimit(gaugeTemperature: number, chamberTemperature:
  * @param c C: constant of the gas [K0.5/(Pa0.5 m0.5)]
  * @returns p_gauge/p: ratio of the pressures [1]
  * @source Takaishi & Sensui, Trans. Faraday Soc. 59, 2503 (1963)
- * @example transpiration(4, 0.0046, 318.15, 296.15, 6.0759e7, 6060.5, 42.724) -> 1.01657
+ * @example transpiration(4, 0.0046, 318.15, 296.15, 6.0760e7, 6060.5, 42.724) -> 1.01875
  */
 export function transpiration(
   gaugePressure: number,

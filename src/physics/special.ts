@@ -62,8 +62,8 @@ function erfcTail(x: number): number {
  * @param x argument [1]
  * @returns E_n(x) [1]
  * @source Abramowitz & Stegun 1964, eq. 5.1.11, 5.1.14 and 5.1.22; values in Table 5.4
- * @example exponentialIntegral(3, 1) -> 0.1096919670
- * @example exponentialIntegral(1, 1) -> 0.2193839344
+ * @example exponentialIntegral(3, 1) -> 0.109691967198
+ * @example exponentialIntegral(1, 1) -> 0.219383934396
  */
 export function exponentialIntegral(n: number, x: number): number {
   if (!Number.isInteger(n) || n < 1 || !(x >= 0)) return NaN;

@@ -15,7 +15,7 @@ export const USUAL_SITE_DENSITY = 1e19;
  * @param temperature T: gas temperature [K]
  * @returns Γ: impingement rate [1/(m2 s)]
  * @source Hertz, Ann. Phys. 253 (10), 177 (1882); Knudsen, Ann. Phys. 333 (28), 75 (1909)
- * @example impingement(1.33322e-4, 0.028014, 293.15) -> 3.8762e18
+ * @example impingement(1.33322e-4, 0.028014, 293.15) -> 3.87626e18
  */
 export function impingement(pressure: number, molarMass: number, temperature: number): number {
   return pressure / Math.sqrt(2 * Math.PI * (molarMass / AVOGADRO) * BOLTZMANN * temperature);

@@ -16,7 +16,7 @@ export const MONATOMIC_HEAT_CAPACITY = 1.5 * GAS_CONSTANT;
  * @param collisionDiameter d: effective hard-sphere diameter at T [m]
  * @returns μ: viscosity [Pa s]
  * @source Poling, Prausnitz & O'Connell, The Properties of Gases and Liquids, 5th ed. 2001, eq. 9-3.9; Chapman & Cowling 1970, ch. 10
- * @example viscosity(0.039948, 298.15, 3.58e-10) -> 2.2517e-5
+ * @example viscosity(0.039948, 298.15, 3.58e-10) -> 2.2732e-5
  */
 export function viscosity(molarMass: number, temperature: number, collisionDiameter: number): number {
   const mass = molarMass / AVOGADRO;
@@ -86,7 +86,7 @@ function wilkeFactor(massRatio: number, viscosityRatio: number): number {
  * @param crossSection Q = π σ² Ω11*: cross-section of the pair at T [m2]
  * @returns D: diffusivity [m2/s]
  * @source Poling, Prausnitz & O'Connell 2001, eq. 11-3.2; Chapman & Cowling 1970, ch. 14
- * @example diffusivity(0.0040026, 0.039948, 298.15, 101325, 2.1e-19) -> 7.438e-5
+ * @example diffusivity(0.0040026, 0.039948, 298.15, 101325, 2.1e-19) -> 7.5054e-5
  */
 export function diffusivity(
   molarMassA: number,
@@ -169,7 +169,7 @@ export function thermalConductivity(
  * @param molarMasses M_i: molar masses [kg/mol]
  * @returns κ: thermal conductivity of the mixture [W/(m K)]
  * @source Wassiljewa, Phys. Z. 5, 737 (1904); Mason & Saxena, Phys. Fluids 1, 361 (1958); Wilke, J. Chem. Phys. 18, 517 (1950)
- * @example mixtureThermalConductivity([0.5, 0.5], [0.1552, 0.01771], [19.93e-6, 22.72e-6], [0.0040026, 0.039948]) -> 0.0654
+ * @example mixtureThermalConductivity([0.5, 0.5], [0.1552, 0.01771], [19.93e-6, 22.72e-6], [0.0040026, 0.039948]) -> 0.05964
  */
 export function mixtureThermalConductivity(
   fractions: readonly number[],

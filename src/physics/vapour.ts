@@ -11,7 +11,7 @@
  * @param c c: constant of the substance [K]
  * @returns p: vapour pressure [Pa]
  * @source Antoine, C. R. Acad. Sci. 107, 681 (1888)
- * @example vapourPressure(373.15, 10.19621, 1730.63, -39.724) -> 1.0132e5
+ * @example vapourPressure(373.15, 10.19621, 1730.63, -39.724) -> 1.0134e5
  */
 export function vapourPressure(temperature: number, a: number, b: number, c: number): number {
   return 10 ** (a - b / (temperature + c));

@@ -1,6 +1,7 @@
 import { inapplicable, missing } from './quantity.ts';
 import type { Inapplicable, Missing } from './reading.ts';
 import type { Scope } from './scope.ts';
+import { countElements } from '../substances/formula.ts';
 
 /** Atoms of each element that one formula unit of film takes from the feed. */
 export interface Balance {
@@ -60,5 +61,5 @@ function etchBalance(film: ReadonlyMap<string, number>, product: ReadonlyMap<str
 
 /** A product that is one of the gases, else a formula by itself. */
 function productFormula(product: string, scope: Scope): ReadonlyMap<string, number> {
-  return scope.gas(product)?.formula ?? scope.library.formula(product);
+  return scope.gas(product)?.formula ?? countElements(product) ?? new Map();
 }

@@ -11,6 +11,7 @@ import {
   uncollidedFraction,
   uncollidedFractionCosine,
 } from '../physics/sputtered-atoms.ts';
+import { atomicNumber } from '../substances/elements.ts';
 import { inapplicable, quantity, type Recipe } from './quantity.ts';
 import type { Inapplicable, Missing } from './reading.ts';
 import type { Reference } from './reference.ts';
@@ -85,27 +86,29 @@ function fastIngredients(reference: Reference, scope: Scope, emitted: Emitted): 
     pairs.map((pair) => `${pair}.diameter`),
     pairs.map((pair) => `${pair}.well_depth`),
     partners.map(({ gas }) => `gases.${gas}.molar_mass`),
-    partners.map(({ pair }) => ATOMS_OF_PARTNER[pair]?.[0] ?? NaN),
-    partners.map(({ pair }) => ATOMS_OF_PARTNER[pair]?.[1] ?? NaN),
+    partners.map(({ pair }) => meanCharge(pair, scope)),
+    partners.map(({ pair }) => atomsIn(pair, scope)),
     { id: 'gas-temperature' },
   ];
 }
 
-/** Gases for which pair values of atoms are published, each with its atomic number and atoms in a molecule. */
-const ATOMS_OF_PARTNER: Readonly<Record<string, readonly [number, number]>> = {
-  He: [2, 1],
-  Ne: [10, 1],
-  Ar: [18, 1],
-  Kr: [36, 1],
-  Xe: [54, 1],
-  N2: [7, 2],
-  O2: [8, 2],
-  H2: [1, 2],
-};
-
-/** The gas whose pair values count: its own, else those of nitrogen. */
+/** The gas whose pair values count: its own, else the one that stands in. */
 function pairFor(atom: string, gas: string, scope: Scope): string {
-  return ATOMS_OF_PARTNER[gas] !== undefined && scope.library.atom(atom)?.partners.has(gas) === true ? gas : 'N2';
+  return scope.library.atom(atom)?.pairFor(gas)?.partner ?? gas;
+}
+
+/** Atoms in a molecule of a gas. */
+function atomsIn(gas: string, scope: Scope): number {
+  let atoms = 0;
+  for (const count of scope.gas(gas)?.formula.values() ?? []) atoms += count;
+  return atoms;
+}
+
+/** Mean atomic number of the atoms of a gas. */
+function meanCharge(gas: string, scope: Scope): number {
+  let charge = 0;
+  for (const [element, count] of scope.gas(gas)?.formula ?? []) charge += count * (atomicNumber(element) ?? NaN);
+  return charge / atomsIn(gas, scope);
 }
 
 function pairRemarks(reference: Reference, scope: Scope): readonly string[] {

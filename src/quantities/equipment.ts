@@ -96,6 +96,26 @@ export const basePressure = quantity<[]>({
   value: () => NaN,
 });
 
+export const baseLoad = quantity<[base: number, pressure: number]>({
+  id: 'base-load',
+  symbol: 'p_base/p',
+  dimension: 'fraction',
+  statement: 'Base pressure over the pressure of the step.',
+  source: 'definition',
+  from: (_, { fed }) => (fed ? [{ id: 'base-pressure' }, { id: 'gas-pressure' }] : inapplicable('no gas flows')),
+  value: (base, pressure) => base / pressure,
+});
+
+export const leakLoad = quantity<[leak: number, flow: number]>({
+  id: 'leak-load',
+  symbol: 'F_leak/F',
+  dimension: 'fraction',
+  statement: 'Leak and outgassing over the flow of the step.',
+  source: 'definition',
+  from: (_, { fed }) => (fed ? [{ id: 'leak-rate' }, { id: 'flow-rate' }] : inapplicable('no gas flows')),
+  value: (leak, flow) => (flow > 0 ? leak / flow : inapplicable('no gas flows')),
+});
+
 export const speedDrift = quantity<[now: number, flows: readonly number[], pressure: number, temperature: number]>({
   id: 'speed-drift',
   symbol: '|S/S_ref - 1|',

@@ -1,7 +1,7 @@
 import type { Given } from '../steps/given.ts';
 import { assumedGiven } from './assumed.ts';
 import { quantityNamed } from './catalogue.ts';
-import { inapplicable, missing, type Ingredient, type Quantity } from './quantity.ts';
+import { inapplicable, missing, quantity, type Ingredient, type Quantity } from './quantity.ts';
 import type { Inapplicable, Missing } from './reading.ts';
 import { referenceName, type Reference } from './reference.ts';
 import type { Scope } from './scope.ts';
@@ -84,6 +84,17 @@ export class Plan {
     return node;
   }
 
+  /** The node of one number over another. */
+  ratio(reference: Reference, over: Reference): Node {
+    const name = `${referenceName(reference)} over ${referenceName(over)}`;
+    const known = this.#byName.get(name);
+    if (known !== undefined) return known;
+    const inputs = [this.number(reference), this.number(over)];
+    const node = this.#add({ kind: 'law', name, inputs, quantity: RATIO, reference, shape: ['one', 'one'] });
+    this.#byName.set(name, node);
+    return node;
+  }
+
   /** The node of a given. Addresses and names of numbers are told apart by a leading `=`. */
   given(address: string): Node {
     const key = `=${address}`;
@@ -148,6 +159,16 @@ export class Plan {
     return placed;
   }
 }
+
+const RATIO = quantity<[dividend: number, divisor: number]>({
+  id: 'ratio',
+  symbol: 'a/b',
+  dimension: 'number',
+  statement: 'One number over another.',
+  source: 'definition',
+  from: () => missing(),
+  value: (dividend, divisor) => dividend / divisor,
+});
 
 type WithoutSlot<T> = T extends Node ? Omit<T, 'slot'> : never;
 

@@ -8,7 +8,7 @@ export interface Reference {
   readonly at?: 'start' | 'end' | 'mean';
 }
 
-const SHAPE = /^([a-z0-9-]+)(?:\.([a-z0-9_-]+))?(?::([A-Za-z0-9_/-]+))?(?:@(start|end|mean))?$/;
+const SHAPE = /^([a-z0-9-]+)(?:\.([a-z0-9_-]+))?(?::([^:@\s]+))?(?:@(start|end|mean))?$/;
 
 /** The reference that a name spells, or undefined where it is none. */
 export function parseReference(name: string): Reference | undefined {

@@ -4,7 +4,7 @@ import type { Recipe, Step } from '../steps/step.ts';
 import type { Library } from '../substances/library.ts';
 import { evaluate, lawAt, type Values } from './evaluate.ts';
 import { Plan, type Node } from './plan.ts';
-import type { Known, Reading, Slope } from './reading.ts';
+import type { Reading, Slope } from './reading.ts';
 import type { Reference } from './reference.ts';
 import { Scope } from './scope.ts';
 import { slopesOf, standardUncertainty } from './slopes.ts';
@@ -17,18 +17,17 @@ export interface Change {
 }
 
 /** One line of a derivation: a number or a given, what it is read from, and what a reader must know of it. */
-export interface Derivation {
-  readonly name: string;
+export interface Line {
   readonly node: Node;
   readonly reading: Reading;
   /** Standard. */
   readonly uncertainty: number;
+  /** Of a given: the value with its origin. */
   readonly given?: Given;
-  readonly inputs: readonly Derivation[];
   readonly remarks: readonly string[];
 }
 
-/** A step whose numbers can be read. Reading one works out those it needs, once, and keeps them. A run never changes. */
+/** A step whose numbers can be read, alone or one `over` another. Reading one works out those it needs, once, and keeps them. A run never changes. */
 export class StepRun implements Values {
   readonly step: Step;
   readonly plan: Plan;
@@ -43,23 +42,33 @@ export class StepRun implements Values {
     this.givens = givens;
   }
 
-  read(reference: Reference): Reading {
-    return evaluate(this, this.plan.number(reference));
+  read(reference: Reference, over?: Reference): Reading {
+    return evaluate(this, this.#node(reference, over));
   }
 
   /** Standard uncertainty of a known number; zero where it is judged at its setpoint. */
-  uncertainty(reference: Reference): number {
-    return standardUncertainty(this, this.plan.number(reference));
+  uncertainty(reference: Reference, over?: Reference): number {
+    return standardUncertainty(this, this.#node(reference, over));
   }
 
   /** How every given moves the number, strongest contribution first. */
-  slopes(reference: Reference): readonly Slope[] {
-    return slopesOf(this, this.plan.number(reference));
+  slopes(reference: Reference, over?: Reference): readonly Slope[] {
+    return slopesOf(this, this.#node(reference, over));
   }
 
-  /** All that was read on the way to a number, down to the givens. */
-  derive(reference: Reference): Derivation {
-    return derivation(this, this.plan.number(reference));
+  /** All that was read on the way to a number, each once: the number itself first, every line before those it is read from. */
+  derive(reference: Reference, over?: Reference): readonly Line[] {
+    return reachedFrom(this.#node(reference, over)).map((node) => lineOf(this, node));
+  }
+
+  /** What a reader must know of a number and of all that it is read from. */
+  remarks(reference: Reference, over?: Reference): readonly string[] {
+    const nodes = reachedFrom(this.#node(reference, over));
+    return [...new Set(nodes.flatMap((node) => remarksOf(this, node)))];
+  }
+
+  #node(reference: Reference, over: Reference | undefined): Node {
+    return over === undefined ? this.plan.number(reference) : this.plan.ratio(reference, over);
   }
 
   /** The given that stands at an address in this run, or the default that stands in for it. */
@@ -131,27 +140,34 @@ function shareUnreached(from: StepRun, to: StepRun, changed: ReadonlySet<string>
   }
 }
 
-export function givenAt(run: StepRun, address: string, fallback: Given | undefined): Given | undefined {
+function givenAt(run: StepRun, address: string, fallback: Given | undefined): Given | undefined {
   return run.givens.get(address) ?? fallback;
 }
 
-function derivation(run: StepRun, node: Node): Derivation {
-  const reading = evaluate(run, node);
+/** The nodes that a number is read from and itself, each once, from the number down. */
+function reachedFrom(target: Node): readonly Node[] {
+  const reached = new Map<number, Node>();
+  const visit = (node: Node): void => {
+    if (reached.has(node.slot)) return;
+    reached.set(node.slot, node);
+    for (const input of node.inputs) visit(input);
+  };
+  visit(target);
+  return [...reached.values()].sort((a, b) => b.slot - a.slot);
+}
+
+function lineOf(run: StepRun, node: Node): Line {
   const given = node.kind === 'given' ? givenAt(run, node.address, node.fallback) : undefined;
   return {
-    name: node.name,
     node,
-    reading,
+    reading: evaluate(run, node),
     uncertainty: standardUncertainty(run, node),
     ...(given === undefined ? {} : { given }),
-    inputs: node.inputs.map((input) => derivation(run, input)),
-    remarks: remarksOf(run, node, reading),
+    remarks: remarksOf(run, node),
   };
 }
 
-function remarksOf(run: StepRun, node: Node, reading: Reading): readonly string[] {
-  if (node.kind !== 'law' || reading.kind !== 'known') return [];
+function remarksOf(run: StepRun, node: Node): readonly string[] {
+  if (node.kind !== 'law' || evaluate(run, node).kind !== 'known') return [];
   return node.quantity.remarks(node.reference, run.plan.scope, lawAt(run, node));
 }
-
-export type { Known };

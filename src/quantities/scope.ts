@@ -1,4 +1,5 @@
-import type { Gas, Library } from '../substances/library.ts';
+import type { Gas } from '../substances/gas.ts';
+import type { Library } from '../substances/library.ts';
 import type { Emitter, Setup, Step } from '../steps/step.ts';
 import type { Reference } from './reference.ts';
 

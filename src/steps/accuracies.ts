@@ -1,6 +1,6 @@
 import type { Dimension } from '../units/dimensions.ts';
 import type { Measure, Tolerance } from '../units/measure.ts';
-import { standardUncertainty } from './uncertainty.ts';
+import { standardUncertainty } from '../units/standard-uncertainty.ts';
 import type { Scale } from './written.ts';
 
 /** How well a chamber's setpoints hold where they give no tolerance of their own. */

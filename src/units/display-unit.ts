@@ -1,4 +1,6 @@
+import { ELEMENTARY_CHARGE } from '../physics/constants.ts';
 import { DIMENSIONS } from './dimensions.ts';
+import { SCCM, TORR } from './table.ts';
 import type { Dimension } from './dimensions.ts';
 
 /**
@@ -8,95 +10,35 @@ import type { Dimension } from './dimensions.ts';
 export function displayUnit(value: number, dimension: Dimension): string {
   if (dimension === 'fraction') return '';
   const [usual = ''] = DIMENSIONS[dimension].units;
-  if (value === 0) return usual;
-  return LADDERS[dimension]?.findLast(([from]) => Math.abs(value) >= from)?.[1] ?? usual;
+  const size = Math.abs(value);
+  if (size === 0) return usual;
+  if (dimension === 'pressure' && size < HIGH_VACUUM) return 'Torr';
+  return LADDERS.get(dimension)?.findLast(([, from]) => size >= from)?.[0] ?? usual;
 }
 
-const TORR = 101325 / 760;
-const SCCM = 4.477962e17;
-const EV = 1.602176634e-19;
+/** Smaller pressures are written with an exponent, and then in Torr. */
+const HIGH_VACUUM = 1e-5 * TORR;
 
-/** From which size on, in SI, which unit is printed. */
-const LADDERS: Readonly<Partial<Record<Dimension, readonly (readonly [from: number, unit: string])[]>>> = {
-  pressure: [
-    [0, 'Torr'],
-    [1e-5 * TORR, 'mTorr'],
-    [TORR, 'Torr'],
-  ],
-  length: [
-    [0, 'nm'],
-    [1e-6, 'um'],
-    [1e-3, 'mm'],
-    [10, 'm'],
-    [1e4, 'km'],
-  ],
-  area: [
-    [0, 'mm2'],
-    [1e-5, 'cm2'],
-    [1, 'm2'],
-  ],
-  volume: [
-    [0, 'mm3'],
-    [1e-7, 'cm3'],
-    [1e-3, 'L'],
-    [10, 'm3'],
-  ],
-  time: [
-    [0, 'ns'],
-    [1e-6, 'us'],
-    [1e-3, 'ms'],
-    [0.1, 's'],
-  ],
-  flow: [
-    [0, 'sccm'],
-    [1e4 * SCCM, 'slm'],
-  ],
-  amount: [
-    [0, 'nmol'],
-    [1e-6, 'umol'],
-    [1e-3, 'mmol'],
-    [1, 'mol'],
-  ],
-  mass: [
-    [0, 'mg'],
-    [1e-3, 'g'],
-    [10, 'kg'],
-  ],
-  'pressure-rate': [
-    [0, 'mTorr/min'],
-    [(10 * TORR) / 60, 'Torr/min'],
-  ],
-  rate: [
-    [0, 'nm/min'],
-    [1e-6 / 60, 'um/min'],
-  ],
-  power: [
-    [0, 'mW'],
-    [0.1, 'W'],
-    [1e4, 'kW'],
-  ],
-  voltage: [
-    [0, 'mV'],
-    [0.1, 'V'],
-    [1e4, 'kV'],
-  ],
-  energy: [
-    [0, 'meV'],
-    [0.1 * EV, 'eV'],
-    [1e4 * EV, 'keV'],
-  ],
-  frequency: [
-    [0, 'Hz'],
-    [1e3, 'kHz'],
-    [1e6, 'MHz'],
-    [1e9, 'GHz'],
-  ],
-  exposure: [
-    [0, 'langmuir'],
-    [1e-4 * TORR, 'Torr s'],
-  ],
-  'pressure-length': [
-    [0, 'mTorr cm'],
-    [1e-2 * TORR, 'Torr cm'],
-  ],
-};
+/** Which unit is printed from which size on, in SI. */
+const FROM = {
+  pressure: { mTorr: 0, Torr: TORR },
+  length: { nm: 0, um: 1e-6, mm: 1e-3, m: 10, km: 1e4 },
+  area: { mm2: 0, cm2: 1e-5, m2: 1 },
+  volume: { mm3: 0, cm3: 1e-7, L: 1e-3, m3: 10 },
+  time: { ns: 0, us: 1e-6, ms: 1e-3, s: 0.1 },
+  flow: { sccm: 0, slm: 1e4 * SCCM },
+  amount: { nmol: 0, umol: 1e-6, mmol: 1e-3, mol: 1 },
+  mass: { mg: 0, g: 1e-3, kg: 10 },
+  'pressure-rate': { 'mTorr/min': 0, 'Torr/min': (10 * TORR) / 60 },
+  rate: { 'nm/min': 0, 'um/min': 1e-6 / 60 },
+  power: { mW: 0, W: 0.1, kW: 1e4 },
+  voltage: { mV: 0, V: 0.1, kV: 1e4 },
+  energy: { meV: 0, eV: 0.1 * ELEMENTARY_CHARGE, keV: 1e4 * ELEMENTARY_CHARGE },
+  frequency: { Hz: 0, kHz: 1e3, MHz: 1e6, GHz: 1e9 },
+  exposure: { langmuir: 0, 'Torr s': 1e-4 * TORR },
+  'pressure-length': { 'mTorr cm': 0, 'Torr cm': 1e-2 * TORR },
+} as const satisfies Partial<Record<Dimension, Readonly<Record<string, number>>>>;
+
+const LADDERS: ReadonlyMap<string, readonly [unit: string, from: number][]> = new Map(
+  Object.entries(FROM).map(([dimension, ladder]) => [dimension, Object.entries(ladder)]),
+);

@@ -1,3 +1,4 @@
+import { STANDARD_PRESSURE, STANDARD_TEMPERATURE } from '../physics/constants.ts';
 import { unitSpelled } from './lookup.ts';
 
 /** What "standard" means on a chamber: the temperature in K and pressure in Pa at which a volume of gas is counted. */
@@ -7,7 +8,10 @@ export interface FlowReference {
 }
 
 /** 0 degC and 101325 Pa (SEMI E12), at which the factors of the table of units hold. */
-export const STANDARD_REFERENCE: FlowReference = { temperature: 273.15, pressure: 101325 };
+export const STANDARD_REFERENCE: FlowReference = {
+  temperature: STANDARD_TEMPERATURE,
+  pressure: STANDARD_PRESSURE,
+};
 
 /**
  * What a flow read in `unit` is multiplied by on a chamber with another reference. A standard volume holds

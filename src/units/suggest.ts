@@ -1,22 +1,25 @@
 /**
  * The candidate that was probably meant by a misspelt word: one that differs in case, `-`, `_` or blanks only, else the one
- * at the smallest edit distance, as long as that is small for the word's length. Undefined where none is near.
+ * at the smallest edit distance, as long as that is small for the word's length. Of equally near ones, the one that
+ * begins alike for longest. Undefined where none is near.
  */
 export function nearest(word: string, candidates: Iterable<string>): string | undefined {
   if (word.length > LONGEST) return undefined;
   const folded = fold(word);
   let best: string | undefined;
   let distance = allowedDistance(folded) + 1;
+  let shared = 0;
   for (const candidate of candidates) {
     if (candidate.length > LONGEST) continue;
     const other = fold(candidate);
     if (other === folded) return candidate;
     const found = editDistance(folded, other, distance);
-    const better =
-      found < distance || (found === distance && best !== undefined && startsMoreAlike(word, candidate, best));
-    if (!better || found === Math.max(folded.length, other.length)) continue;
+    const start = sharedStart(folded, other);
+    const nearer = found < distance || (found === distance && best !== undefined && start > shared);
+    if (!nearer || found === Math.max(folded.length, other.length)) continue;
     best = candidate;
     distance = found;
+    shared = start;
   }
   return best;
 }
@@ -32,8 +35,11 @@ function allowedDistance(word: string): number {
   return word.length < 2 ? 0 : Math.min(3, Math.max(1, Math.floor(word.length / 3)));
 }
 
-function startsMoreAlike(word: string, candidate: string, best: string): boolean {
-  return candidate[0] === word[0] && best[0] !== word[0];
+/** How many characters both begin with. */
+function sharedStart(a: string, b: string): number {
+  let length = 0;
+  while (length < a.length && a[length] === b[length]) length += 1;
+  return length;
 }
 
 /**

@@ -1,3 +1,11 @@
+import {
+  AVOGADRO,
+  BOLTZMANN,
+  DEBYE,
+  ELEMENTARY_CHARGE,
+  STANDARD_PRESSURE,
+  STANDARD_TEMPERATURE,
+} from '../physics/constants.ts';
 import { DIMENSION_NAMES } from './dimensions.ts';
 import type { Dimension } from './dimensions.ts';
 
@@ -34,21 +42,16 @@ const E12 = 'SEMI E12: 0 degC, 101325 Pa';
 const PV = 'SI Brochure, 9th ed. 2019; counted at the flow reference temperature, 0 degC by SEMI E12';
 const GREEN = 'IUPAC Green Book, 3rd ed. 2007';
 
-/** Exact by the SI of 2019: Boltzmann's constant in J/K, Avogadro's in 1/mol, the elementary charge in C. */
-const BOLTZMANN = 1.380649e-23;
-const AVOGADRO = 6.02214076e23;
-const CHARGE = 1.602176634e-19;
-
+/** Standard atmosphere and torr, in Pa. */
 const ATM = 101325;
-const TORR = ATM / 760;
+export const TORR = ATM / 760;
 const INCH = 0.0254;
 const CUBIC_FOOT = 0.3048 ** 3;
-/** Molecules in a cubic metre, and molecules for each Pa m3, of gas at 0 degC and 101325 Pa. */
-const PER_PV = 1 / (BOLTZMANN * 273.15);
-const PER_VOLUME = ATM * PER_PV;
-const LANGMUIR = 1e-6 * TORR;
-/** 1e-18 statcoulomb centimetre, in C m. */
-const DEBYE = 1e-21 / 299792458;
+/** Molecules for each Pa m3, and in each m3, of gas at 0 degC and 101325 Pa. */
+const PER_PV = 1 / (BOLTZMANN * STANDARD_TEMPERATURE);
+const PER_VOLUME = STANDARD_PRESSURE * PER_PV;
+/** Molecules a second in a standard cubic centimetre a minute. */
+export const SCCM = (1e-6 / 60) * PER_VOLUME;
 
 /** The units that documents may be written in. To add a unit is to add a line. */
 const LINES: Readonly<Record<Dimension, readonly Line[]>> = {
@@ -108,7 +111,7 @@ const LINES: Readonly<Record<Dimension, readonly Line[]>> = {
     { name: 'd', factor: 86400, source: SI, others: ['day', 'days'] },
   ],
   flow: [
-    { name: 'sccm', factor: (1e-6 / 60) * PER_VOLUME, source: E12, standard: 'volume' },
+    { name: 'sccm', factor: SCCM, source: E12, standard: 'volume' },
     { name: 'slm', factor: (1e-3 / 60) * PER_VOLUME, source: E12, standard: 'volume', others: ['slpm'] },
     { name: 'Pa m3/s', factor: PER_PV, source: PV, standard: 'pV' },
     { name: 'Pa L/s', factor: 1e-3 * PER_PV, source: PV, standard: 'pV', others: ['Pa l/s'] },
@@ -181,10 +184,10 @@ const LINES: Readonly<Record<Dimension, readonly Line[]>> = {
     { name: 'MV', factor: 1e6, source: SI },
   ],
   energy: [
-    { name: 'meV', factor: 1e-3 * CHARGE, source: SI },
-    { name: 'eV', factor: CHARGE, source: SI },
-    { name: 'keV', factor: 1e3 * CHARGE, source: SI },
-    { name: 'MeV', factor: 1e6 * CHARGE, source: SI },
+    { name: 'meV', factor: 1e-3 * ELEMENTARY_CHARGE, source: SI },
+    { name: 'eV', factor: ELEMENTARY_CHARGE, source: SI },
+    { name: 'keV', factor: 1e3 * ELEMENTARY_CHARGE, source: SI },
+    { name: 'MeV', factor: 1e6 * ELEMENTARY_CHARGE, source: SI },
     { name: 'J', factor: 1, source: SI },
     { name: 'kJ/mol', factor: 1e3 / AVOGADRO, source: SI },
   ],
@@ -247,7 +250,7 @@ const LINES: Readonly<Record<Dimension, readonly Line[]>> = {
     { name: 'mbar s', factor: 1e2, source: SP811 },
     { name: 'mTorr s', factor: 1e-3 * TORR, source: SP811 },
     { name: 'Torr s', factor: TORR, source: SP811 },
-    { name: 'langmuir', factor: LANGMUIR, source: '1e-6 Torr s, common practice', others: ['L'] },
+    { name: 'langmuir', factor: 1e-6 * TORR, source: '1e-6 Torr s, common practice', others: ['L'] },
   ],
   velocity: [
     { name: 'mm/s', factor: 1e-3, source: SI },

@@ -23,6 +23,7 @@ export function toleranceSign(text: string): ToleranceSign | undefined {
 
 /** Reads what stands behind the sign, for the value before it: `1 %` of the reading, or an absolute `0.05 mTorr`. */
 export function readTolerance(text: string, measure: Measure): Tolerance | UnitFault {
+  if (text.trim() === '') return { found: 'an empty tolerance', right: WIDTH };
   const share = readShare(text);
   if (share !== undefined) return shareOfReading(text, share, measure);
   const width = absoluteWidth(text, measure.dimension);
@@ -50,13 +51,15 @@ export function negativeFault(text: string): UnitFault {
 /** Why no percentage of a temperature is read. */
 export const SCALE = 'write it in K: a percentage depends on the scale';
 
+const WIDTH = 'a percentage of the reading, or a width with its unit';
+
 const SIGNS: readonly string[] = ['+/-', '±', '+-'];
 
 function shareOfReading(text: string, { value, of }: Share, { dimension, unit }: Measure): Tolerance | UnitFault {
   const share = text.trim();
   if (value < 0) return negativeFault(text);
   if (of === 'full scale' || of === 'other') {
-    return { found: `tolerance ${quoted(text)}`, right: 'a percentage of the reading, or a width with its unit' };
+    return { found: `tolerance ${quoted(text)}`, right: WIDTH };
   }
   if (dimension === 'temperature' && unit !== 'K') {
     return { found: `tolerance ${quoted(text)} of a temperature in ${unit}`, right: SCALE };

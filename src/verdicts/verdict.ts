@@ -1,5 +1,7 @@
 import type { Place } from '../shelf/place.ts';
 import type { Reference } from '../quantities/reference.ts';
+import type { Waiver } from '../steps/step.ts';
+import type { Hazard } from '../substances/gas.ts';
 
 /** Kinds of a verdict, those of SARIF. */
 export type Kind = 'pass' | 'review' | 'fail' | 'open' | 'notApplicable';
@@ -68,18 +70,27 @@ export type Instance =
   | { readonly kind: 'ramp'; readonly fraction: number; readonly time?: number; readonly over: 'step' | 'laps' }
   | { readonly kind: 'range'; readonly address: string; readonly limit: 'at_least' | 'at_most' };
 
-/** A remark that hazards call for: it never passes or fails anything. */
-export interface Caution {
-  readonly file: string;
-  /** Path of the step; absent where it concerns the whole recipe. */
-  readonly path?: string;
+/** A remark that hazards call for: it never passes or fails anything. Its words are made by the reports. */
+export type Caution = GasHazard | FuelWithOxidiser;
+
+/** Gases of one hazard that the recipe uses. */
+export interface GasHazard {
+  readonly kind: 'hazard';
+  readonly hazard: Hazard;
   readonly gases: readonly string[];
-  readonly text: string;
+  /** Paths of the steps that use them. */
+  readonly steps: readonly string[];
 }
 
-/** Something worth knowing that no assumption judges: an unused waiver, a chamber revision that differs, a total. */
-export interface Note {
-  readonly path?: string;
-  readonly place: Place;
-  readonly text: string;
+/** A fuel and an oxidiser that flow in one step. */
+export interface FuelWithOxidiser {
+  readonly kind: 'fuel-with-oxidiser';
+  readonly fuels: readonly string[];
+  readonly oxidisers: readonly string[];
+  readonly steps: readonly string[];
 }
+
+/** Something worth knowing that no assumption judges. Its words are made by the reports. */
+export type Note =
+  | { readonly kind: 'waiver-unused' | 'waiver-expired' | 'waiver-outgrown'; readonly step: string; readonly waiver: Waiver }
+  | { readonly kind: 'chamber-revision'; readonly qualifiedOn: string; readonly revision: string | undefined; readonly place: Place };

@@ -4,7 +4,9 @@ import { entriesOf, halfLastDigit, physicsFiles, type Entry } from './handbook.t
 /** Units that doc comments may use: powers and products of these, of SI and of nothing else. */
 const SYMBOL = /^(?:1|none|any|(?:m|kg|s|K|mol|A|J|Pa|W|V|C|F)(?:\d+(?:\.\d+)?)?)$/;
 
-describe.each(physicsFiles())('%s', (file) => {
+const filesOfLaws = physicsFiles().filter((file) => entriesOf(file).length > 0);
+
+describe.each(filesOfLaws)('%s.ts', (file) => {
   const entries = entriesOf(file);
 
   test.each(entries)('$name documents its parameters in order', ({ parameters, documented }) => {
@@ -30,7 +32,7 @@ describe.each(physicsFiles())('%s', (file) => {
 
 test('every exported function is found by the reader of doc comments', async () => {
   for (const file of physicsFiles()) {
-    const module: Record<string, unknown> = await import(`../../src/physics/${file}`);
+    const module: Record<string, unknown> = await import(`../../src/physics/${file}.ts`);
     const functions = Object.keys(module).filter((name) => typeof module[name] === 'function');
     expect(entriesOf(file).map(({ name }) => name).sort()).toEqual(functions.sort());
   }
@@ -47,7 +49,7 @@ function allSymbols(parts: readonly string[]): boolean {
 }
 
 async function lawOf({ file, name }: Entry): Promise<(...given: readonly unknown[]) => unknown> {
-  const module: Record<string, unknown> = await import(`../../src/physics/${file}`);
+  const module: Record<string, unknown> = await import(`../../src/physics/${file}.ts`);
   const law = module[name];
   if (typeof law !== 'function') throw new Error(`${file} exports no ${name}`);
   return (...given) => Reflect.apply(law, undefined, given);

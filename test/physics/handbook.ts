@@ -24,12 +24,15 @@ export interface Example {
 const FOLDER = fileURLToPath(new URL('../../src/physics/', import.meta.url));
 const FUNCTION = /(?:\/\*\*((?:(?!\*\/)[\s\S])*)\*\/\s*)?^export function (\w+)\(([\s\S]*?)\)(?:: [^{]+)? \{$/gm;
 
+/** Names of the files of src/physics, without their ending. */
 export function physicsFiles(): readonly string[] {
-  return readdirSync(FOLDER).filter((file) => file.endsWith('.ts'));
+  return readdirSync(FOLDER)
+    .filter((name) => name.endsWith('.ts'))
+    .map((name) => name.slice(0, -3));
 }
 
 export function entriesOf(file: string): readonly Entry[] {
-  const text = readFileSync(FOLDER + file, 'utf8');
+  const text = readFileSync(`${FOLDER}${file}.ts`, 'utf8');
   return [...text.matchAll(FUNCTION)].map(([, comment = '', name = '', parameters = '']) => entry(file, name, parameters, comment));
 }
 

@@ -1,4 +1,4 @@
-import type { Tolerance } from '../units/measure.ts';
+import type { Tolerance } from './measure.ts';
 
 /**
  * Standard uncertainty of a value that surely lies within a tolerance: half-width over the root of three (GUM 4.3.7).

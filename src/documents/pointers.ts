@@ -1,0 +1,69 @@
+import { isMap, isSeq } from 'yaml';
+import { keyText, nodePlace, writtenNode } from './nodes.ts';
+import { childOf } from './rules.ts';
+import { quoted } from '../units/unit-fault.ts';
+import type { ParsedNode } from 'yaml';
+import type { Source, TextPlace } from '../shelf/place.ts';
+import type { Pointer } from './document.ts';
+import type { Value } from './plain.ts';
+import type { Sort } from './sort.ts';
+
+/** Where the value that a pointer leads to stands, or its key; the last place on the way, where it leads past the end. */
+export function placeOf(source: Source, root: ParsedNode, pointer: Pointer, part: 'key' | 'value' = 'value'): TextPlace {
+  let node: ParsedNode | null = root;
+  let key: ParsedNode = root;
+  for (const step of pointer) {
+    const next = stepInto(node, step);
+    if (next === undefined) break;
+    node = next.value;
+    key = next.key;
+  }
+  return nodePlace(source, part === 'key' ? key : writtenNode(key, node));
+}
+
+/** Node and key at one step of a pointer; an entry of a list has no key but itself. */
+function stepInto(
+  node: ParsedNode | null,
+  step: string | number,
+): { readonly key: ParsedNode; readonly value: ParsedNode | null } | undefined {
+  if (isMap(node)) {
+    const pair = node.items.find((candidate) => keyText(candidate) === String(step));
+    return pair === undefined ? undefined : { key: pair.key, value: pair.value };
+  }
+  const item = isSeq(node) ? node.items[Number(step)] : undefined;
+  return item === undefined ? undefined : { key: item, value: item };
+}
+
+/** The pointer that a path such as `/steps/0/flows` spells, indices of lists as numbers. */
+export function pointerOf(content: Value, path: string): Pointer {
+  const pointer: (string | number)[] = [];
+  let value: Value | undefined = content;
+  for (const part of path.split('/').slice(1)) {
+    const key = part.replaceAll('~1', '/').replaceAll('~0', '~');
+    const step = Array.isArray(value) ? Number(key) : key;
+    pointer.push(step);
+    value = childOf(value, step);
+  }
+  return pointer;
+}
+
+/** The key that a value stands at, that of its list for an entry. */
+export function nameAt(pointer: Pointer, sort: Sort): string {
+  const name = pointer.findLast((step) => typeof step === 'string');
+  return typeof name === 'string' ? name : sort;
+}
+
+/** ` in flows`; nothing at the top. */
+export function within(pointer: Pointer): string {
+  const name = pointer.findLast((step) => typeof step === 'string');
+  return typeof name === 'string' ? ` in ${name}` : '';
+}
+
+/** What a map is called in a message: by its own name, else by the key it stands at. */
+export function ownerName(owner: Value | undefined, pointer: Pointer, sort: Sort): string {
+  const name = pointer.length === 0 ? undefined : childOf(owner, 'name');
+  if (typeof name === 'string') return quoted(name);
+  const key = nameAt(pointer, sort);
+  if (pointer.length === 0) return `the ${key}`;
+  return typeof pointer.at(-1) === 'number' ? `this entry of ${key}` : key;
+}

@@ -1,0 +1,72 @@
+import { failure, success } from '../shelf/fault.ts';
+import { limited } from './fault-list.ts';
+import { sortOfNodes } from './heading.ts';
+import { placeOf } from './pointers.ts';
+import { plainValue } from './plain.ts';
+import { readNodes } from './syntax.ts';
+import { isSound } from './validate.ts';
+import type { ParsedNode } from 'yaml';
+import type { Fault, Outcome } from '../shelf/fault.ts';
+import type { Source } from '../shelf/place.ts';
+import type { AnyDocument, Document } from './document.ts';
+import type { Sort } from './sort.ts';
+
+/** The document that a text spells, or everything that is wrong with it, each fault at its place. */
+export function readDocument(source: Source): Outcome<AnyDocument> {
+  const nodes = readNodes(source);
+  if (nodes.value === undefined) return limited(nodes.faults);
+  const sort = sortOfNodes(source, nodes.value);
+  return typeof sort === 'string' ? documentOf(source, nodes.value, sort) : failure(sort);
+}
+
+export function readRecipe(source: Source): Outcome<Document<'recipe'>> {
+  return readAs(source, 'recipe');
+}
+
+export function readChamber(source: Source): Outcome<Document<'chamber'>> {
+  return readAs(source, 'chamber');
+}
+
+export function readSubstances(source: Source): Outcome<Document<'substances'>> {
+  return readAs(source, 'substances');
+}
+
+export function readProcess(source: Source): Outcome<Document<'process'>> {
+  return readAs(source, 'process');
+}
+
+export function readSite(source: Source): Outcome<Document<'site'>> {
+  return readAs(source, 'site');
+}
+
+function readAs<S extends Sort>(source: Source, wanted: S): Outcome<Document<S>> {
+  const nodes = readNodes(source);
+  if (nodes.value === undefined) return limited(nodes.faults);
+  const sort = sortOfNodes(source, nodes.value);
+  if (typeof sort !== 'string') return failure(sort);
+  if (sort === wanted) return toDocument(source, nodes.value, wanted);
+  const place = placeOf(source, nodes.value, ['regimen']);
+  return failure({ place, found: `regimen: a ${sort} document`, right: `a ${wanted} document is needed here` });
+}
+
+function documentOf(source: Source, root: ParsedNode, sort: Sort): Outcome<AnyDocument> {
+  switch (sort) {
+    case 'recipe':
+      return toDocument(source, root, sort);
+    case 'chamber':
+      return toDocument(source, root, sort);
+    case 'substances':
+      return toDocument(source, root, sort);
+    case 'process':
+      return toDocument(source, root, sort);
+    case 'site':
+      return toDocument(source, root, sort);
+  }
+}
+
+function toDocument<S extends Sort>(source: Source, root: ParsedNode, sort: S): Outcome<Document<S>> {
+  const faults: Fault[] = [];
+  const content = plainValue(source, root, faults);
+  if (!isSound({ source, root, sort, content }, sort, content, faults)) return limited(faults);
+  return success({ sort, source, content, place: (pointer, part) => placeOf(source, root, pointer, part) });
+}

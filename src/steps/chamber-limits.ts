@@ -1,0 +1,38 @@
+import { isUnitFault, readMeasure } from '../units/read.ts';
+import type { Dimension } from '../units/dimensions.ts';
+import type { Place } from '../shelf/place.ts';
+import { dimensionOf, nearestAddress } from './addresses.ts';
+import { STATED } from './accuracies.ts';
+import { referredScale, type ChamberDraft } from './chamber.ts';
+
+/** Puts the limits of a chamber's setpoints at `chamber.limits.ADDRESS.at_least` and `.at_most`. */
+export function putLimits(draft: ChamberDraft): void {
+  for (const [address, limits] of Object.entries(draft.content.limits ?? {})) {
+    const dimension = dimensionOf(address);
+    if (dimension === undefined) {
+      draft.faults.push(unknownAddress(address, draft.document.place(['limits', address], 'key')));
+      continue;
+    }
+    for (const side of ['at_least', 'at_most'] as const) {
+      const text = limits[side];
+      if (text !== undefined) putLimit(`${address}.${side}`, text, dimension, draft.document.place(['limits', address, side]), draft);
+    }
+  }
+}
+
+function putLimit(key: string, text: string | number, dimension: Dimension, place: Place, draft: ChamberDraft): void {
+  const measure = readMeasure(text, dimension);
+  if (isUnitFault(measure)) {
+    draft.faults.push({ place, found: `limit ${measure.found}`, right: measure.right });
+    return;
+  }
+  const scale = dimension === 'flow' ? referredScale(draft.content) : STATED;
+  draft.layer.put(`chamber.limits.${key}`, { kind: 'fixed', measure, place }, scale);
+}
+
+/** The fault of an address at which no step has a setpoint. */
+export function unknownAddress(address: string, place: Place) {
+  const meant = nearestAddress(address);
+  const right = meant === undefined ? 'an address such as pressure, flows.Ar or lengths.gap' : `'${meant}'?`;
+  return { place, found: `no step has a setpoint '${address}'`, right };
+}
