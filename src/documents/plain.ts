@@ -1,5 +1,5 @@
 import { isAlias, isMap, isScalar, isSeq } from 'yaml';
-import { hasControl, oddCharacter } from './characters.ts';
+import { hasControl, isAscii, oddCharacter } from './characters.ts';
 import { numberFault } from './numbers.ts';
 import { keyText, nodePlace } from './nodes.ts';
 import { slipIn } from './flow-slips.ts';
@@ -18,25 +18,35 @@ export interface ValueMap {
 }
 
 /** The plain value of a node; what YAML allows and we do not goes into the faults. */
-export function plainValue(source: Source, node: ParsedNode | null, faults: Fault[]): Value {
-  if (node === null) return null;
-  if (isAlias(node)) return refused(source, node, `the alias *${node.source}`, faults);
-  if (node.anchor !== undefined) refused(source, node, `the anchor &${node.anchor}`, faults);
-  if (node.tag !== undefined) refused(source, node, 'a tag', faults);
-  if (isScalar(node)) return scalarValue(source, node, faults);
-  if (isMap(node)) return mapValue(source, node, faults);
-  return isSeq(node) ? node.items.map((item) => plainValue(source, item, faults)) : null;
+export function plainValue(source: Source, root: ParsedNode, faults: Fault[]): Value {
+  return nodeValue({ source, faults, ascii: isAscii(source.text) }, root);
 }
 
-function mapValue(source: Source, map: YAMLMap.Parsed, faults: Fault[]): ValueMap {
+interface Reading {
+  readonly source: Source;
+  readonly faults: Fault[];
+  readonly ascii: boolean;
+}
+
+function nodeValue(reading: Reading, node: ParsedNode | null): Value {
+  if (node === null) return null;
+  if (isAlias(node)) return refused(reading, node, `the alias *${node.source}`);
+  if (node.anchor !== undefined) refused(reading, node, `the anchor &${node.anchor}`);
+  if (node.tag !== undefined) refused(reading, node, 'a tag');
+  if (isScalar(node)) return scalarValue(reading, node);
+  if (isMap(node)) return mapValue(reading, node);
+  return isSeq(node) ? node.items.map((item) => nodeValue(reading, item)) : null;
+}
+
+function mapValue(reading: Reading, map: YAMLMap.Parsed): ValueMap {
   const value: ValueMap = emptyMap();
   let previous: YAMLMap.Parsed['items'][number] | undefined;
   for (const pair of map.items) {
     const key = keyText(pair);
-    const slip = map.flow === true && pair.value === null ? slipIn(source, previous, pair) : undefined;
-    const fault = slip ?? keyFault(source, map, pair.key, key, key in value);
-    if (fault !== undefined) faults.push(fault);
-    else value[key] = plainValue(source, pair.value, faults);
+    const slip = map.flow === true && pair.value === null ? slipIn(reading.source, previous, pair) : undefined;
+    const fault = slip ?? keyFault(reading, map, pair.key, key, key in value);
+    if (fault !== undefined) reading.faults.push(fault);
+    else value[key] = nodeValue(reading, pair.value);
     previous = pair;
   }
   return value;
@@ -47,7 +57,7 @@ function emptyMap(): ValueMap {
   return map;
 }
 
-function scalarValue(source: Source, node: Scalar.Parsed, faults: Fault[]): Value {
+function scalarValue({ source, faults }: Reading, node: Scalar.Parsed): Value {
   const { value } = node;
   const fault = typeof value === 'number' ? numberFault(node.source, value) : undefined;
   if (fault !== undefined) faults.push({ place: nodePlace(source, node), ...fault });
@@ -57,23 +67,27 @@ function scalarValue(source: Source, node: Scalar.Parsed, faults: Fault[]): Valu
   return typeof value === 'string' || typeof value === 'number' || typeof value === 'boolean' ? value : null;
 }
 
-function keyFault(source: Source, map: YAMLMap.Parsed, node: ParsedNode, key: string, known: boolean): Fault | undefined {
-  const place = nodePlace(source, node);
+function keyFault(reading: Reading, map: YAMLMap.Parsed, node: ParsedNode, key: string, known: boolean): Fault | undefined {
+  const escaped = isScalar(node) && node.type === 'QUOTE_DOUBLE';
+  if (!known && reading.ascii && !escaped && !REFUSED.has(key)) return undefined;
+  const place = nodePlace(reading.source, node);
   if (key === '__proto__') return { place, found: 'the key __proto__', right: 'choose another name' };
   if (key === '<<') return { place, found: 'a merge key (<<)', right: 'write the keys out' };
   if (key === '') return { place, found: 'a value without a key', right: 'write a key before the colon' };
-  if (known) return { place, found: `a second ${quoted(key)}${firstOf(source, map, key)}`, right: 'keep one of both' };
+  if (known) return { place, found: `a second ${quoted(key)}${firstOf(reading.source, map, key)}`, right: 'keep one of both' };
   if (hasControl(key)) return { place, found: 'a key with a control character', right: 'write a plain name' };
   const odd = oddCharacter(key);
   return odd === undefined ? undefined : { place, found: `${odd} in the key ${quoted(key)}`, right: 'write a plain character' };
 }
+
+const REFUSED: ReadonlySet<string> = new Set(['__proto__', '<<', '']);
 
 function firstOf(source: Source, map: YAMLMap.Parsed, key: string): string {
   const first = map.items.find((pair) => keyText(pair) === key);
   return first === undefined ? '' : `, the first is in line ${nodePlace(source, first.key).line}`;
 }
 
-function refused(source: Source, node: ParsedNode, found: string, faults: Fault[]): null {
+function refused({ source, faults }: Reading, node: ParsedNode, found: string): null {
   const right = 'write the value itself, in quotes where it is text';
   faults.push({ place: nodePlace(source, node), found, right });
   return null;

@@ -137,13 +137,17 @@ interface Kept {
 
 /** The nodes from which a physical value can be reached, numbered anew. */
 function pruned(nodes: readonly PlanNode[], roots: readonly number[]): Kept {
-  const useful = new Set(nodes.keys().filter((index) => nodes[index]?.measure !== undefined));
+  const useful = new Set(nodes.flatMap((node, index) => (node.measure === undefined ? [] : [index])));
   for (let size = -1; size !== useful.size; ) {
     size = useful.size;
     nodes.forEach((node, index) => {
       if (successors(node).some((next) => useful.has(next))) useful.add(index);
     });
   }
+  // Beside `rest`, a key of its own without any value to read has to be told from the others.
+  nodes.forEach(({ keys = {}, rest }, index) => {
+    if (useful.has(index) && rest !== undefined && useful.has(rest)) Object.values(keys).forEach((key) => useful.add(key));
+  });
   for (const root of roots) useful.add(root);
   const indices = new Map([...useful].sort((a, b) => a - b).map((old, index) => [old, index]));
   return { nodes: [...indices.keys()].map((old) => renumbered(nodes[old] ?? {}, indices)), indices };

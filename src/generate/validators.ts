@@ -1,10 +1,13 @@
 import { build } from 'esbuild';
 import { Ajv2020 } from 'ajv/dist/2020.js';
-import standaloneCode from 'ajv/dist/standalone/index.js';
-import { SORTS } from './schemas.ts';
-import type { JsonMap } from './schemas.ts';
+import standalone from 'ajv/dist/standalone/index.js';
+import { isMap, SORTS } from './schemas.ts';
+import type { Json, JsonMap } from './schemas.ts';
 
-/** One module with a validator for each sort of document, without a `require` left in it. */
+/**
+ * One module with a validator for each sort of document, without a `require` left in it. What the measure pass reads and
+ * checks by itself, single physical values and their spans, is left to it: the validators are half as large so.
+ */
 export async function validatorsModule(schemas: ReadonlyMap<string, JsonMap>): Promise<string> {
   const ajv = new Ajv2020({
     strict: true,
@@ -12,23 +15,24 @@ export async function validatorsModule(schemas: ReadonlyMap<string, JsonMap>): P
     ownProperties: true,
     allErrors: true,
     messages: false,
-    code: { source: true, esm: true, lines: true },
+    code: { source: true, esm: true },
   });
-  ajv.addVocabulary(['dimension', 'forms', 'tsType']);
-  for (const schema of schemas.values()) ajv.addSchema(schema);
-  const ids = Object.fromEntries(SORTS.map((sort) => [sort, `https://regimen.invalid/schemas/${sort}.json`]));
-  const code = await bundled(standaloneCode.default(ajv, ids));
-  if (process.env.DBG) console.error([...code.matchAll(/.{80}\brequire\s*\(.{80}/gs)].map(String));
-  return `${MADE}${code}`;
+  // No schema uses the keywords for which the code of every function would keep account.
+  ajv.opts.unevaluated = false;
+  ajv.opts.dynamicRef = false;
+  for (const schema of schemas.values()) ajv.addSchema(structural(schema));
+  const ids = Object.fromEntries(SORTS.map((sort) => [sort, String(schemas.get(`${sort}.json`)?.['$id'])]));
+  const code = await bundled(standalone.default(ajv, ids));
+  if (code.replaceAll(/'[^'\n]*'|"[^"\n]*"/g, '').match(/\brequire\b/) !== null) throw new Error('a require is left');
+  return `${HEAD}${code}`;
 }
 
 /** The types of that module. */
 export function validatorsTypes(): string {
-  const names = SORTS.map((sort) => `export const ${sort}: Validator;\n`).join('');
-  return `${MADE}${DECLARATIONS}${names}`;
+  return `${HEAD}${DECLARATIONS}${SORTS.map((sort) => `export const ${sort}: Validator;\n`).join('')}`;
 }
 
-const MADE = '// Made by `npm run generate` from schemas/. Do not edit.\n';
+const HEAD = '// Made by `npm run generate` from schemas/. Do not edit.\n';
 
 const DECLARATIONS = `
 export interface SchemaError {
@@ -47,17 +51,43 @@ export interface Validator {
 
 `;
 
+/** The schema of the structure alone: without remarks, and with anything in the place of a single physical value. */
+function structural(schema: JsonMap): Record<string, Json> {
+  const kept = Object.entries(schema).filter(([key, value]) => !isRemark(key, value));
+  return Object.fromEntries(kept.map(([key, value]) => [key, stripped(value)]));
+}
+
+function stripped(node: Json): Json {
+  if (Array.isArray(node)) return node.map(stripped);
+  if (!isMap(node)) return node;
+  return isSingleValue(node) ? {} : structural(node);
+}
+
+/** Keys of these names that hold a schema, and not a text or a list, are properties. */
+function isRemark(key: string, value: Json): boolean {
+  return REMARKS.has(key) && !isMap(value);
+}
+
+const REMARKS: ReadonlySet<string> = new Set(['title', 'description', 'examples', 'tsType', 'forms', 'dimension']);
+
+/** Whether a schema is one of a physical value that is written as one text, or as a ramp or a range of such. */
+export function isSingleValue(node: JsonMap): boolean {
+  const { dimension, then } = node;
+  if (dimension === undefined || isMap(dimension) || 'else' in node) return false;
+  const reference = isMap(then) ? then['$ref'] : undefined;
+  return then === undefined || (typeof reference === 'string' && /\/(span|ramp|range)$/.test(reference));
+}
+
 async function bundled(code: string): Promise<string> {
   const { outputFiles } = await build({
-    stdin: { contents: code, resolveDir: process.cwd() },
+    stdin: { contents: code, resolveDir: import.meta.dirname },
     bundle: true,
     write: false,
     format: 'esm',
     platform: 'neutral',
     target: 'node20',
-    minifySyntax: true,
-    minifyWhitespace: true,
+    minify: true,
     legalComments: 'none',
   });
-  return outputFiles[0]?.text ?? '';
+  return outputFiles.map(({ text }) => text).join('');
 }

@@ -22,6 +22,8 @@ export const COLLISION_INTEGRAL_RANGE = { from: 0.3, to: 100 } as const;
 export function omega11(reducedTemperature: number, polarity = 0): number {
   const t = reducedTemperature;
   if (!(t > 0)) return NaN;
+  // Beyond 80 the exponentials are below the last digit; fast atoms come here often.
+  if (t > 80) return 1.06036 * t ** -0.1561 + (0.19 * polarity) / t;
   return (
     1.06036 * t ** -0.1561 +
     0.193 * Math.exp(-0.47635 * t) +

@@ -103,10 +103,11 @@ export function fastCrossSection(
   const hard = Math.PI * diameter ** 2 * omega11(relativeEnergy / (3 * BOLTZMANN * wellDepth));
   if (!(relativeEnergy > SOFT_ABOVE)) return hard;
   const weight = Math.min(1, Math.log10(relativeEnergy / SOFT_ABOVE)) / 2;
-  const x = logReducedEnergy(relativeEnergy, atomicNumber, gasAtomicNumber, gasAtoms);
-  const logUniversal = ((-6.57e-4 * x - 0.035746) * x - 0.86843) * x + 0.19473;
-  const universal = Math.PI * screeningLength(atomicNumber, gasAtomicNumber) ** 2 * Math.exp(logUniversal);
-  return hard ** (1 - weight) * universal ** weight;
+  const screening = screeningLength(atomicNumber, gasAtomicNumber);
+  const x = Math.log((screening * relativeEnergy) / (gasAtoms * atomicNumber * gasAtomicNumber * COULOMB));
+  const logShape = ((-6.57e-4 * x - 0.035746) * x - 0.86843) * x + 0.19473;
+  // hard^(1-w) (π a² e^shape)^w
+  return hard * Math.exp(weight * (logShape + Math.log((Math.PI * screening * screening) / hard)));
 }
 
 /**
@@ -132,8 +133,8 @@ export function logReducedEnergy(
   gasAtomicNumber: number,
   gasAtoms: number,
 ): number {
-  const coulomb = gasAtoms * atomicNumber * gasAtomicNumber * COULOMB;
-  return Math.log((screeningLength(atomicNumber, gasAtomicNumber) * relativeEnergy) / coulomb);
+  const screening = screeningLength(atomicNumber, gasAtomicNumber);
+  return Math.log((screening * relativeEnergy) / (gasAtoms * atomicNumber * gasAtomicNumber * COULOMB));
 }
 
 /** e²/(4π ε0) [J m]: 14.400 eV Å. */
@@ -141,5 +142,12 @@ const COULOMB = 14.4e-10 * ELEMENTARY_CHARGE;
 
 /** a: screening length of the universal potential [m]. */
 function screeningLength(atomicNumber: number, gasAtomicNumber: number): number {
-  return 0.46854e-10 / (atomicNumber ** 0.23 + gasAtomicNumber ** 0.23);
+  return 0.46854e-10 / (screeningPower(atomicNumber) + screeningPower(gasAtomicNumber));
 }
+
+/** Z^0.23, looked up for the elements: it is needed again and again on the way of an atom that slows down. */
+function screeningPower(atomicNumber: number): number {
+  return POWERS[atomicNumber] ?? atomicNumber ** 0.23;
+}
+
+const POWERS: readonly number[] = Array.from({ length: 119 }, (_, atomicNumber) => atomicNumber ** 0.23);

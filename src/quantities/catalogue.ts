@@ -8,7 +8,10 @@ import * as regime from './regime.ts';
 import * as residual from './residual.ts';
 import * as surfaces from './surfaces.ts';
 import * as transport from './transport.ts';
+import { dimensionOf } from '../steps/addresses.ts';
+import type { Dimension } from '../units/dimensions.ts';
 import type { Quantity } from './quantity.ts';
+import type { Reference } from './reference.ts';
 
 /** The topics of the catalogue, in the order in which lists print them. */
 const TOPICS = { gas, collisions, transport, lengths, flow, regime, surfaces, residual, emittedAtoms, equipment };
@@ -27,6 +30,13 @@ export function quantityNamed(id: string): Quantity | undefined {
 /** Every entry of the catalogue, by topic. */
 export function allQuantities(): readonly Quantity[] {
   return [...BY_ID.values()];
+}
+
+/** Dimension of a number: its entry's, or that of the setpoint which it names; a number over another has none. */
+export function dimensionOfNumber({ id, of = '' }: Reference, over?: Reference): Dimension {
+  if (over !== undefined) return 'number';
+  if (id === 'setpoint') return dimensionOf(of) ?? 'number';
+  return quantityNamed(id)?.dimension ?? 'number';
 }
 
 function isQuantity(exported: unknown): exported is Quantity {

@@ -13,7 +13,6 @@ export const setpoint = quantity<[]>({
   dimension: 'number',
   statement: 'A setpoint itself, as in setpoint:pressure.',
   source: 'the recipe',
-  nominal: true,
   subjects: (scope) => scope.addresses('').filter((address) => !address.startsWith('chamber.')),
   from: ({ of = '' }, scope) => (scope.has(of) || scope.isUnknown(of) ? of : inapplicable(`the step sets no ${of}`)),
   value: () => NaN,

@@ -138,7 +138,7 @@ function isBlocking(kind: Kind): kind is Blocking {
 }
 
 function sum<K extends string>(a: Readonly<Record<K, number>>, b: Readonly<Record<K, number>>): Record<K, number> {
-  const total = { ...a };
+  const total: Record<K, number> = { ...a };
   for (const key in b) total[key] += b[key];
   return total;
 }

@@ -1,19 +1,22 @@
 import { quantityNamed } from '../quantities/catalogue.ts';
 import type { Node } from '../quantities/plan.ts';
-import type { Derivation, StepRun } from '../quantities/run.ts';
+import type { Line, StepRun } from '../quantities/run.ts';
+import type { Given } from '../steps/given.ts';
 import { casesOf } from '../verdicts/cases.ts';
 import type { Assumed, Verdict } from '../verdicts/verdict.ts';
 import { bandOf, print, printGiven, type Shown } from './shown.ts';
-import { filled } from './sentences.ts';
-import { numberWords } from './words.ts';
+import { nodeDimension, nodeName, nodeReference } from './nodes.ts';
 
 /** What a verdict's number was worked out from, one level down: "From emitted free path 300 mm, throw 270 mm." */
 export function groundsSentence(verdict: Verdict, run: StepRun, shown: Shown): string | undefined {
   const at = runOf(verdict, run);
   if (at === undefined) return undefined;
-  const inputs = plainInputs(at.derive(judgedReference(verdict, run), verdict.over)).filter(isTelling);
+  const lines = new Map(at.derive(judgedReference(verdict, run), verdict.over).map((line) => [line.node, line]));
+  const [target] = lines.keys();
+  if (target === undefined) return undefined;
+  const inputs = plainInputs(lines, target).flatMap((node) => lines.get(node) ?? []).filter(isTelling);
   if (inputs.length === 0 || inputs.length > MOST_INPUTS) return undefined;
-  return `From ${inputs.map((input) => inputWords(input, at, shown)).join(', ')}.`;
+  return `From ${inputs.map((input) => inputWords(input, lines, at, shown)).join(', ')}.`;
 }
 
 /** Defaults that a reader must know of: those that carry a notable share of the uncertainty, and whatever stands in for a setpoint. */
@@ -58,42 +61,31 @@ function subjectNamed(subject: string, subjects: readonly string[]): string {
 }
 
 /** Inputs of the law that gives a number, behind names that merely stand for another number. */
-function plainInputs(derivation: Derivation): readonly Derivation[] {
-  const { node, inputs, reading } = derivation;
-  if (node.kind === 'same') return inputs.flatMap(plainInputs);
-  if (node.kind !== 'choice') return inputs;
-  const chosen = reading.kind === 'known' ? node.subjects.indexOf(reading.of ?? '') : -1;
-  return inputs.filter((_, index) => index === chosen).flatMap(plainInputs);
+function plainInputs(lines: ReadonlyMap<Node, Line>, node: Node): readonly Node[] {
+  if (node.kind === 'same') return node.inputs.flatMap((input) => plainInputs(lines, input));
+  if (node.kind !== 'choice') return node.inputs;
+  const reading = lines.get(node)?.reading;
+  const chosen = reading?.kind === 'known' ? node.subjects.indexOf(reading.of ?? '') : -1;
+  return node.inputs.filter((_, index) => index === chosen).flatMap((input) => plainInputs(lines, input));
 }
 
 /** Data and counts tell a reader of a verdict nothing. */
-function isTelling({ node, reading }: Derivation): boolean {
-  if (reading.kind !== 'known' || node.kind === 'constant') return false;
-  return !DATA.test(node.name);
+function isTelling({ node, reading }: Line): boolean {
+  return reading.kind === 'known' && node.kind !== 'constant' && !DATA.test(node.name);
 }
 
 const DATA = /^(?:gases|atoms|films|accuracy|assumed)\./;
 
-function inputWords(input: Derivation, run: StepRun, shown: Shown): string {
-  const { node, reading } = input;
+function inputWords({ node, reading }: Line, lines: ReadonlyMap<Node, Line>, run: StepRun, shown: Shown): string {
   const value = reading.kind === 'known' ? reading.value : NaN;
-  const given = givenBehind(input);
-  const text = given === undefined ? print(shown, value, dimensionOf(node)) : printGiven(shown, given, value);
-  const regime = node.kind === 'given' || node.kind === 'constant' ? undefined : bandOf(shown, node.reference?.id ?? '', value);
-  return `${nameOf(node, run)} ${text}${regime === undefined ? '' : ` (${regime})`}`;
+  const given = givenBehind(lines, node);
+  const text = given === undefined ? print(shown, value, nodeDimension(node)) : printGiven(shown, given, value);
+  const regime = bandOf(shown, nodeReference(node)?.id ?? '', value);
+  return `${nodeName(node, run)} ${text}${regime === undefined ? '' : ` (${regime})`}`;
 }
 
 /** The given that a number simply is. */
-function givenBehind({ node, given, inputs }: Derivation): Derivation['given'] {
-  const [only] = inputs;
-  return node.kind === 'same' && only !== undefined ? givenBehind(only) : given;
-}
-
-function dimensionOf(node: Node): Parameters<typeof print>[2] {
-  return node.kind === 'given' || node.kind === 'constant' ? 'number' : (node.quantity?.dimension ?? 'number');
-}
-
-function nameOf(node: Node, run: StepRun): string {
-  if (node.kind === 'given' || node.kind === 'constant' || node.reference === undefined) return node.name;
-  return numberWords(node.reference, filled(node.reference, run));
+function givenBehind(lines: ReadonlyMap<Node, Line>, node: Node): Given | undefined {
+  const [only] = node.inputs;
+  return node.kind === 'same' && only !== undefined ? givenBehind(lines, only) : lines.get(node)?.given;
 }

@@ -19,7 +19,7 @@ export interface Shown {
   readonly coverage: number;
   readonly bands: BandConvention;
   readonly asked: AskedUnits;
-  readonly ofSite: Readonly<Partial<Record<Dimension, string>>>;
+  readonly ofSite: ReadonlyMap<Dimension, string>;
   readonly ofRecipe: ReadonlyMap<Dimension, string>;
   readonly reference: FlowReference | undefined;
 }
@@ -66,7 +66,7 @@ export function printGiven(shown: Shown, given: Given, value = given.value, with
 export function unitFor({ asked, ofSite, ofRecipe }: Shown, value: number, dimension: Dimension): string {
   const wanted = asked.get(dimension);
   if (wanted !== undefined) return wanted;
-  const usual = ofSite[dimension] ?? ofRecipe.get(dimension);
+  const usual = ofSite.get(dimension) ?? ofRecipe.get(dimension);
   return usual !== undefined && isHandy(value, usual, dimension) ? usual : displayUnit(value, dimension);
 }
 

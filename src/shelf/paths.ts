@@ -35,8 +35,7 @@ export function relative(folder: string, path: string): string {
   const to = normalise(path);
   if (from === to) return '.';
   if (isAbsolute(from) !== isAbsolute(to)) return to;
-  const start = from === '.' ? '' : from.endsWith('/') ? from : `${from}/`;
-  return to.startsWith(start) && !to.startsWith('..', start.length) ? to.slice(start.length) : acrossFolders(from, to);
+  return startsIn(from, to) ? to.slice(startOf(from).length) : acrossFolders(from, to);
 }
 
 export function isAbsolute(path: string): boolean {
@@ -48,10 +47,11 @@ export function anchored(shelf: Shelf, path: string): string {
   return isAbsolute(path) ? normalise(path) : join(shelf.real('.') ?? '.', path);
 }
 
-/** Whether the path lies in the folder or is the folder, by the names alone. */
+/** Whether the path lies in the folder or is the folder, as far as names alone can tell. */
 export function isBelow(folder: string, path: string): boolean {
-  const way = relative(folder, path);
-  return way !== '..' && !way.startsWith('../') && !isAbsolute(way);
+  const from = normalise(folder);
+  const to = normalise(path);
+  return from === to || (startsIn(from, to) && !(from === '.' && isAbsolute(to)));
 }
 
 /**
@@ -62,6 +62,16 @@ export function inside(shelf: Shelf, folder: string, path: string): boolean {
   const place = shelf.real(path);
   if (place === undefined) return isBelow(anchored(shelf, folder), anchored(shelf, path));
   return isBelow(shelf.real(folder) ?? anchored(shelf, folder), place);
+}
+
+/** What every normal path below the folder starts with. */
+function startOf(folder: string): string {
+  return folder === '.' ? '' : folder.endsWith('/') ? folder : `${folder}/`;
+}
+
+function startsIn(folder: string, path: string): boolean {
+  const start = startOf(folder);
+  return path.startsWith(start) && path !== `${start}..` && !path.startsWith('../', start.length);
 }
 
 function acrossFolders(from: string, to: string): string {

@@ -16,7 +16,7 @@ export interface Bounds {
   readonly only?: readonly Pattern[];
   /**
    * Asked for each folder below that has a site document of its own: the bounds to keep to in there, or undefined not to
-   * enter. Without it such folders are walked like any other.
+   * enter. Without it such folders are walked like any other. Folders further down keep to what the answer says.
    */
   readonly nested?: (siteFile: string) => Bounds | undefined;
 }
@@ -27,7 +27,10 @@ export interface Bounds {
  * and links to folders are not entered.
  */
 export function* walk(shelf: Shelf, folder: string, bounds: Bounds): Generator<Outcome<string>, void, undefined> {
-  if (!inside(shelf, bounds.site, folder)) return yield failure(leavesFault(folder));
+  if (!inside(shelf, bounds.site, folder)) {
+    yield failure(leavesFault(folder));
+    return;
+  }
   const start = spotOf(shelf, normalise(folder), bounds, 0);
   const waiting = isPassedOver(start) ? [] : [start];
   for (let spot = waiting.pop(); spot !== undefined; spot = waiting.pop()) {
@@ -78,8 +81,8 @@ function enter(shelf: Shelf, folder: Spot, waiting: Spot[]): Fault | undefined {
   const spot = inNestedSite(shelf, folder, entries);
   if (spot === undefined) return undefined;
   for (const entry of inPathOrder(entries).reverse()) {
-    const below = spotBelow(spot, entry);
-    if (isWanted(below, entry.name)) waiting.push(below);
+    const next = spotBelow(spot, entry);
+    if (isWanted(next, entry.name)) waiting.push(next);
   }
   return undefined;
 }

@@ -18,6 +18,7 @@ export interface ProcessSpec {
   readonly remark?: string;
   readonly revision?: string;
   readonly basedOn?: string;
+  readonly basedOnPlace?: Place;
   readonly assumptions: readonly AssumptionSpec[];
   /** Names of numbers that are printed beside, never judged. */
   readonly shows: readonly string[];
@@ -84,7 +85,7 @@ export function processFrom(document: ProcessDocument): Outcome<ProcessSpec> {
     title: content.title,
     ...(content.remark === undefined ? {} : { remark: content.remark }),
     ...(content.revision === undefined ? {} : { revision: content.revision }),
-    ...(content.based_on === undefined ? {} : { basedOn: content.based_on }),
+    ...(content.based_on === undefined ? {} : { basedOn: content.based_on, basedOnPlace: document.place(['based_on']) }),
     assumptions,
     shows: content.shows ?? [],
     usual: usualRanges(document, faults),

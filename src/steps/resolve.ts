@@ -7,7 +7,9 @@ import type { ChamberFacts } from './chamber.ts';
 import { putDefaults } from './defaults.ts';
 import type { Given } from './given.ts';
 import { Layer } from './layer.ts';
+import { unknownName } from './names.ts';
 import { overlay, placeIn, type Ground } from './overlay.ts';
+import type { ProcessSpec } from './process.ts';
 import { ResolvedStep } from './resolved-step.ts';
 import { setupOf } from './setup.ts';
 import type { Site } from './site.ts';
@@ -85,22 +87,29 @@ function resolveStep(step: StepBlock, pointer: Pointer, level: Level, walk: Walk
   overlay(layer, step, pointer, ground);
   settleAmounts(layer, ground.faults);
   checkFill(layer, ground.faults);
-  const process = site.process(step.process, () => placeIn(ground, pointer, ['process']));
-  ground.faults.push(...process.faults);
   const setup = setupOf(layer, ground.chamber);
-  putDefaults(layer, setup, process.value);
+  putDefaults(layer, setup, processOf(step, pointer, walk));
   const own = waiversAt(step.waivers, pointer, ground);
   const above = own.length === 0 ? level.waivers : [...level.waivers, ...own];
+  const waivers = waiversOf(step.process, above, (process) => waivableNames(site, process));
+  const path = `${level.path}${step.name}`;
   const number = walk.steps.length + 1;
-  const resolved = new ResolvedStep({ step, path: `${level.path}${step.name}`, number, pointer, document: ground.document, layer, setup });
-  resolved.waivers = waiversOf(resolved, above, (one) => waivableNames(site, one));
+  const resolved = new ResolvedStep({ step, path, number, pointer, document: ground.document, layer, setup, waivers });
   walk.steps.push(resolved);
   hangWaivers(own, [resolved], walk);
   return layer.givens.get('time')?.value;
 }
 
+function processOf({ process }: StepBlock, pointer: Pointer, { site, ground }: Walk): ProcessSpec | undefined {
+  const spec = site.process(process);
+  if (spec !== undefined) return spec;
+  const place = placeIn(ground, pointer, ['process']);
+  ground.faults.push(unknownName(place, 'process', process, site.processNames(), 'the name of a process; `list processes` tells them'));
+  return undefined;
+}
+
 function hangWaivers(waivers: readonly Waiver[], steps: readonly Step[], { site, ground }: Walk): void {
-  if (waivers.length > 0) ground.faults.push(...unmetWaivers(waivers, steps, (step) => waivableNames(site, step)));
+  if (waivers.length > 0) ground.faults.push(...unmetWaivers(waivers, steps, (process) => waivableNames(site, process)));
 }
 
 function repeatOf({ repeat }: CycleBlock, pointer: Pointer, ground: Ground): Given | undefined {
@@ -132,11 +141,12 @@ function checkFill({ givens, parts }: Layer, faults: Fault[]): void {
   faults.push({ place: fill.origin.place, found: 'fill_to with the throttle not closed', right: 'throttle: closed beside it' });
 }
 
-function recipeFrom({ content, source }: RecipeDocument, chamber: ChamberFacts, walk: Walk, duration: number | undefined): Recipe {
+function recipeFrom({ content, source, place }: RecipeDocument, chamber: ChamberFacts, walk: Walk, duration: number | undefined): Recipe {
   const { title, revision, qualified_on } = content;
   return {
     file: source.file,
     name: content.name,
+    place: place(['name']),
     ...(title === undefined ? {} : { title }),
     ...(revision === undefined ? {} : { revision }),
     ...(qualified_on === undefined ? {} : { qualifiedOn: qualified_on }),

@@ -13,6 +13,7 @@ interface Parts {
   readonly document: RecipeDocument;
   readonly layer: Layer;
   readonly setup: Setup;
+  readonly waivers: readonly Waiver[];
 }
 
 /** A step that looks its places up only when they are asked for. */
@@ -27,11 +28,11 @@ export class ResolvedStep implements Step {
   readonly unknown: ReadonlySet<string>;
   readonly none: ReadonlySet<string>;
   readonly setup: Setup;
-  waivers: readonly Waiver[] = [];
+  readonly waivers: readonly Waiver[];
   readonly #document: RecipeDocument;
   readonly #pointer: Pointer;
 
-  constructor({ step, path, number, pointer, document, layer, setup }: Parts) {
+  constructor({ step, path, number, pointer, document, layer, setup, waivers }: Parts) {
     this.path = path;
     this.name = step.name;
     this.number = number;
@@ -42,6 +43,7 @@ export class ResolvedStep implements Step {
     this.unknown = layer.unknown;
     this.none = layer.none;
     this.setup = setup;
+    this.waivers = waivers;
     this.#document = document;
     this.#pointer = pointer;
   }

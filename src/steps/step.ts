@@ -46,6 +46,12 @@ export interface Setup {
   /** Film that grows or is etched. */
   readonly surface?: { readonly film: string; readonly mode: 'grows' | 'etches'; readonly product?: string };
   readonly reactant?: string;
+  /** What the ions are, where the step says so. */
+  readonly ion?: string;
+  /** Gas behind the wafer. */
+  readonly backside?: string;
+  /** Material of the chamber's walls. */
+  readonly walls?: string;
   readonly wafer: 'none' | 'disc' | 'panel' | 'unknown';
   readonly feature?: 'hole' | 'trench';
   /** Inlets of the chamber that have holes. */
@@ -88,6 +94,8 @@ export interface Cycle {
 export interface Recipe {
   readonly file: string;
   readonly name: string;
+  /** Of its name. */
+  readonly place: Place;
   readonly title?: string;
   readonly revision?: string;
   readonly qualifiedOn?: string;

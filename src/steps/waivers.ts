@@ -25,13 +25,13 @@ export function waiversAt(waivers: Waivers | undefined, pointer: Pointer, ground
   });
 }
 
-/** The names under which a step's findings can be waived: an assumption's, alone or behind its process and a slash. */
-export type Waivable = (step: Step) => readonly string[];
+/** The names under which findings of a step of a process can be waived. */
+export type Waivable = (process: string) => readonly string[];
 
 /** Those of the waivers above a step that name an assumption of it. */
-export function waiversOf(step: Step, above: readonly Waiver[], waivable: Waivable): readonly Waiver[] {
+export function waiversOf(process: string, above: readonly Waiver[], waivable: Waivable): readonly Waiver[] {
   if (above.length === 0) return NO_WAIVERS;
-  const names = waivable(step);
+  const names = waivable(process);
   return above.filter(({ assumption }) => names.includes(assumption));
 }
 
@@ -39,7 +39,7 @@ export function waiversOf(step: Step, above: readonly Waiver[], waivable: Waivab
 export function unmetWaivers(waivers: readonly Waiver[], steps: readonly Step[], waivable: Waivable): readonly Fault[] {
   const unmet = waivers.filter((waiver) => !steps.some((step) => step.waivers.includes(waiver)));
   if (unmet.length === 0) return [];
-  const names = [...new Set(steps.flatMap(waivable))];
+  const names = [...new Set(steps.flatMap(({ process }) => waivable(process)))];
   return unmet.map(({ place, assumption }) => unknownName(place, 'assumption', assumption, names, 'the name of an assumption of the step'));
 }
 

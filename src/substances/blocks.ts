@@ -1,15 +1,12 @@
-import type { Atom, Film, Gas, Ion, Wall } from '../documents/generated/types.ts';
+import type { Substances as Content } from '../documents/generated/types.ts';
 import type { Place } from '../shelf/place.ts';
 
 /** Sorts of substances, each a map by name in a substances document. */
-export interface BlocksBySort {
-  readonly gases: Gas;
-  readonly atoms: Atom;
-  readonly films: Film;
-  readonly ions: Ion;
-  readonly walls: Wall;
-}
-export type Sort = keyof BlocksBySort;
+export const SORTS = ['gases', 'atoms', 'films', 'ions', 'walls'] as const;
+export type Sort = (typeof SORTS)[number];
+
+/** What a document says of one substance of each sort. */
+export type BlocksBySort = { readonly [S in Sort]: NonNullable<Content[S]>[string] };
 
 /** A substance as a document describes it. */
 export interface Block<T> {
@@ -18,7 +15,7 @@ export interface Block<T> {
   readonly place: Place;
 }
 
-/** One place to look substances up: a document of the site, or what is built in. */
+/** One place to look substances up: the documents of a site, or what is built in. */
 export interface Substances {
   find<S extends Sort>(sort: S, name: string): Block<BlocksBySort[S]> | undefined;
   names(sort: Sort): readonly string[];

@@ -1,6 +1,6 @@
 import { atomFrom, filmFrom, type Atom, type Film } from './atom.ts';
 import { accuracyDatum } from './accuracy.ts';
-import type { Block, BlocksBySort, Sort, Substances } from './blocks.ts';
+import { SORTS, type Block, type BlocksBySort, type Sort, type Substances } from './blocks.ts';
 import { datumOf, type Datum } from './datum.ts';
 import { CRITICAL_POINT_RULE, estimatedPair } from './estimate.ts';
 import { gasFrom, type Gas } from './gas.ts';
@@ -71,10 +71,8 @@ function estimatedAt(address: string, keys: readonly string[], block: Block<Bloc
   return keys[1] === 'well_depth' ? { ...shared, value: wellDepth, dimension: 'temperature', unit: 'K' } : undefined;
 }
 
-const SORTS: ReadonlySet<string> = new Set<Sort>(['gases', 'atoms', 'films', 'ions', 'walls']);
-
 function isSort(text: string): text is Sort {
-  return SORTS.has(text);
+  return SORTS.some((sort) => sort === text);
 }
 
 /** Keeps every answer, also that there is none. */

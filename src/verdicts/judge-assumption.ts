@@ -45,7 +45,7 @@ function judgeOne(assumption: Assumption, subject: string | undefined, { run, in
     const absence = assumption.whenGiven ? { kind: 'notApplicable' as const, because } : { kind: 'open' as const, needs: reading.needs };
     return { ...absentVerdict(assumption, absence), ...about };
   }
-  const uncertainty = coverage * run.uncertainty(reference, assumption.over);
+  const uncertainty = assumption.nominal ? 0 : coverage * run.uncertainty(reference, assumption.over);
   const standing = hold(reading.value, uncertainty, assumption.bound);
   return {
     ...basics(assumption),
@@ -62,7 +62,7 @@ const NOTHING_TO_SAY = { remarks: [], assumed: [] };
 /** What a verdict that does not pass rests on; a review that mostly rests on assumed values has the grade note. */
 function grounds(
   reference: Reference,
-  { over }: Assumption,
+  { over, reviewLevel }: Assumption,
   run: StepRun,
   { kind, level }: Standing,
 ): Pick<Verdict, 'remarks' | 'assumed' | 'level'> {
@@ -71,7 +71,7 @@ function grounds(
   return {
     remarks: run.remarks(reference, over),
     assumed: assumed.map(({ given, share }) => told(given, share)),
-    level: kind === 'review' && restsOnAssumed ? 'note' : level,
+    level: kind === 'review' && restsOnAssumed ? (reviewLevel ?? 'note') : level,
   };
 }
 

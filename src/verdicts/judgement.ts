@@ -1,4 +1,5 @@
 import type { Run, StepRun } from '../quantities/run.ts';
+import type { Fault } from '../shelf/fault.ts';
 import type { Caution, Note, Verdict } from './verdict.ts';
 
 /** All that was found of one recipe. */
@@ -7,6 +8,8 @@ export interface Judgement {
   readonly steps: readonly JudgedStep[];
   readonly cautions: readonly Caution[];
   readonly notes: readonly Note[];
+  /** What only judging could find wrong: a waiver that holds to a value in a wrong unit. */
+  readonly faults: readonly Fault[];
 }
 
 export interface JudgedStep {

@@ -18,13 +18,19 @@ interface Block {
   readonly molar_mass: string;
   readonly collision?: { readonly diameter: string; readonly well_depth: string; readonly form: string };
   readonly dipole?: { readonly is: string };
+  readonly accuracy?: { readonly viscosity: string; readonly diffusion: string };
 }
 
 const TEXT = readFileSync(new URL('../../src/built-in/gases.yaml', import.meta.url), 'utf8');
-const BLOCKS: Readonly<Record<string, Block>> = parse(TEXT).gases;
+const BLOCKS = blocksIn(parse(TEXT));
+
+function blocksIn(document: unknown): ReadonlyMap<string, Block> {
+  if (typeof document !== 'object' || document === null || !('gases' in document)) throw new Error('no gases');
+  return new Map(Object.entries(document.gases ?? {}));
+}
 
 export function gasNamed(name: string): Gas {
-  const block = BLOCKS[name];
+  const block = BLOCKS.get(name);
   if (block?.collision === undefined) throw new Error(`the built-in data have no collision values of ${name}`);
   const { diameter, well_depth: wellDepth, form } = block.collision;
   return {
@@ -37,6 +43,13 @@ export function gasNamed(name: string): Gas {
       polar: form === 'stockmayer',
     },
   };
+}
+
+/** Relative standard uncertainty that the built-in data state for a property of a gas. */
+export function statedAccuracy(name: string, property: 'viscosity' | 'diffusion'): number {
+  const stated = BLOCKS.get(name)?.accuracy?.[property];
+  if (stated === undefined) throw new Error(`the built-in data state no accuracy of ${name}`);
+  return si(stated);
 }
 
 function pairOf(a: Gas, b: Gas): PairPotential {

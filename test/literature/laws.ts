@@ -11,8 +11,22 @@ import {
 import { omega11 } from '../../src/physics/collision-integrals.ts';
 import { chokedConductancePerArea, criticalPressureRatio } from '../../src/physics/conductance.ts';
 import { BOLTZMANN } from '../../src/physics/constants.ts';
-import { bulkVelocity, flowRate, leakRate, peclet, pumpingSpeed, rayleigh, residenceTime, reynolds } from '../../src/physics/flow.ts';
-import { fullScaleError, gasCorrectionFactor, transpiration, transpirationLimit } from '../../src/physics/instruments.ts';
+import {
+  bulkVelocity,
+  flowRate,
+  leakRate,
+  peclet,
+  pumpingSpeed,
+  rayleigh,
+  residenceTime,
+  reynolds,
+} from '../../src/physics/flow.ts';
+import {
+  fullScaleError,
+  gasCorrectionFactor,
+  transpiration,
+  transpirationLimit,
+} from '../../src/physics/instruments.ts';
 import { combine } from '../../src/physics/pair.ts';
 import { band, knudsen } from '../../src/physics/regime.ts';
 import { impurityRatio, pumpDown } from '../../src/physics/residual.ts';
@@ -55,10 +69,19 @@ export const LAWS: Readonly<Record<string, Law>> = {
   'a-39': carriedPath,
   'a-41': (given) => impingement(given.number('p'), given.number('M'), given.number('T')),
   'a-43': (given) =>
-    monolayerTime(given.number('Ns'), given.number('s'), impingement(given.number('p'), given.number('M'), given.number('T'))),
+    monolayerTime(
+      given.number('Ns'),
+      given.number('s'),
+      impingement(given.number('p'), given.number('M'), given.number('T')),
+    ),
   'a-45': (given) => exposure(given.number('p'), given.number('t')),
   'a-47': (given) =>
-    meanFreePath(given.number('M1'), [density(given)], [(given.number('d1') + given.number('d2')) / 2], [given.number('M2')]),
+    meanFreePath(
+      given.number('M1'),
+      [density(given)],
+      [(given.number('d1') + given.number('d2')) / 2],
+      [given.number('M2')],
+    ),
 
   'b-01': (given) => band(given.number('Kn'), 'gas-dynamics'),
   'b-03': (given) => band(given.number('Kn'), 'gas-dynamics'),
@@ -69,7 +92,8 @@ export const LAWS: Readonly<Record<string, Law>> = {
   'b-13': (given) => reynolds(given.number('rho'), given.number('v'), given.number('d'), given.number('eta')),
   'b-15': turbulentThroughput,
   'b-17': (given) => criticalPressureRatio(given.number('gamma')),
-  'b-19': (given) => (given.number('p2') / given.number('p1') < criticalPressureRatio(given.number('gamma')) ? 'yes' : 'no'),
+  'b-19': (given) =>
+    given.number('p2') / given.number('p1') < criticalPressureRatio(given.number('gamma')) ? 'yes' : 'no',
   'b-21': (given) => chokedConductancePerArea(given.number('T'), given.number('M'), given.number('gamma')),
 
   'c-01': molecules,
@@ -106,7 +130,11 @@ export const LAWS: Readonly<Record<string, Law>> = {
 
   // by the mean ratio of energies: minus the logarithm of the part kept stands for ξ
   'g-01': (given) =>
-    collisionsToThermalise(given.number('E0'), given.number('Eth') / (1.5 * BOLTZMANN), -Math.log(1 - given.number('x'))),
+    collisionsToThermalise(
+      given.number('E0'),
+      given.number('Eth') / (1.5 * BOLTZMANN),
+      -Math.log(1 - given.number('x')),
+    ),
   'g-03': energyKept,
   'g-05': energyKept,
   'g-07': energyKept,
@@ -123,7 +151,12 @@ export const LAWS: Readonly<Record<string, Law>> = {
   'i-03': (given) => surfaceRateFromSticking(given.number('gamma'), speed(given)),
   'i-11': (given) => buoyancy(given, given.number('rho'), 1 / given.number('beta'), 1),
   'i-13': (given) =>
-    buoyancy(given, massDensity(given.number('p'), given.number('M'), given.number('T')), given.number('T'), given.number('Pr')),
+    buoyancy(
+      given,
+      massDensity(given.number('p'), given.number('M'), given.number('T')),
+      given.number('T'),
+      given.number('Pr'),
+    ),
   'i-15': (given) =>
     rayleigh(100, 0.05, massDensity(given.number('p2'), 0.028, 300), 1000, 300, 2e-5, 0.03) /
     rayleigh(100, 0.05, massDensity(given.number('p1'), 0.028, 300), 1000, 300, 2e-5, 0.03),
@@ -132,7 +165,8 @@ export const LAWS: Readonly<Record<string, Law>> = {
   // throughput: molecules a second times kT, whatever the temperature
   'm-01': (given) => leakRate(given.number('V'), given.number('rate'), 300) * BOLTZMANN * 300,
   'm-03': (given) =>
-    leakRate(given.number('V'), given.number('rate'), given.number('T')) / flowRate(1, given.number('pref'), given.number('Tref')),
+    leakRate(given.number('V'), given.number('rate'), given.number('T')) /
+    flowRate(1, given.number('pref'), given.number('Tref')),
   'm-05': (given) =>
     impurityRatio(
       [given.number('s') * impingement(given.number('p'), given.number('M'), given.number('T'))],
@@ -254,7 +288,8 @@ function collisionsByMeanLogarithm(given: Inputs): number {
 function meanUncollidedFraction(given: Inputs): number {
   const parts = 20000;
   let sum = 0;
-  for (let i = 0; i < parts; i++) sum += uncollidedFraction(((i + 0.5) / parts) * given.number('pd'), given.number('p0d0'));
+  for (let i = 0; i < parts; i++)
+    sum += uncollidedFraction(((i + 0.5) / parts) * given.number('pd'), given.number('p0d0'));
   return sum / parts;
 }
 

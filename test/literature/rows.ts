@@ -27,7 +27,26 @@ export function rowFiles(): readonly string[] {
 }
 
 export function rowsOf(file: string): readonly Row[] {
-  return JSON.parse(readFileSync(new URL(`${file}.json`, DATA), 'utf8'));
+  return listOf(file, isRow);
+}
+
+/** The list that a file of data holds, if all of it is of the kind. */
+function listOf<T>(file: string, isOfKind: (entry: unknown) => entry is T): readonly T[] {
+  const list: unknown = JSON.parse(readFileSync(new URL(`${file}.json`, DATA), 'utf8'));
+  if (Array.isArray(list) && list.every(isOfKind)) return list;
+  throw new Error(`${file}.json holds something else`);
+}
+
+function isRow(entry: unknown): entry is Row {
+  return has(entry, 'id', 'states', 'inputs', 'expected', 'kind', 'source');
+}
+
+function isTable(entry: unknown): entry is Table {
+  return has(entry, 'table', 'columns', 'source', 'values');
+}
+
+function has(entry: unknown, ...keys: readonly string[]): boolean {
+  return typeof entry === 'object' && entry !== null && keys.every((key) => key in entry);
 }
 
 /** Reads the inputs of a row, in SI. */
@@ -53,8 +72,12 @@ export class Inputs {
 
 /** Lines of a table of comma-separated values under its heading; a field with a comma stands in double quotes. */
 export function csvOf(file: string): readonly (readonly string[])[] {
-  const [, ...lines] = readFileSync(new URL(`${file}.csv`, DATA), 'utf8').trimEnd().split('\n');
-  return lines.map((line) => [...line.matchAll(/("[^"]*"|[^,]*)(?:,|$)/g)].map(([, field = '']) => field.replaceAll('"', '')));
+  const [, ...lines] = readFileSync(new URL(`${file}.csv`, DATA), 'utf8')
+    .trimEnd()
+    .split('\n');
+  return lines.map((line) =>
+    [...line.matchAll(/("[^"]*"|[^,]*)(?:,|$)/g)].map(([, field = '']) => field.replaceAll('"', '')),
+  );
 }
 
 export interface Table {
@@ -65,8 +88,7 @@ export interface Table {
 }
 
 export function table(name: string): Table {
-  const tables: readonly Table[] = JSON.parse(readFileSync(new URL('tables.json', DATA), 'utf8'));
-  const found = tables.find((one) => one.table === name);
+  const found = listOf('tables', isTable).find((one) => one.table === name);
   if (found === undefined) throw new Error(`no table ${name}`);
   return found;
 }

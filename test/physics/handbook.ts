@@ -33,12 +33,15 @@ export function physicsFiles(): readonly string[] {
 
 export function entriesOf(file: string): readonly Entry[] {
   const text = readFileSync(`${FOLDER}${file}.ts`, 'utf8');
-  return [...text.matchAll(FUNCTION)].map(([, comment = '', name = '', parameters = '']) => entry(file, name, parameters, comment));
+  return [...text.matchAll(FUNCTION)].map(([, comment = '', name = '', parameters = '']) =>
+    entry(file, name, parameters, comment),
+  );
 }
 
 function entry(file: string, name: string, parameters: string, comment: string): Entry {
   const lines = comment.split('\n').map((line) => line.replace(/^\s*\* ?/, ''));
-  const tagged = (tag: string) => lines.filter((line) => line.startsWith(`@${tag} `)).map((line) => line.slice(tag.length + 2));
+  const tagged = (tag: string) =>
+    lines.filter((line) => line.startsWith(`@${tag} `)).map((line) => line.slice(tag.length + 2));
   return {
     file,
     name,
@@ -63,8 +66,15 @@ function unitIn(line: string): string | undefined {
 
 function example(line: string, name: string): Example {
   const match = /^(\w+)\((.*)\) -> (.+)$/.exec(line);
-  if (match === null || match[1] !== name) return { arguments: [], result: `unreadable: ${line}` };
-  return { arguments: JSON.parse(`[${match[2] ?? ''}]`), result: match[3] ?? '' };
+  const given: unknown = match?.[1] === name ? JSON.parse(`[${match[2] ?? ''}]`) : undefined;
+  if (!Array.isArray(given)) return { arguments: [], result: `unreadable: ${line}` };
+  return { arguments: given, result: match?.[3] ?? '' };
+}
+
+/** What a file of src/physics exports. */
+export async function exportsOf(file: string): Promise<ReadonlyMap<string, unknown>> {
+  const module: unknown = await import(`../../src/physics/${file}.ts`);
+  return new Map(Object.entries(module ?? {}));
 }
 
 /** Half a unit of the last digit printed. */

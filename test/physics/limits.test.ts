@@ -2,7 +2,13 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { combine, reducedTemperature, type Molecule } from '../../src/physics/pair.ts';
 import { omega11, omega22 } from '../../src/physics/collision-integrals.ts';
-import { collisionDiameter, diffusionCrossSection, maxwellPath, meanFreePath, pathFromViscosity } from '../../src/physics/collisions.ts';
+import {
+  collisionDiameter,
+  diffusionCrossSection,
+  maxwellPath,
+  meanFreePath,
+  pathFromViscosity,
+} from '../../src/physics/collisions.ts';
 import {
   apertureConductance,
   chokedConductancePerArea,
@@ -12,10 +18,25 @@ import {
   plenumPressure,
   seriesConductance,
 } from '../../src/physics/conductance.ts';
-import { ATOMIC_MASS, AVOGADRO, BOLTZMANN, DEBYE, ELECTRON_MASS, ELEMENTARY_CHARGE, GAS_CONSTANT } from '../../src/physics/constants.ts';
+import {
+  ATOMIC_MASS,
+  AVOGADRO,
+  BOLTZMANN,
+  DEBYE,
+  ELECTRON_MASS,
+  ELEMENTARY_CHARGE,
+  GAS_CONSTANT,
+} from '../../src/physics/constants.ts';
 import { dispersion, flowRate, plugRemainder, pumpingSpeed, residenceTime, turnovers } from '../../src/physics/flow.ts';
 import { transpiration, transpirationLimit } from '../../src/physics/instruments.ts';
-import { band, BANDS, collisionsStraight, collisionsWalk, knudsen, type BandConvention } from '../../src/physics/regime.ts';
+import {
+  band,
+  BANDS,
+  collisionsStraight,
+  collisionsWalk,
+  knudsen,
+  type BandConvention,
+} from '../../src/physics/regime.ts';
 import { meanSpeed, numberDensity } from '../../src/physics/state.ts';
 import { effectiveSticking, impingement, surfaceRateFromSticking } from '../../src/physics/surfaces.ts';
 import { diffusivity, thermalConductivity, viscosity } from '../../src/physics/transport.ts';
@@ -100,7 +121,12 @@ describe('collisions', () => {
   });
 
   test('a pair of one molecule is that molecule, and both orders are one', () => {
-    const molecule = fc.record<Molecule>({ diameter, wellDepth: between(5, 900), dipole: between(0, 8e-30), polar: fc.boolean() });
+    const molecule = fc.record<Molecule>({
+      diameter,
+      wellDepth: between(5, 900),
+      dipole: between(0, 8e-30),
+      polar: fc.boolean(),
+    });
     fc.assert(
       fc.property(molecule, molecule, (a, b) => {
         expect(combine(a, b)).toEqual(combine(b, a));
@@ -137,7 +163,10 @@ describe('transport', () => {
   });
 
   test('a monatomic gas conducts 15/4 of R/M times its viscosity', () => {
-    expect(thermalConductivity(0.04, 2e-5, 1.5 * GAS_CONSTANT)).toBeCloseTo((15 / 4) * (GAS_CONSTANT / 0.04) * 2e-5, 12);
+    expect(thermalConductivity(0.04, 2e-5, 1.5 * GAS_CONSTANT)).toBeCloseTo(
+      (15 / 4) * (GAS_CONSTANT / 0.04) * 2e-5,
+      12,
+    );
     expect(thermalConductivity(0.04, 2e-5, 12.47)).toBeCloseTo((15 / 4) * (GAS_CONSTANT / 0.04) * 2e-5, 5);
   });
 
@@ -193,7 +222,9 @@ describe('conductance', () => {
     const speed = meanSpeed(argon.molarMass, 300);
     const relative = (x: number) => {
       const p = maxwellPath(argon.viscosity, 1, argon.molarMass, 300) / (0.01 / x);
-      return knudsenTubeConductance(0.02, 1, p, 300, argon.molarMass, argon.viscosity) / longTubeConductance(0.02, 1, speed);
+      return (
+        knudsenTubeConductance(0.02, 1, p, 300, argon.molarMass, argon.viscosity) / longTubeConductance(0.02, 1, speed)
+      );
     };
     expect(relative(0.3225)).toBeLessThan(Math.min(relative(0.2), relative(0.5)));
     expect(relative(0.3225)).toBeCloseTo(0.95, 2);
@@ -204,10 +235,14 @@ describe('conductance', () => {
     fc.assert(
       fc.property(hole, ([flow, p, t, d, length]) => {
         const upstream = plenumPressure(flow, p, t, d, length, argon.molarMass, argon.viscosity, argon.ratio);
-        const choked = (flow * BOLTZMANN * t) / (((Math.PI * d ** 2) / 4) * chokedConductancePerArea(t, argon.molarMass, argon.ratio));
+        const choked =
+          (flow * BOLTZMANN * t) /
+          (((Math.PI * d ** 2) / 4) * chokedConductancePerArea(t, argon.molarMass, argon.ratio));
         expect(upstream).toBeGreaterThan(p);
         expect(upstream).toBeGreaterThanOrEqual(choked);
-        expect(plenumPressure(1.1 * flow, p, t, d, length, argon.molarMass, argon.viscosity, argon.ratio)).toBeGreaterThan(upstream);
+        expect(
+          plenumPressure(1.1 * flow, p, t, d, length, argon.molarMass, argon.viscosity, argon.ratio),
+        ).toBeGreaterThan(upstream);
         expect(plenumPressure(0, p, t, d, length, argon.molarMass, argon.viscosity, argon.ratio)).toBe(p);
       }),
     );
@@ -263,14 +298,17 @@ describe('conductance', () => {
 });
 
 describe('regime', () => {
-  test.each<BandConvention>(['gas-dynamics', 'vacuum'])('the name of a Knudsen number is that of its band in %s', (convention) => {
-    fc.assert(
-      fc.property(decades(-6, 6), (kn) => {
-        const of = BANDS[convention].find(({ from, to }) => kn > from && kn < to);
-        if (of !== undefined) expect(band(kn, convention)).toBe(of.name);
-      }),
-    );
-  });
+  test.each<BandConvention>(['gas-dynamics', 'vacuum'])(
+    'the name of a Knudsen number is that of its band in %s',
+    (convention) => {
+      fc.assert(
+        fc.property(decades(-6, 6), (kn) => {
+          const of = BANDS[convention].find(({ from, to }) => kn > from && kn < to);
+          if (of !== undefined) expect(band(kn, convention)).toBe(of.name);
+        }),
+      );
+    },
+  );
 
   test('limits belong to the middle', () => {
     expect([0.01, 0.1, 10].map((kn) => band(kn, 'gas-dynamics'))).toEqual(['slip', 'transition', 'transition']);

@@ -2,11 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { meanFreePath, mixtureMeanFreePath } from '../../src/physics/collisions.ts';
 import { mixtureMolarMass } from '../../src/physics/state.ts';
-import {
-  diffusivityInMixture,
-  mixtureThermalConductivity,
-  mixtureViscosity,
-} from '../../src/physics/transport.ts';
+import { diffusivityInMixture, mixtureThermalConductivity, mixtureViscosity } from '../../src/physics/transport.ts';
 
 interface Gas {
   readonly share: number;
@@ -91,7 +87,10 @@ describe('mixture laws', () => {
     fc.assert(
       fc.property(gases, between(0.05, 0.95), ([first, ...rest], part) => {
         if (first === undefined) return;
-        const split = [{ ...first, share: first.share * part }, { ...first, share: first.share * (1 - part) }];
+        const split = [
+          { ...first, share: first.share * part },
+          { ...first, share: first.share * (1 - part) },
+        ];
         expectSame(numbersOf([...split, ...rest]), numbersOf([first, ...rest]));
       }),
     );

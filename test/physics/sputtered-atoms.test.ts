@@ -86,7 +86,10 @@ describe('fast collisions', () => {
   test('a much faster atom than the gas sweeps its own way, a slow one is met by the gas', () => {
     const fast = path(20 * eV, [argon]);
     const relative = 20 * eV * (argon.molarMass / (argon.molarMass + copper.molarMass));
-    expect(fast * argon.density * fastCrossSection(relative, argon.diameter, argon.wellDepth, 29, 18, 1)).toBeCloseTo(1, 2);
+    expect(fast * argon.density * fastCrossSection(relative, argon.diameter, argon.wellDepth, 29, 18, 1)).toBeCloseTo(
+      1,
+      2,
+    );
     expect(path(1e-4 * eV, [argon])).toBeLessThan(path(1e-2 * eV, [argon]));
   });
 
@@ -112,7 +115,8 @@ describe('slowing down', () => {
   });
 
   test('a mixture’s decrement lies between those of its gases and is that of one gas alone', () => {
-    const of = (gases: readonly Gas[]) => mixtureEnergyDecrement(4 * eV, copper.molarMass, copper.z, ...lists(gases), 300);
+    const of = (gases: readonly Gas[]) =>
+      mixtureEnergyDecrement(4 * eV, copper.molarMass, copper.z, ...lists(gases), 300);
     expect(of([argon])).toBeCloseTo(energyDecrement(copper.molarMass, argon.molarMass), 12);
     expect(of([argon, { ...helium, density: 0 }])).toBeCloseTo(of([argon]), 12);
     expect(of([argon, helium])).toBeLessThan(of([argon]));
@@ -126,14 +130,17 @@ describe('slowing down', () => {
     const third = thermal * Math.exp(3 * 0.83785);
     expect(collisionsToThermalise(third, 300, 0.83785)).toBeCloseTo(3, 12);
     expect(distance(third * (1 + 1e-9)) / distance(third * (1 - 1e-9))).toBeCloseTo(1, 6);
-    fc.assert(fc.property(between(0.05, 20), (energy) => {
+    fc.assert(
+      fc.property(between(0.05, 20), (energy) => {
         expect(distance(1.01 * energy * eV)).toBeGreaterThan(distance(energy * eV));
-      }));
+      }),
+    );
   });
 
   test('the distance times the pressure does not depend on the pressure', () => {
     const at = (density: number) =>
-      density * thermalisationDistance(5 * eV, 0.83785, copper.molarMass, copper.z, ...lists([{ ...argon, density }]), 300);
+      density *
+      thermalisationDistance(5 * eV, 0.83785, copper.molarMass, copper.z, ...lists([{ ...argon, density }]), 300);
     expect(at(1e21) / at(1e19)).toBeCloseTo(1, 10);
   });
 
@@ -214,5 +221,8 @@ function deflection(impact: number, reduced: number): number {
 }
 
 test('atomic masses in kilograms serve as well as molar masses, since only ratios enter the kinematics', () => {
-  expect(energyDecrement(63.546 * ATOMIC_MASS, 39.948 * ATOMIC_MASS)).toBeCloseTo(energyDecrement(0.063546, 0.039948), 12);
+  expect(energyDecrement(63.546 * ATOMIC_MASS, 39.948 * ATOMIC_MASS)).toBeCloseTo(
+    energyDecrement(0.063546, 0.039948),
+    12,
+  );
 });

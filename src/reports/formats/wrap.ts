@@ -1,0 +1,31 @@
+import stringWidth from 'string-width';
+
+/** Text broken at blanks into lines of at most so many columns. A word that is longer stands on a line of its own. */
+export function wrap(text: string, width: number): readonly string[] {
+  if (widthOf(text) <= width) return [text];
+  const lines: string[] = [];
+  let line = '';
+  for (const word of text.split(' ')) {
+    const longer = line === '' ? word : `${line} ${word}`;
+    if (line !== '' && widthOf(longer) > width) {
+      lines.push(line);
+      line = word;
+    } else line = longer;
+  }
+  return line === '' ? lines : [...lines, line];
+}
+
+/** Columns that a text without styles takes up. Most texts are plain ASCII, which is counted without further ado. */
+export function widthOf(text: string): number {
+  return ASCII.test(text) ? text.length : stringWidth(text);
+}
+
+export function padEnd(text: string, width: number): string {
+  return text + ' '.repeat(Math.max(0, width - widthOf(text)));
+}
+
+export function padStart(text: string, width: number): string {
+  return ' '.repeat(Math.max(0, width - widthOf(text))) + text;
+}
+
+const ASCII = /^[\x20-\x7e]*$/;

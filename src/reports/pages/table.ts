@@ -1,0 +1,122 @@
+import { quantityNamed } from '../../quantities/catalogue.ts';
+import { referenceName, type Reference } from '../../quantities/reference.ts';
+import type { Run, StepRun } from '../../quantities/run.ts';
+import { printNumber, printTime } from '../../units/display.ts';
+import type { Block, Page, Sheet } from '../page.ts';
+import { dimensionOfNumber } from '../sentences.ts';
+import { bandOf, inUnit, print, shownFor, spreadInUnit, unitFor, type AskedUnits, type Shown } from '../shown.ts';
+import { counted, listed } from '../words.ts';
+
+export interface TableOptions {
+  readonly units: AskedUnits;
+  /** Numbers to show; those that tell the regime where none are asked for. */
+  readonly columns?: readonly Reference[];
+}
+
+/** The numbers of every step, one row a step. */
+export function tablePage(run: Run, { units, columns = regimeColumns(run) }: TableOptions): Page {
+  const shown = shownFor(run, units);
+  return { blocks: tableBlocks(run, columns, shown), sheet: () => tableSheet(run, columns, shown) };
+}
+
+/** Pressure, mean free path, the Knudsen number over each length that a step names, residence time and turnovers. */
+export function regimeColumns({ steps }: Run): readonly Reference[] {
+  const lengths = new Set(steps.flatMap(({ plan }) => quantityNamed('knudsen')?.lengths?.(plan.scope) ?? []));
+  return [
+    { id: 'gas-pressure' },
+    { id: 'gas-temperature' },
+    { id: 'mean-free-path' },
+    ...[...lengths].map((length) => ({ id: 'knudsen', length })),
+    { id: 'residence-time' },
+    { id: 'turnovers' },
+  ];
+}
+
+function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): readonly Block[] {
+  const { name, revision, chamber, file, duration } = run.recipe;
+  const lacking = lackingSentence(run, columns);
+  return [
+    {
+      kind: 'recipe',
+      name,
+      ...(revision === undefined ? {} : { revision }),
+      chamber: chamber.revision === undefined ? chamber.name : `${chamber.name} rev ${chamber.revision}`,
+      file,
+      size: [counted(run.steps.length, 'step'), ...(duration === undefined ? [] : [printTime(duration)])],
+    },
+    {
+      kind: 'table',
+      columns: [
+        { title: '', align: 'right' },
+        { title: 'step', align: 'left' },
+        ...columns.map((reference) => ({ title: columnTitle(reference), align: 'right' as const })),
+      ],
+      rows: run.steps.map((step) => [String(step.step.number), step.step.path, ...columns.map((one) => cellOf(step, one, shown))]),
+      key: 2,
+    },
+    { kind: 'sentence', weight: 'detail', text: `Uncertainties are expanded, k = ${printNumber(shown.coverage)}.` },
+    ...(lacking === undefined ? [] : [{ kind: 'sentence' as const, weight: 'first' as const, text: lacking }]),
+  ];
+}
+
+/** The number's own name, by which it can be asked for; a Knudsen number by its symbol. */
+function columnTitle(reference: Reference): string {
+  const name = referenceName(reference);
+  if (reference.id === 'knudsen') return `Kn${name.slice('knudsen'.length)}`;
+  return SHORT.get(name) ?? name;
+}
+
+const SHORT: ReadonlyMap<string, string> = new Map([
+  ['gas-pressure', 'pressure'],
+  ['gas-temperature', 'temperature'],
+]);
+
+function cellOf(step: StepRun, reference: Reference, shown: Shown): string {
+  const reading = step.read(reference);
+  if (reading.kind === 'missing') return 'open';
+  if (reading.kind === 'inapplicable') return '';
+  const expanded = shown.coverage * step.uncertainty(reference);
+  const regime = bandOf(shown, reference.id, reading.value);
+  const text = print(shown, reading.value, dimensionOfNumber(reference), expanded);
+  const whose = reading.of === undefined ? '' : ` (${reading.of})`;
+  return `${text}${regime === undefined ? '' : ` ${regime}`}${whose}`;
+}
+
+/** What would supply the numbers that are open, all at once. */
+function lackingSentence({ steps }: Run, columns: readonly Reference[]): string | undefined {
+  const needs = new Map<string, string[]>();
+  for (const step of steps) {
+    const own = new Set<string>();
+    for (const reference of columns) {
+      const reading = step.read(reference);
+      if (reading.kind === 'missing') for (const need of reading.needs) own.add(need);
+    }
+    for (const need of own) needs.set(need, [...(needs.get(need) ?? []), step.step.path]);
+  }
+  if (needs.size === 0) return undefined;
+  return `Open for want of ${[...needs].map(([need, paths]) => `${need} (${listed(paths)})`).join(', ')}.`;
+}
+
+function tableSheet({ recipe, steps }: Run, columns: readonly Reference[], shown: Shown): Sheet {
+  const rows = steps.flatMap((step) =>
+    columns.map((reference) => [recipe.file, recipe.name, String(step.step.number), step.step.path, referenceName(reference), ...numberCells(step, reference, shown)]),
+  );
+  return { columns: ['file', 'recipe', 'step_number', 'step', 'number', 'value', 'uncertainty', 'unit', 'band', 'of', 'absent'], rows };
+}
+
+/** Value, uncertainty, unit, band, whose number, and why there is none. */
+export function numberCells(step: StepRun, reference: Reference, shown: Shown): readonly string[] {
+  const reading = step.read(reference);
+  if (reading.kind === 'missing') return ['', '', '', '', '', `needs ${listed(reading.needs)}`];
+  if (reading.kind === 'inapplicable') return ['', '', '', '', '', reading.because];
+  const dimension = dimensionOfNumber(reference);
+  const unit = unitFor(shown, reading.value, dimension);
+  return [
+    printNumber(inUnit(shown, reading.value, unit, dimension)),
+    printNumber(spreadInUnit(shown, shown.coverage * step.uncertainty(reference), unit, dimension)),
+    unit,
+    bandOf(shown, reference.id, reading.value) ?? '',
+    reading.of ?? '',
+    '',
+  ];
+}

@@ -1,0 +1,61 @@
+import type { StepRun } from '../quantities/run.ts';
+import type { Fault } from '../shelf/fault.ts';
+import type { Site } from '../steps/site.ts';
+import type { RatioSpec } from '../steps/site-rules.ts';
+import { boundIn, type Assumption } from './assumption.ts';
+import type { Case } from './cases.ts';
+import { gravest } from './hold.ts';
+import { judgeAssumption } from './judge-assumption.ts';
+import type { Bound, Verdict } from './verdict.ts';
+
+/** The ratios of flows that a site keeps within bounds, judged for a step on a chamber for which they hold. */
+export function judgeRatios(run: StepRun, chamber: string, site: Site, cases: readonly Case[]): readonly Verdict[] {
+  return site.ratios
+    .filter(({ chambers }) => chambers === undefined || chambers.includes(chamber))
+    .map((ratio) => judgeRatio(ratio, run, cases, site.show.coverageFactor));
+}
+
+/** Bounds of ratios that can't be read. */
+export function ratioFaults({ ratios }: Site): readonly Fault[] {
+  const faults: Fault[] = [];
+  for (const ratio of ratios) boundIn('number', ratio, faults);
+  return faults;
+}
+
+function judgeRatio(ratio: RatioSpec, run: StepRun, cases: readonly Case[], coverage: number): Verdict {
+  const assumption = assumptionOf(ratio, run);
+  const verdict = judgeAssumption(assumption, cases, coverage);
+  const beyond = verdict.kind === 'notApplicable' && flows(ratio.of, run) && !flows(ratio.to, run);
+  if (!beyond) return verdict;
+  // The gas flows without the one it is held against: the ratio has no number, and is above every bound.
+  const { because: _, ...rest } = verdict;
+  const kind = assumption.bound.at_most === undefined ? 'pass' : 'fail';
+  return { ...rest, kind, level: gravest(assumption.bound), remarks: [`${ratio.of} flows without ${ratio.to}`] };
+}
+
+function assumptionOf({ name, of, to, statement, source, place, ...limits }: RatioSpec, run: StepRun): Assumption {
+  return {
+    process: 'site',
+    name,
+    statement: statement ?? `The flow of ${of} over that of ${to} stays within the site's bounds.`,
+    source: source ?? 'stated by the site',
+    reference: { id: 'flow-ratio', of: `${of}/${to}` },
+    bound: kept(limits),
+    whenGiven: true,
+    nominal: false,
+    cure: run.step.setup.lines
+      .filter(({ brings }) => brings.some(({ gas }) => gas === of || gas === to))
+      .map((line) => `flows.${line.name}`),
+    place,
+  };
+}
+
+function kept(limits: Pick<RatioSpec, 'atLeast' | 'atMost'>): Bound {
+  // What can't be read was told when the site was opened.
+  return boundIn('number', limits, []);
+}
+
+function flows(gas: string, run: StepRun): boolean {
+  const reading = run.step.setup.gases.includes(gas) ? run.read({ id: 'flow-rate', of: gas }) : undefined;
+  return reading?.kind === 'known' && reading.value > 0;
+}
