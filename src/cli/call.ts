@@ -1,5 +1,6 @@
 import type { AskedUnits } from '../reports/shown.ts';
 import type { Level } from '../verdicts/verdict.ts';
+import type { ColourChoice } from './colour.ts';
 import type { Format } from './formats.ts';
 import type { Out } from './out.ts';
 
@@ -18,8 +19,11 @@ export type Run = (call: Call) => ExitCode | Promise<ExitCode>;
 
 /** Options of all commands; those that a command does not have are at their defaults. */
 export interface Options {
+  /** Files to write beside standard output; their endings choose the format. */
+  readonly out: readonly string[];
   /** Format of standard output. */
   readonly format: Format;
+  readonly color: ColourChoice;
   readonly units: AskedUnits;
   readonly columns: readonly string[];
   readonly blockAt: Level | 'never';
@@ -36,4 +40,6 @@ export interface Options {
   readonly temperature?: number;
   /** Pa. */
   readonly pressure?: number;
+  /** Whether to tell where the program failed, should it. */
+  readonly trace: boolean;
 }

@@ -1,7 +1,12 @@
 /** Depth of colour: none, 16, 256 or all. */
 export type ColourLevel = 0 | 1 | 2 | 3;
 
-export type ColourChoice = 'auto' | 'always' | 'never';
+export const COLOUR_CHOICES = ['auto', 'always', 'never'] as const;
+export type ColourChoice = (typeof COLOUR_CHOICES)[number];
+
+export function isColourChoice(word: string): word is ColourChoice {
+  return COLOUR_CHOICES.some((choice) => choice === word);
+}
 
 /** What is known of where standard output leads. */
 export interface Surroundings {

@@ -1,7 +1,8 @@
 import { closeSync, mkdirSync, openSync, realpathSync, renameSync, rmdirSync, statSync, unlinkSync, writeSync } from 'node:fs';
 import { dirname, join, basename } from 'node:path';
-import { isatty, WriteStream } from 'node:tty';
+import { isatty } from 'node:tty';
 import { failure, success, wholeFile } from '../shelf/fault.ts';
+import { codeOf } from '../shelf/path-fault.ts';
 import type { Fault, Outcome } from '../shelf/fault.ts';
 
 /*
@@ -120,8 +121,7 @@ const PAUSE = 2;
 
 function terminal(): Terminal {
   if (!isatty(STANDARD_OUTPUT)) return { isTerminal: false, columns: undefined, depth: 1 };
-  const { columns } = process.stdout;
-  return { isTerminal: true, columns, depth: WriteStream.prototype.getColorDepth() };
+  return { isTerminal: true, columns: process.stdout.columns, depth: process.stdout.getColorDepth() };
 }
 
 function openFile(path: string): Outcome<OutFile> {
@@ -223,10 +223,6 @@ function notWritten(path: string, found: string): Fault {
 function reason(error: unknown): string {
   const code = codeOf(error);
   return REASONS.get(code) ?? `an answer of the system: ${code}`;
-}
-
-function codeOf(error: unknown): string {
-  return error instanceof Error && 'code' in error && typeof error.code === 'string' ? error.code : 'unknown';
 }
 
 const REASONS: ReadonlyMap<string, string> = new Map([

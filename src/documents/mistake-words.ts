@@ -37,10 +37,10 @@ export function wrongValue(wrong: WrongValue): Wording {
       return { found: `${name}: a text of more than ${limit} characters`, right: 'shorten it' };
     case 'minItems':
     case 'minProperties':
-      return { found: `${name}: ${Array.isArray(value) ? 'a list' : 'a map'} of too few entries`, right: `write at least ${limit}` };
+      return { found: `${name}: ${kindOf(value)} of too few entries`, right: `at least ${limit} ${limit === '1' ? 'is' : 'are'} needed` };
     case 'maxItems':
     case 'maxProperties':
-      return { found: `${name}: ${Array.isArray(value) ? 'a list' : 'a map'} of too many entries`, right: `write at most ${limit}` };
+      return { found: `${name}: ${kindOf(value)} of too many entries`, right: `at most ${limit} can stand here` };
     case 'uniqueItems':
       return { found: `${name}: a list that says the same twice`, right: 'leave one of both out' };
     case 'minimum':
@@ -60,18 +60,18 @@ export function absence(key: string, rules: readonly Rule[]): string {
   return about === undefined ? `add ${key}` : `add it: ${about}`;
 }
 
-/** A rule's description as a clause. */
+/** The first sentence of a rule's description as a clause. */
 export function described(rule: Rule | undefined): string | undefined {
-  const text = rule?.description?.replace(/\.$/, '');
+  const text = rule?.description?.replace(/\.(?:\s.*)?$/s, '');
   if (text === undefined) return undefined;
-  return /^[A-Z][a-z]/.test(text) ? text.charAt(0).toLowerCase() + text.slice(1) : text;
+  return /^[A-Z](?![A-Z0-9])/.test(text) ? text.charAt(0).toLowerCase() + text.slice(1) : text;
 }
 
 function wrongType(wrong: WrongValue): Wording {
   const { name, value, error, rules } = wrong;
   const types = listOf(error.params['type']);
   const found = `${name}: ${shown(wrong)}`;
-  if (types.includes('string') && (typeof value === 'number' || typeof value === 'boolean')) {
+  if (types.length === 1 && types[0] === 'string' && (typeof value === 'number' || typeof value === 'boolean')) {
     return { found: `${name}: ${wrong.written} without quotes is ${kindOf(value)}`, right: inQuotes(wrong) };
   }
   return { found, right: `${either(types.map((type) => KINDS.get(type) ?? type))} is needed${suchAs(rules)}` };

@@ -25,22 +25,28 @@ export interface Mistakes {
   readonly present: readonly Fault[];
   /** What is missing, at the key of the map that lacks it. */
   readonly absent: readonly Fault[];
+  /** How many more there are that nobody will read. */
+  readonly more: number;
 }
 
 /** The errors of a validator in our words, one for each mistake. */
 export function mistakes(rejected: Rejected, errors: readonly SchemaError[]): Mistakes {
+  const telling = errors.filter(({ keyword }) => !FRAMES.has(keyword));
   const meant = new Set<string>();
   const present: Fault[] = [];
   const absences: SchemaError[] = [];
-  for (const error of errors) {
-    if (FRAMES.has(error.keyword)) continue;
+  for (const error of telling.slice(0, MOST)) {
     if (ABSENCES.has(error.keyword)) absences.push(error);
     else present.push(presentFault(rejected, error, meant));
   }
   // A key that is missing because it is misspelt has been told.
   const untold = absences.filter(({ instancePath, params }) => !meant.has(`${instancePath}/${text(params['missingProperty'])}`));
-  return { present, absent: untold.map((error) => absentFault(rejected, error)) };
+  const absent = untold.map((error) => absentFault(rejected, error));
+  return { present, absent, more: Math.max(0, telling.length - MOST) };
 }
+
+/** Far more than are told; looking up places and names for any number of them would take seconds. */
+const MOST = 100;
 
 /** Keywords whose errors only say that one of another keyword was found further in. */
 const FRAMES: ReadonlySet<string> = new Set(['if', 'propertyNames', 'allOf', 'anyOf']);
@@ -68,7 +74,7 @@ function unknownKey(rejected: Rejected, pointer: Pointer, error: SchemaError, ru
   if (best !== undefined) meant.add(`${error.instancePath}/${best}`);
   return {
     place: placeOf(rejected.source, rejected.root, [...pointer, key], 'key'),
-    found: `unknown key ${quoted(key)}${within(pointer)}`,
+    found: `unknown key ${quoted(key)}${within(owner, pointer, rejected.sort)}`,
     right: best === undefined ? `keys that can stand here: ${free.join(', ')}` : `write ${best}`,
   };
 }
@@ -80,10 +86,11 @@ function allowedKeys({ properties = {} }: Rule): readonly string[] {
   });
 }
 
-function wrongName({ source, root }: Rejected, pointer: Pointer, name: string, rules: readonly Rule[]): Fault {
+function wrongName({ source, root, sort, content }: Rejected, pointer: Pointer, name: string, rules: readonly Rule[]): Fault {
   const place = placeOf(source, root, [...pointer, name], 'key');
+  const owner = pointer.reduce<Value | undefined>(childOf, content);
   const right = described(keyRule(rules)) ?? 'write a plain name';
-  return { place, found: `the name ${quoted(name)}${within(pointer)}`, right };
+  return { place, found: `the name ${quoted(name)}${within(owner, pointer, sort)}`, right };
 }
 
 function excluded({ source, root, sort }: Rejected, pointer: Pointer, rules: readonly Rule[]): Fault {

@@ -5,6 +5,7 @@ import { keyText, nodePlace } from './nodes.ts';
 import { slipIn } from './flow-slips.ts';
 import { quoted } from '../units/unit-fault.ts';
 import type { ParsedNode, Scalar, YAMLMap } from 'yaml';
+import type { NodePair } from './nodes.ts';
 import type { Fault } from '../shelf/fault.ts';
 import type { Source } from '../shelf/place.ts';
 import type { Setpoint, Accuracy, Rest } from './setpoint.ts';
@@ -40,11 +41,13 @@ function nodeValue(reading: Reading, node: ParsedNode | null): Value {
 
 function mapValue(reading: Reading, map: YAMLMap.Parsed): ValueMap {
   const value: ValueMap = emptyMap();
-  let previous: YAMLMap.Parsed['items'][number] | undefined;
+  let previous: NodePair | undefined;
+  let firsts: ReadonlyMap<string, ParsedNode> | undefined;
   for (const pair of map.items) {
     const key = keyText(pair);
     const slip = map.flow === true && pair.value === null ? slipIn(reading.source, previous, pair) : undefined;
-    const fault = slip ?? keyFault(reading, map, pair.key, key, key in value);
+    if (key in value) firsts ??= firstKeys(map);
+    const fault = slip ?? keyFault(reading, pair.key, key, key in value ? firsts?.get(key) : undefined);
     if (fault !== undefined) reading.faults.push(fault);
     else value[key] = nodeValue(reading, pair.value);
     previous = pair;
@@ -67,14 +70,18 @@ function scalarValue({ source, faults }: Reading, node: Scalar.Parsed): Value {
   return typeof value === 'string' || typeof value === 'number' || typeof value === 'boolean' ? value : null;
 }
 
-function keyFault(reading: Reading, map: YAMLMap.Parsed, node: ParsedNode, key: string, known: boolean): Fault | undefined {
+/** What is wrong with a key; `first` is the same key further up, if there is one. */
+function keyFault(reading: Reading, node: ParsedNode, key: string, first: ParsedNode | undefined): Fault | undefined {
   const escaped = isScalar(node) && node.type === 'QUOTE_DOUBLE';
-  if (!known && reading.ascii && !escaped && !REFUSED.has(key)) return undefined;
+  if (first === undefined && reading.ascii && !escaped && !REFUSED.has(key)) return undefined;
   const place = nodePlace(reading.source, node);
   if (key === '__proto__') return { place, found: 'the key __proto__', right: 'choose another name' };
   if (key === '<<') return { place, found: 'a merge key (<<)', right: 'write the keys out' };
   if (key === '') return { place, found: 'a value without a key', right: 'write a key before the colon' };
-  if (known) return { place, found: `a second ${quoted(key)}${firstOf(reading.source, map, key)}`, right: 'keep one of both' };
+  if (first !== undefined) {
+    const { line } = nodePlace(reading.source, first);
+    return { place, found: `a second ${quoted(key)}, the first is in line ${line}`, right: 'keep one of both' };
+  }
   if (hasControl(key)) return { place, found: 'a key with a control character', right: 'write a plain name' };
   const odd = oddCharacter(key);
   return odd === undefined ? undefined : { place, found: `${odd} in the key ${quoted(key)}`, right: 'write a plain character' };
@@ -82,9 +89,10 @@ function keyFault(reading: Reading, map: YAMLMap.Parsed, node: ParsedNode, key: 
 
 const REFUSED: ReadonlySet<string> = new Set(['__proto__', '<<', '']);
 
-function firstOf(source: Source, map: YAMLMap.Parsed, key: string): string {
-  const first = map.items.find((pair) => keyText(pair) === key);
-  return first === undefined ? '' : `, the first is in line ${nodePlace(source, first.key).line}`;
+function firstKeys(map: YAMLMap.Parsed): ReadonlyMap<string, ParsedNode> {
+  const firsts = new Map<string, ParsedNode>();
+  for (const pair of map.items) if (!firsts.has(keyText(pair))) firsts.set(keyText(pair), pair.key);
+  return firsts;
 }
 
 function refused({ source, faults }: Reading, node: ParsedNode, found: string): null {

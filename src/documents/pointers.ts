@@ -53,10 +53,9 @@ export function nameAt(pointer: Pointer, sort: Sort): string {
   return typeof name === 'string' ? name : sort;
 }
 
-/** ` in flows`; nothing at the top. */
-export function within(pointer: Pointer): string {
-  const name = pointer.findLast((step) => typeof step === 'string');
-  return typeof name === 'string' ? ` in ${name}` : '';
+/** ` in flows`, ` in 'settle'`; nothing at the top. */
+export function within(owner: Value | undefined, pointer: Pointer, sort: Sort): string {
+  return pointer.length === 0 ? '' : ` in ${ownerName(owner, pointer, sort)}`;
 }
 
 /** What a map is called in a message: by its own name, else by the key it stands at. */

@@ -1,4 +1,5 @@
 import { failure, success } from '../shelf/fault.ts';
+import { Source } from '../shelf/place.ts';
 import { limited } from './fault-list.ts';
 import { sortOfNodes } from './heading.ts';
 import { placeOf } from './pointers.ts';
@@ -6,17 +7,18 @@ import { plainValue } from './plain.ts';
 import { readNodes } from './syntax.ts';
 import { isSound } from './validate.ts';
 import type { ParsedNode } from 'yaml';
-import type { Fault, Outcome } from '../shelf/fault.ts';
-import type { Source } from '../shelf/place.ts';
+import type { Outcome } from '../shelf/fault.ts';
 import type { AnyDocument, Document } from './document.ts';
 import type { Sort } from './sort.ts';
+import type { Report } from './validate.ts';
 
 /** The document that a text spells, or everything that is wrong with it, each fault at its place. */
 export function readDocument(source: Source): Outcome<AnyDocument> {
-  const nodes = readNodes(source);
+  const text = withoutMark(source);
+  const nodes = readNodes(text);
   if (nodes.value === undefined) return limited(nodes.faults);
-  const sort = sortOfNodes(source, nodes.value);
-  return typeof sort === 'string' ? documentOf(source, nodes.value, sort) : failure(sort);
+  const sort = sortOfNodes(text, nodes.value);
+  return typeof sort === 'string' ? documentOf(text, nodes.value, sort) : failure(sort);
 }
 
 export function readRecipe(source: Source): Outcome<Document<'recipe'>> {
@@ -39,7 +41,8 @@ export function readSite(source: Source): Outcome<Document<'site'>> {
   return readAs(source, 'site');
 }
 
-function readAs<S extends Sort>(source: Source, wanted: S): Outcome<Document<S>> {
+function readAs<S extends Sort>(given: Source, wanted: S): Outcome<Document<S>> {
+  const source = withoutMark(given);
   const nodes = readNodes(source);
   if (nodes.value === undefined) return limited(nodes.faults);
   const sort = sortOfNodes(source, nodes.value);
@@ -47,6 +50,11 @@ function readAs<S extends Sort>(source: Source, wanted: S): Outcome<Document<S>>
   if (sort === wanted) return toDocument(source, nodes.value, wanted);
   const place = placeOf(source, nodes.value, ['regimen']);
   return failure({ place, found: `regimen: a ${sort} document`, right: `a ${wanted} document is needed here` });
+}
+
+/** A byte order mark at the start is no part of the text and of no column. */
+function withoutMark(source: Source): Source {
+  return source.text.startsWith('\uFEFF') ? new Source(source.file, source.text.slice(1)) : source;
 }
 
 function documentOf(source: Source, root: ParsedNode, sort: Sort): Outcome<AnyDocument> {
@@ -65,8 +73,8 @@ function documentOf(source: Source, root: ParsedNode, sort: Sort): Outcome<AnyDo
 }
 
 function toDocument<S extends Sort>(source: Source, root: ParsedNode, sort: S): Outcome<Document<S>> {
-  const faults: Fault[] = [];
-  const content = plainValue(source, root, faults);
-  if (!isSound({ source, root, sort, content }, sort, content, faults)) return limited(faults);
+  const report: Report = { faults: [], more: 0 };
+  const content = plainValue(source, root, report.faults);
+  if (!isSound({ source, root, sort, content }, sort, content, report)) return limited(report.faults, report.more);
   return success({ sort, source, content, place: (pointer, part) => placeOf(source, root, pointer, part) });
 }

@@ -19,12 +19,16 @@ export function readSpan(pass: Pass, map: YAMLMap.Parsed, plan: MeasurePlan, nam
     pass.faults.push({ place: nodePlace(pass.source, map), found: `${name}: ${found}`, right });
   };
   const ramp = map.items.some((pair) => keyText(pair) === 'from' || keyText(pair) === 'to');
-  if (plan.ramp !== true && plan.range !== true) return wrong('a map', needed(plan.dimensions));
+  if ((plan.ramp !== true && plan.range !== true) || !isNearSpan(map)) return wrong('a map', needed(plan.dimensions));
   if (ramp && plan.ramp !== true) return wrong('a ramp cannot stand here', `one value, or ${RANGE_KEYS.join(', ')}`);
   if (!ramp && plan.range !== true) return wrong('a range cannot stand here', 'one value, or from and to');
   const values = readValues(pass, map, plan, name, ramp ? RAMP_KEYS : RANGE_KEYS);
   if (values === undefined) return undefined;
   return ramp ? toRamp(pass, map, values, name, wrong) : toRange(pass, map, values, wrong);
+}
+
+function isNearSpan(map: YAMLMap.Parsed): boolean {
+  return map.items.some((pair) => nearest(keyText(pair), [...RAMP_KEYS, ...RANGE_KEYS]) !== undefined);
 }
 
 const RAMP_KEYS: readonly string[] = ['from', 'to', 'over'];

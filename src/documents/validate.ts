@@ -14,18 +14,26 @@ export function isSound<S extends Sort>(
   candidate: Rejected,
   sort: S,
   content: unknown,
-  faults: Fault[],
+  report: Report,
 ): content is Contents[S] {
+  const { faults } = report;
   const validate = validators[sort];
   if (!validate(content)) {
-    const { present, absent } = mistakes(candidate, validate.errors ?? []);
+    const { present, absent, more } = mistakes(candidate, validate.errors ?? []);
     addUntold(faults, present);
     faults.push(...absent);
+    report.more += more;
   }
   const units: Fault[] = [];
   readMeasures(candidate.source, candidate.root, candidate.content, sort, units);
   addUntold(faults, units);
   return faults.length === 0;
+}
+
+/** What was found wrong so far, and how many faults more. */
+export interface Report {
+  readonly faults: Fault[];
+  more: number;
 }
 
 /** A second fault at the same place comes from the same mistake. */

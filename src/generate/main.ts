@@ -21,7 +21,6 @@ async function main(check: boolean): Promise<void> {
   ]);
   if (!check || differing.length === 0) {
     // Imported late: it reads documents, by the modules that have just been written.
-    if (!existsSync(join(import.meta.dirname,"data.ts"))) return;
     const { dataModule } = await import('./data.ts');
     const data = dataModule(join(ROOT, 'src/built-in'));
     differing.push(...put(check, [[join(ROOT, 'src/built-in/generated/data.ts'), data]]));

@@ -83,6 +83,8 @@ export function meanFreePath(
  *
  *     z = v/λ
  *
+ * Range: thermal gas.
+ *
  * @param speed v: mean speed [m/s]
  * @param path λ: mean free path [m]
  * @returns z: collision frequency [1/s]

@@ -2,8 +2,6 @@ import { omega11 } from './collision-integrals.ts';
 import { BOLTZMANN, ELEMENTARY_CHARGE } from './constants.ts';
 import { erf } from './special.ts';
 
-/** Relative standard uncertainty of `fastCrossSection` and all that rests on it [1]. */
-export const FAST_PATH_UNCERTAINTY = 0.2;
 /** Logarithms of the reduced energy for which the cross-section of the universal potential was fitted [1]; see `logReducedEnergy`. */
 export const UNIVERSAL_CROSS_SECTION_RANGE = { from: -14.5, to: -4.1 } as const;
 

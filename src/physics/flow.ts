@@ -5,8 +5,6 @@ import { erfc } from './special.ts';
 export const STIRRED_BELOW_PECLET = 2;
 /** Above this Péclet number a tube counts as plug flow with dispersion [1]; common practice. Between both pictures are in doubt. */
 export const PLUG_ABOVE_PECLET = 10;
-/** Reynolds number below which tube flow stays laminar [1]; common practice. */
-export const LAMINAR_BELOW_REYNOLDS = 2300;
 /** Rayleigh number at which a layer heated from below, between rigid faces, begins to turn over [1]. Chandrasekhar 1961: 1707.76. */
 export const RAYLEIGH_ONSET = 1708;
 /** ΔT/T up to which `rayleigh` is good [1]; beyond it, with properties at the film temperature, within 30 %. */
@@ -54,6 +52,8 @@ export function residenceTime(pressure: number, volume: number, temperature: num
  *
  *     θ = t/τ
  *
+ * Range: steady pressure and flow over the whole time.
+ *
  * @param time t: duration [s]
  * @param residenceTime τ: residence time [s]
  * @returns θ: turnovers [1]
@@ -86,6 +86,8 @@ export function pumpingSpeed(flow: number, pumpTemperature: number, pressure: nu
  * Mean velocity of a gas stream.
  *
  *     u = F k T/(p A)
+ *
+ * Range: steady flow; a mean over the area, in a tube half of the largest velocity.
  *
  * @param flow F: flow of molecules [1/s]
  * @param temperature T: gas temperature [K]
@@ -122,6 +124,8 @@ export function reynolds(density: number, velocity: number, length: number, visc
  * Péclet number of mass: what the stream carries over what diffuses.
  *
  *     Pe = u L/D
+ *
+ * Range: all. Far below one the gas diffuses against the stream, far above the stream rules.
  *
  * @param velocity u: velocity [m/s]
  * @param length L: length along the flow [m]

@@ -54,6 +54,8 @@ function reducedDipole({ diameter, wellDepth, dipole }: Molecule): number {
  *
  *     T* = k T/ε
  *
+ * Range: all; the collision integrals that it enters hold from 0.3 to 100.
+ *
  * @param temperature T: gas temperature [K]
  * @param wellDepth ε/k: depth of the pair's well [K]
  * @returns T*: reduced temperature [1]

@@ -72,6 +72,8 @@ export function band(knudsen: number, convention: BandConvention): BandName | un
  *
  *     N = L/λ
  *
+ * Range: all; below one the fraction e^(-N) flies through.
+ *
  * @param length L: length of the flight [m]
  * @param path λ: mean free path [m]
  * @returns N: collisions [1]

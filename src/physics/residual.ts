@@ -1,24 +1,6 @@
 import { BOLTZMANN } from './constants.ts';
 
 /**
- * Pressure of the residual gas at a pumping speed. A throttled pump lets it build up.
- *
- *     p_r = F k T_wall/S
- *
- * Range: steady state; outgassing that does not depend on pressure.
- *
- * @param residualFlow F: flow of residual molecules [1/s]
- * @param wallTemperature T_wall: temperature of the walls [K]
- * @param speed S: pumping speed of the step [m3/s]
- * @returns p_r: residual pressure [Pa]
- * @source definition of the pumping speed; ideal gas law
- * @example residualPressure(7.2467e16, 293.15, 0.1) -> 0.0029330
- */
-export function residualPressure(residualFlow: number, wallTemperature: number, speed: number): number {
-  return (residualFlow * BOLTZMANN * wallTemperature) / speed;
-}
-
-/**
  * Reactive atoms that arrive from the residual gas over the atoms of the film that grows.
  *
  *     R = Σ_i Γ_i a_i/(J a_film)

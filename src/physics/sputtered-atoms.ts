@@ -2,8 +2,6 @@ import { BOLTZMANN, ELEMENTARY_CHARGE } from './constants.ts';
 import { fastCollisionRate } from './fast-collisions.ts';
 import { exponentialIntegral } from './special.ts';
 
-/** Standard uncertainty of ln E that goes with `emissionEnergy` [1]. */
-export const EMISSION_ENERGY_UNCERTAINTY = 0.4;
 /** The largest energy of Thompson's spectrum must lie this many sublimation enthalpies out for its logarithmic mean to hold [1]. */
 export const EMISSION_CUT_AT_LEAST = 10;
 
@@ -68,6 +66,8 @@ export function emissionCut(
  * Largest fraction of its energy that a body can pass on to one at rest; hard spheres pass on half of it on average.
  *
  *     β = 4 m M/(m + M)²
+ *
+ * Range: E >> k T, elastic collision.
  *
  * @param molarMass m: molar mass of the moving body [kg/mol]
  * @param partnerMolarMass M: molar mass of the body at rest [kg/mol]
@@ -212,6 +212,8 @@ export function fastFreePath(
  * Fraction of atoms that fly a distance along the normal without a collision.
  *
  *     f = e^(-d/λ)
+ *
+ * Range: all. Weakness: oblique ways are longer; see `uncollidedFractionCosine`.
  *
  * @param distance d: distance [m]
  * @param path λ: mean free path [m]

@@ -1,8 +1,5 @@
 import { AVOGADRO, BOLTZMANN } from './constants.ts';
 
-/** Sites of a monolayer where none are given [1/m2]: 1e15 1/cm2, good within a factor 2; common practice. */
-export const USUAL_SITE_DENSITY = 1e19;
-
 /**
  * Molecules of a gas that strike a surface, by Hertz and Knudsen.
  *
@@ -43,6 +40,8 @@ export function monolayerTime(siteDensity: number, sticking: number, flux: numbe
  * Exposure of a surface to a gas. One langmuir is 1e-6 Torr s, 1.33322e-4 Pa s.
  *
  *     E = p t
+ *
+ * Range: constant pressure.
  *
  * @param pressure p: partial pressure [Pa]
  * @param time t: duration [s]

@@ -1,6 +1,8 @@
 import { diffusionCrossSection, thermalAtomPath } from '../physics/collisions.ts';
 import {
   collisionsToThermalise,
+  EMISSION_CUT_AT_LEAST,
+  emissionCut,
   emissionEnergy,
   evaporationEnergy,
   fastFreePath,
@@ -33,7 +35,15 @@ function emittedSubjects(scope: Scope): readonly string[] {
 
 const about = { subjects: emittedSubjects, whole: true } as const;
 
-export const emissionEnergyOf = quantity<[enthalpy: number, spread: number]>({
+type EmissionArguments = [
+  enthalpy: number,
+  spread: number,
+  voltage: readonly number[],
+  atomMass: number,
+  ionMasses: readonly number[],
+];
+
+export const emissionEnergyOf = quantity<EmissionArguments>({
   ...about,
   id: 'emission-energy',
   symbol: 'E_0',
@@ -45,9 +55,22 @@ export const emissionEnergyOf = quantity<[enthalpy: number, spread: number]>({
       if (emitted.role === 'melt') return { id: 'melt-energy', of: reference.of ?? 'melt' };
       const stated = scope.emitterAddress(emitted, 'energy');
       if (scope.has(stated)) return stated;
-      return [`atoms.${emitted.atom}.sublimation_enthalpy`, 'assumed.emission-spread'] as const;
+      const voltage = scope.emitterAddress(emitted, 'voltage');
+      return [
+        `atoms.${emitted.atom}.sublimation_enthalpy`,
+        'assumed.emission-spread',
+        scope.has(voltage) ? [voltage] : [],
+        `atoms.${emitted.atom}.molar_mass`,
+        scope.gases.map((gas) => `gases.${gas}.molar_mass`),
+      ] as const;
     }),
   value: (enthalpy, spread) => emissionEnergy(enthalpy) * Math.exp(spread),
+  remarks: (_, __, [enthalpy, , [voltage], atomMass, ionMasses]) => {
+    if (voltage === undefined) return [];
+    const cut = Math.max(...ionMasses.map((ionMass) => emissionCut(ionMass, atomMass, voltage, enthalpy)));
+    if (cut > EMISSION_CUT_AT_LEAST * enthalpy) return [];
+    return ['the target voltage cuts the spectrum of energies short: atoms leave with less than assumed'];
+  },
 });
 
 export const meltEnergy = quantity<[temperature: number]>({

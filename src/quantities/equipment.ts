@@ -63,10 +63,7 @@ export const gaugeFooting = quantity<[...GaugeArguments, floors: readonly number
     if (floors.length === 0 || floors.some((floor) => !scope.has(floor))) return missing('chamber.gauges.usable_from');
     return ['pressure', fullScales(scope), floors];
   },
-  value: (pressure, scales, floors) => {
-    const { fullScale, index } = gaugeFor(pressure, scales);
-    return pressure / (fullScale * (floors[index] ?? NaN));
-  },
+  value: (pressure, scales, floors) => pressure / (floors[gaugeFor(pressure, scales).index] ?? NaN),
 });
 
 function fullScales(scope: Scope): readonly string[] {

@@ -1,6 +1,7 @@
 import {
   bulkVelocity,
   leakRate,
+  RAYLEIGH_CONTRAST,
   peclet,
   pumpingSpeed,
   rayleigh,
@@ -277,7 +278,7 @@ export const rayleighOf = quantity<RayleighArguments>({
     return rayleigh(Math.abs(hot - cold), gap, density, molar / molarMass, film, viscosity, conductivity);
   },
   remarks: (_, __, [hot, cold]) =>
-    Math.abs(hot - cold) > 0.3 * ((hot + cold) / 2)
+    Math.abs(hot - cold) > RAYLEIGH_CONTRAST * ((hot + cold) / 2)
       ? ['the temperature difference exceeds 0.3 of the mean: the number is good to 30 %']
       : [],
 });

@@ -1,5 +1,5 @@
-import { carriedOff } from '../physics/pump.ts';
-import { residualPressure } from '../physics/residual.ts';
+import { carriedOff, steadyPressure } from '../physics/pump.ts';
+import { impurityRatio } from '../physics/residual.ts';
 import { impingement } from '../physics/surfaces.ts';
 import { inapplicable, missing, quantity, type Ingredient } from './quantity.ts';
 import type { Inapplicable } from './reading.ts';
@@ -69,7 +69,7 @@ export const residualPressureOf = quantity<[flow: number, temperature: number, s
     const speed = scope.setup.throttle === 'open' ? 'pump-speed' : 'pumping-speed';
     return [{ id: 'residual-flow' }, 'temperatures.wall', { id: speed }];
   },
-  value: residualPressure,
+  value: steadyPressure,
 });
 
 type ImpurityArguments = [
@@ -105,11 +105,8 @@ export const impurityRatioOf = quantity<ImpurityArguments>({
     ];
   },
   value: (pressure, fractions, masses, atoms, temperature, flux, filmAtoms) => {
-    let arriving = 0;
-    for (const [index, fraction] of fractions.entries()) {
-      arriving += impingement(fraction * pressure, masses[index] ?? NaN, temperature) * (atoms[index] ?? 0);
-    }
-    return arriving / (flux * filmAtoms);
+    const arriving = fractions.map((share, index) => impingement(share * pressure, masses[index] ?? NaN, temperature));
+    return impurityRatio(arriving, atoms, flux, filmAtoms);
   },
 });
 

@@ -81,15 +81,23 @@ const ITSELF: readonly number[] = [1];
 const RELATIVE_MOVE = 1e-5;
 const MOVE_FROM_ZERO = 1e-9;
 
-/** Slope of a law to one input by a central difference; one-sided where the law has no value on one side. */
+/** Up to this relative difference the slopes to both sides are those of a smooth law; beyond, the law has a kink or a jump there. */
+const SMOOTH = 0.01;
+
+/**
+ * Slope of a law to one input: the mean of the slopes to both sides. At a kink or a jump (the worst of several changes, a table
+ * goes on to its next row) the flatter side counts, since a jump is no slope; where the law has a value on one side only, that side.
+ */
 function partial(values: Values, node: Law, index: number, input: Node): number {
   const at = evaluate(values, input);
   const centre = evaluate(values, node);
   if (at.kind !== 'known' || centre.kind !== 'known') return 0;
   const move = Math.abs(at.value) * RELATIVE_MOVE || MOVE_FROM_ZERO;
-  const above = lawMoved(values, node, index, at.value + move);
-  const below = lawMoved(values, node, index, at.value - move);
-  if (Number.isFinite(above) && Number.isFinite(below)) return (above - below) / (2 * move);
-  if (Number.isFinite(above)) return (above - centre.value) / move;
-  return Number.isFinite(below) ? (centre.value - below) / move : 0;
+  const up = (lawMoved(values, node, index, at.value + move) - centre.value) / move;
+  const down = (centre.value - lawMoved(values, node, index, at.value - move)) / move;
+  if (!Number.isFinite(up)) return Number.isFinite(down) ? down : 0;
+  if (!Number.isFinite(down)) return up;
+  const smooth = Math.abs(up - down) <= SMOOTH * Math.max(Math.abs(up), Math.abs(down));
+  if (smooth) return (up + down) / 2;
+  return Math.abs(up) < Math.abs(down) ? up : down;
 }

@@ -1,6 +1,6 @@
 import type { Caution } from '../verdicts/verdict.ts';
 import type { Hazard } from '../substances/gas.ts';
-import { listed } from './words.ts';
+import { capital, listed } from './words.ts';
 
 /** One caution as it is told by itself. */
 export interface CautionText {
@@ -18,7 +18,7 @@ export function cautionTexts(cautions: readonly Caution[]): readonly CautionText
     const { steps } = caution;
     if (caution.kind === 'hazard') {
       const { gases, hazard } = caution;
-      const text = `${listed(gases)} ${gases.length === 1 ? 'is' : 'are'} ${hazard}: ${PRACTICE}.`;
+      const text = `${listed(gases)} ${gases.length === 1 ? 'is' : 'are'} ${hazardWord(hazard)}: ${PRACTICE}.`;
       const [only] = steps;
       return [{ ...(steps.length === 1 && only !== undefined ? { path: only } : {}), gases, text }];
     }
@@ -43,14 +43,14 @@ export function cautionSummary(cautions: readonly Caution[]): string | undefined
     if (caution.kind === 'hazard') hazards.set(caution.hazard, caution.gases);
     else clauses.push(`${listed(caution.fuels)} with ${listed(caution.oxidisers)}, fuel with oxidiser, in ${listed(caution.steps)}`);
   }
-  return `${[...hazardClauses([...hazards]), ...clauses].join('; ')}. ${capitalised(PRACTICE)}.`;
+  return `${[...hazardClauses([...hazards]), ...clauses].join('; ')}. ${capital(PRACTICE)}.`;
 }
 
 /** "SiH4 is pyrophoric and toxic", gas by gas, gases alike together. */
 export function hazardClauses(hazards: readonly (readonly [Hazard, readonly string[]])[]): readonly string[] {
-  const byGas = new Map<string, Hazard[]>();
+  const byGas = new Map<string, string[]>();
   for (const [hazard, gases] of hazards) {
-    for (const gas of gases) byGas.set(gas, [...(byGas.get(gas) ?? []), hazard]);
+    for (const gas of gases) byGas.set(gas, [...(byGas.get(gas) ?? []), hazardWord(hazard)]);
   }
   const alike = new Map<string, string[]>();
   for (const [gas, own] of byGas) {
@@ -60,10 +60,12 @@ export function hazardClauses(hazards: readonly (readonly [Hazard, readonly stri
   return [...alike].map(([words, gases]) => `${listed(gases)} ${gases.length === 1 ? 'is' : 'are'} ${words}`);
 }
 
-export function practice(): string {
-  return `${capitalised(PRACTICE)}.`;
+/** The hazard after "is" or "are". */
+function hazardWord(hazard: Hazard): string {
+  return hazard === 'asphyxiant' ? 'asphyxiating' : hazard;
 }
 
-function capitalised(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
+/** What every caution says. */
+export function practice(): string {
+  return `${capital(PRACTICE)}.`;
 }

@@ -2,6 +2,7 @@ import { quantityNamed } from '../quantities/catalogue.ts';
 import type { Node } from '../quantities/plan.ts';
 import type { Line, StepRun } from '../quantities/run.ts';
 import type { Given } from '../steps/given.ts';
+import { printMeasure } from '../units/display.ts';
 import { casesOf } from '../verdicts/cases.ts';
 import type { Assumed, Verdict } from '../verdicts/verdict.ts';
 import { bandOf, print, printGiven, type Shown } from './shown.ts';
@@ -30,7 +31,12 @@ function isNotable({ address, share }: Assumed): boolean {
 
 function assumedWords({ address, because }: Assumed, run: StepRun, shown: Shown): string {
   const given = run.given(address);
-  if (given === undefined || address.startsWith('assumed.') || address.startsWith('accuracy.')) return because;
+  if (given === undefined) return because;
+  const [family, property, gas] = address.split('.');
+  if (family === 'accuracy' && gas !== undefined) {
+    return `${property} of ${gas} known to ${printMeasure(shown.coverage * given.uncertainty, 'fraction', { unit: '%' })}`;
+  }
+  if (family === 'accuracy' || family === 'assumed') return because;
   return `${address} ${printGiven(shown, given, given.value, true)}; ${because}`;
 }
 

@@ -7,7 +7,7 @@ import { absentFolderFault, codeOf, noFolderFault, notTextFault, systemFault } f
 import { slashed } from './paths.ts';
 import { decoded, sizeFault, SIZE_LIMIT } from './text.ts';
 import type { Dirent, Stats } from 'node:fs';
-import type { Fault, Outcome } from './fault.ts';
+import type { Fault } from './fault.ts';
 import type { Kind, Shelf } from './shelf.ts';
 
 /** The files of this machine. Relative paths count from the working folder of the process. */
@@ -56,9 +56,12 @@ function whatItIs(status: Stats): string {
   return status.isSocket() ? 'a socket' : 'a device';
 }
 
-/** Should the file have become a pipe since it was looked at, opening it does not wait for a writer. */
+/**
+ * Should the file have become a pipe since it was looked at, opening it does not wait for a writer. Systems that lack the
+ * flag have no such pipes.
+ */
 function withOpenFile<T>(path: string, use: (descriptor: number) => T): T {
-  const descriptor = openSync(path, constants.O_RDONLY | (constants.O_NONBLOCK ?? 0));
+  const descriptor = openSync(path, constants.O_RDONLY | constants.O_NONBLOCK);
   try {
     return use(descriptor);
   } finally {

@@ -1,4 +1,4 @@
-import { anchored, folderOf, join } from './paths.ts';
+import { anchored, folderOf, join, nameOf } from './paths.ts';
 import type { Shelf } from './shelf.ts';
 
 /** The name of the document at the root of a site. */
@@ -36,6 +36,7 @@ function siteAbove(shelf: Shelf, start: string, known: Map<string, string | unde
   return found;
 }
 
+/** A root, or the working folder of a shelf that has no root. */
 function isTop(folder: string): boolean {
-  return folder === '.' || folderOf(folder) === folder || folder.startsWith('..');
+  return folderOf(folder) === folder || ['.', '..'].includes(nameOf(folder));
 }

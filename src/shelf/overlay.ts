@@ -35,7 +35,8 @@ function merged(above: Outcome<readonly Entry[]>, below: Outcome<readonly Entry[
   if (above.value === undefined || above.value.length === 0) return below;
   if (below.value === undefined) return above;
   const entries = new Map(below.value.map((entry) => [entry.name, entry]));
-  for (const entry of above.value)
+  for (const entry of above.value) {
     if (entry.kind === 'file' || !entries.has(entry.name)) entries.set(entry.name, entry);
+  }
   return success(inOrder(entries.values()));
 }

@@ -15,16 +15,20 @@ export function absentFolderFault(folder: string): Fault {
   return { place: wholeFile(folder), found: 'no such folder', right: 'check the path' };
 }
 
-/** What the system answered to an attempt to open or list a path, in words. */
+/**
+ * What the system answered to an attempt to open or list a path, in words. An error that is not the system's is a mistake in
+ * here and goes on.
+ */
 export function systemFault(name: string, error: unknown): Fault {
   const code = codeOf(error);
+  if (code === undefined) throw error;
   const [found, right] = ANSWERS.get(code) ?? [`an answer of the system: ${code}`, 'check the disk and try again'];
   return { place: wholeFile(name), found, right };
 }
 
 /** The system's own name for what went wrong: `ENOENT`. */
-export function codeOf(error: unknown): string {
-  return error instanceof Error && 'code' in error && typeof error.code === 'string' ? error.code : 'unknown';
+export function codeOf(error: unknown): string | undefined {
+  return error instanceof Error && 'code' in error && typeof error.code === 'string' ? error.code : undefined;
 }
 
 const NO_PERMISSION = [

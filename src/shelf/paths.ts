@@ -38,6 +38,7 @@ export function relative(folder: string, path: string): string {
   return startsIn(from, to) ? to.slice(startOf(from).length) : acrossFolders(from, to);
 }
 
+/** Whether the path starts at a root. */
 export function isAbsolute(path: string): boolean {
   return path.startsWith('/') || (sep === '\\' && /^[a-z]:[\\/]|^\\/i.test(path));
 }

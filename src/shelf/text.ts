@@ -6,7 +6,10 @@ import type { Fault, Outcome } from './fault.ts';
 /** The largest text that is read where nothing else is said: 1 MiB. */
 export const SIZE_LIMIT = 2 ** 20;
 
-/** The text that the bytes spell in UTF-8, without its byte order mark. Other encodings are faults that name the first odd byte. */
+/**
+ * The text that the bytes spell in UTF-8, without its byte order mark. Another encoding is a fault that
+ * names the first byte that does not fit.
+ */
 export function decoded(file: string, bytes: Buffer): Outcome<Source> {
   if (bytes[0] === 0xff && bytes[1] === 0xfe) return failure(utf16Fault(file, 'FF FE'));
   if (bytes[0] === 0xfe && bytes[1] === 0xff) return failure(utf16Fault(file, 'FE FF'));
@@ -24,7 +27,7 @@ export function checkedText(file: string, text: string, sizeLimit: number): Outc
   return checked(file, text.startsWith('\uFEFF') ? text.slice(1) : text);
 }
 
-/** "50 MiB, where 1 MiB is the limit". Where the size is not known the text is just too long. */
+/** "a size of 48 MiB", "at most 1 MiB". Where the size is not known the text is just too long. */
 export function sizeFault(file: string, size: number | undefined, limit: number): Fault {
   const found = size === undefined ? `more than ${bytesInWords(limit)} of text` : `a size of ${bytesInWords(size)}`;
   return { place: wholeFile(file), found, right: `at most ${bytesInWords(limit)}; split the document` };

@@ -25,15 +25,14 @@ export function addressFacts(address: string): AddressFacts | undefined {
 /** The address that was probably meant by an unknown one, its names kept. */
 export function nearestAddress(address: string): string | undefined {
   const [first = '', second, third] = address.split('.');
-  const meant = nearest(address, PATTERNS);
-  if (meant !== undefined && !meant.includes('*')) return meant;
   const family = nearest(first, FAMILIES);
-  if (family === undefined || second === undefined) return undefined;
-  const named = third === undefined ? `${family}.${second}` : `${family}.${second}.${third}`;
+  if (family === undefined || second === undefined) return nearest(address, PLAIN_PATTERNS);
+  const tail = third === undefined ? second : `${second}.${third}`;
+  const named = `${family}.${tail}`;
   if (dimensionOf(named) !== undefined) return named;
-  const keys = PATTERNS.filter((pattern) => pattern.startsWith(`${family}.*.`)).map((pattern) => lastOf(pattern));
-  const key = third === undefined ? undefined : nearest(third, keys);
-  return key === undefined ? meant : `${family}.${second}.${key}`;
+  if (third === undefined) return nearest(named, PLAIN_PATTERNS);
+  const key = nearest(third, keysBelow(`${family}.*.`));
+  return key === undefined ? nearest(named, PLAIN_PATTERNS) : `${family}.${second}.${key}`;
 }
 
 /** Every address that a step, a limit, a usual range or a stand-in may name. */
@@ -91,8 +90,9 @@ export const ADDRESSES: readonly AddressFacts[] = [
 
 const BY_PATTERN: ReadonlyMap<string, AddressFacts> = new Map(ADDRESSES.map((facts) => [facts.pattern, facts]));
 const PATTERNS: readonly string[] = [...BY_PATTERN.keys()];
+const PLAIN_PATTERNS: readonly string[] = PATTERNS.filter((pattern) => !pattern.includes('*'));
 const FAMILIES: readonly string[] = [...new Set(PATTERNS.map((pattern) => pattern.split('.')[0] ?? ''))];
 
-function lastOf(pattern: string): string {
-  return pattern.slice(pattern.lastIndexOf('.') + 1);
+function keysBelow(start: string): readonly string[] {
+  return PATTERNS.filter((pattern) => pattern.startsWith(start)).map((pattern) => pattern.slice(start.length));
 }

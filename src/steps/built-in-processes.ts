@@ -1,12 +1,18 @@
-// TEMPORARY until built-in/generated/data.ts is there
-import { readdirSync, readFileSync } from 'node:fs';
-import { readProcess } from '../documents/read.ts';
-import { Source } from '../shelf/place.ts';
-import { processesOver } from './processes.ts';
-const dir = new URL('../built-in/processes/', import.meta.url);
-const docs = readdirSync(dir).flatMap((n) => {
-  const o = readProcess(new Source(`built-in/processes/${n}`, readFileSync(new URL(n, dir), 'utf8')));
-  if (o.value === undefined) console.error(n, o.faults.slice(0, 3).map((f) => [f.place.line, f.found, f.right]));
-  return o.value === undefined ? [] : [o.value];
-});
-export const BUILT_IN_PROCESSES = processesOver(docs, { named: () => undefined, names: () => [] });
+import { builtInNames, builtInProcess } from '../documents/built-in.ts';
+import { processFrom, type ProcessSpec } from './process.ts';
+import type { Processes } from './processes.ts';
+
+/** The processes that the program knows without a site, each read when it is first asked for. */
+export const BUILT_IN_PROCESSES: Processes = {
+  named: (name) => {
+    const known = kept.get(name);
+    if (known !== undefined) return known;
+    const document = builtInProcess(name);
+    const spec = document === undefined ? undefined : processFrom(document).value;
+    if (spec !== undefined) kept.set(name, spec);
+    return spec;
+  },
+  names: () => builtInNames('processes'),
+};
+
+const kept = new Map<string, ProcessSpec>();

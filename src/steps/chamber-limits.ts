@@ -17,6 +17,7 @@ export function putLimits(draft: ChamberDraft): void {
       const text = limits[side];
       if (text !== undefined) putLimit(`${address}.${side}`, text, dimension, draft.document.place(['limits', address, side]), draft);
     }
+    checkOrder(address, draft);
   }
 }
 
@@ -28,6 +29,14 @@ function putLimit(key: string, text: string | number, dimension: Dimension, plac
   }
   const scale = dimension === 'flow' ? referredScale(draft.content) : STATED;
   draft.layer.put(`chamber.limits.${key}`, { kind: 'fixed', measure, place }, scale);
+}
+
+function checkOrder(address: string, { layer, document, faults }: ChamberDraft): void {
+  const low = layer.givens.get(`chamber.limits.${address}.at_least`);
+  const high = layer.givens.get(`chamber.limits.${address}.at_most`);
+  if (low === undefined || high === undefined || low.value <= high.value) return;
+  const place = document.place(['limits', address]);
+  faults.push({ place, found: 'limits that are not in order', right: 'at_least is the lowest, at_most the highest' });
 }
 
 /** The fault of an address at which no step has a setpoint. */

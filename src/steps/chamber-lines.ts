@@ -36,7 +36,7 @@ function chamberLine(name: string, line: GasLine, reference: FlowReference, draf
   const brings = bringsOf(name, line, draft);
   const vapour = line.bubbles === undefined ? 0 : bubbledShare(name, line.bubbles, draft);
   const draws = line.draws !== undefined;
-  if (vapour === undefined) return { line: { name, brings }, draws };
+  if (vapour === undefined) return { line: { name, brings }, address: `flows.${name}`, draws };
   const fullScale = fixedOf(line.full_scale);
   const plain = { ...PERFECT, reference };
   const delivery: Delivery = {
@@ -50,7 +50,7 @@ function chamberLine(name: string, line: GasLine, reference: FlowReference, draf
   // What the line delivers at full scale, so that a flow over it is how far the controller is open.
   if (fullScale !== undefined) draft.layer.put(`${address}.full_scale`, fullScale, { ...scale, uncertainty: () => 0 });
   if (line.response !== undefined) draft.layer.put(`${address}.response`, line.response, STATED);
-  return { line: { name, brings }, scale, draws };
+  return { line: { name, brings }, address: `flows.${name}`, scale, draws };
 }
 
 const PERFECT: Omit<Delivery, 'reference'> = {

@@ -20,7 +20,7 @@ export function putDefaults(layer: Layer, setup: Setup, process: ProcessSpec | u
 function standIn(layer: Layer, given: Given): void {
   const { address } = given;
   if (layer.givens.has(address) || isMarked(address, layer.unknown) || isMarked(address, layer.none)) return;
-  layer.givens.set(address, given);
+  layer.givens.set(given);
 }
 
 /** Whether the address, or the part that it belongs to, is marked. */

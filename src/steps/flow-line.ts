@@ -7,6 +7,8 @@ import type { Scale } from './written.ts';
 /** A gas line of a chamber, and what a flow set on it delivers. */
 export interface FlowLine {
   readonly line: Line;
+  /** Of its flow in a step. */
+  readonly address: string;
   /** Absent where a bubbler does not tell how much vapour its carrier takes along. */
   readonly scale?: Scale;
   /** Whether it draws vapour without a controller, so that an amount may be fed. */

@@ -1,26 +1,29 @@
 import type { Setpoint } from '../documents/setpoint.ts';
 import type { Given } from './given.ts';
+import { Givens } from './givens.ts';
 import type { Setup } from './step.ts';
 import { givenFrom, isSetpoint, isWritten, type Scale, type Written } from './written.ts';
 
 /**
  * Setpoints as far as documents have stated them: the chamber's at the bottom, over it `throughout` of the recipe and of
- * its cycles from the outside in, the step's own on top. Each layer starts as a copy of the one below.
+ * its cycles from the outside in, the step's own on top.
  */
 export class Layer {
-  readonly givens: Map<string, Given>;
-  readonly unknown: Set<string>;
-  readonly none: Set<string>;
+  readonly givens: Givens;
+  /** Addresses, and whole parts such as the wafer, that are stated to be unknown. */
+  unknown: ReadonlySet<string>;
+  /** Addresses, and whole parts, that are stated not to apply. */
+  none: ReadonlySet<string>;
   /** Amounts fed in the step, by line: they become flows once the time is known. */
-  readonly amounts: Map<string, Written>;
-  parts: Parts;
+  amounts: ReadonlyMap<string, Written>;
+  readonly parts: Parts;
 
   constructor(below?: Layer) {
-    this.givens = new Map(below?.givens);
-    this.unknown = new Set(below?.unknown);
-    this.none = new Set(below?.none);
-    this.amounts = new Map(below?.amounts);
-    this.parts = below?.parts ?? NO_PARTS;
+    this.givens = new Givens(below?.givens.flattened());
+    this.unknown = below?.unknown ?? NOTHING;
+    this.none = below?.none ?? NOTHING;
+    this.amounts = below?.amounts ?? NO_AMOUNTS;
+    this.parts = { ...(below?.parts ?? NO_PARTS) };
   }
 
   put(address: string, setpoint: Setpoint, scale: Scale): void {
@@ -29,36 +32,33 @@ export class Layer {
   }
 
   give(given: Given): void {
-    const { address } = given;
-    this.givens.set(address, given);
-    if (this.unknown.size > 0) this.unknown.delete(address);
-    if (this.none.size > 0) this.none.delete(address);
+    this.givens.set(given);
+    this.unmark(given.address);
   }
 
   /** States that an address, or a whole part such as the wafer, is unknown or does not apply. */
   mark(address: string, as: 'unknown' | 'none'): void {
     this.forget(address);
-    (as === 'unknown' ? this.unknown : this.none).add(address);
+    this[as] = new Set([...this[as], address]);
+  }
+
+  /** Takes back that an address or part is unknown or does not apply. */
+  unmark(address: string): void {
+    if (this.unknown.has(address)) this.unknown = without(this.unknown, address);
+    if (this.none.has(address)) this.none = without(this.none, address);
   }
 
   /** Drops what lower layers say of one address. */
   drop(address: string): void {
     this.givens.delete(address);
-    this.unknown.delete(address);
-    this.none.delete(address);
-  }
-
-  /** Takes back that a part is unknown or does not apply. */
-  unmark(address: string): void {
-    this.unknown.delete(address);
-    this.none.delete(address);
+    this.unmark(address);
   }
 
   /** Drops what lower layers say of an address and of all below it. */
   forget(address: string): void {
     const within = `${address}.`;
     for (const stated of [this.givens, this.unknown, this.none]) {
-      for (const one of stated.keys()) if (one === address || one.startsWith(within)) stated.delete(one);
+      for (const one of [...stated.keys()]) if (one === address || one.startsWith(within)) this.drop(one);
     }
   }
 
@@ -70,34 +70,33 @@ export class Layer {
       else if (typeof node === 'object' && node !== null) this.putAll(`${prefix}.${key}`, node, scale);
     }
   }
-
-  with(parts: Partial<Parts>): void {
-    this.parts = { ...this.parts, ...parts };
-  }
 }
 
 /** What a step is made of as far as its layers have told. */
-export interface Parts extends Pick<Setup, 'throttle' | 'wafer'> {
-  /** How gas flows through the chamber, where the step says so. */
-  readonly flow: Setup['flow'] | undefined;
+export interface Parts {
+  throttle: Setup['throttle'];
+  wafer: Setup['wafer'];
+  feature: Setup['feature'];
+  /** How gas flows through the chamber, where the recipe says so. */
+  flow: Setup['flow'] | undefined;
   /** Lines with a flow, in order of first mention. */
-  readonly lines: readonly string[];
+  lines: readonly string[];
   /** Gases of the stated composition. */
-  readonly composition: readonly string[];
-  readonly generators: readonly string[];
+  composition: readonly string[];
+  generators: readonly string[];
   /** Targets and melts that the innermost layer to name any names. */
-  readonly targets: readonly string[];
-  readonly melts: readonly string[];
-  readonly surface: Setup['surface'];
-  readonly reactant: string | undefined;
-  readonly ion: string | undefined;
-  readonly backside: string | undefined;
-  readonly feature: Setup['feature'];
+  targets: readonly string[];
+  melts: readonly string[];
+  surface: Setup['surface'];
+  reactant: string | undefined;
+  ion: string | undefined;
+  backside: string | undefined;
 }
 
 const NO_PARTS: Parts = {
   throttle: 'holds',
   wafer: 'unknown',
+  feature: undefined,
   flow: undefined,
   lines: [],
   composition: [],
@@ -108,5 +107,13 @@ const NO_PARTS: Parts = {
   reactant: undefined,
   ion: undefined,
   backside: undefined,
-  feature: undefined,
 };
+
+const NOTHING: ReadonlySet<string> = new Set();
+const NO_AMOUNTS: ReadonlyMap<string, Written> = new Map();
+
+function without(set: ReadonlySet<string>, one: string): ReadonlySet<string> {
+  const rest = new Set(set);
+  rest.delete(one);
+  return rest;
+}

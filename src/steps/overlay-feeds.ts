@@ -11,9 +11,9 @@ import { isWritten, usualMeasure, type Written } from './written.ts';
 export function putFlows(layer: Layer, flows: Flows, pointer: Pointer, ground: Ground): void {
   const entries = Object.entries(flows);
   if (entries.length === 0) {
-    layer.forget('flows');
-    layer.amounts.clear();
-    layer.with({ lines: [] });
+    for (const name of layer.parts.lines) layer.drop(`flows.${name}`);
+    layer.amounts = new Map();
+    layer.parts.lines = [];
     return;
   }
   const { lines } = ground.chamber;
@@ -28,25 +28,24 @@ export function putFlows(layer: Layer, flows: Flows, pointer: Pointer, ground: G
     putFlow(layer, name, setpoint, line, ground);
     if (!layer.parts.lines.includes(name)) named.push(name);
   }
-  if (named.length > 0) layer.with({ lines: [...layer.parts.lines, ...named] });
+  if (named.length > 0) layer.parts.lines = [...layer.parts.lines, ...named];
 }
 
 function putFlow(layer: Layer, name: string, setpoint: Setpoint, line: FlowLine, ground: Ground): void {
-  const address = `flows.${name}`;
-  layer.amounts.delete(name);
+  if (layer.amounts.has(name)) layer.amounts = new Map([...layer.amounts].filter(([line]) => line !== name));
   if (isWritten(setpoint) && usualMeasure(setpoint).dimension === 'amount') {
     putAmount(layer, name, setpoint, line, ground);
   } else if (line.scale !== undefined) {
-    layer.put(address, setpoint, line.scale);
+    layer.put(line.address, setpoint, line.scale);
   } else {
-    layer.mark(address, 'unknown');
+    layer.mark(line.address, 'unknown');
   }
 }
 
 /** An amount becomes a flow once the step's time is known: see `settleAmounts`. */
-function putAmount(layer: Layer, name: string, setpoint: Written, { draws }: FlowLine, { faults }: Ground): void {
-  layer.drop(`flows.${name}`);
-  if (draws) layer.amounts.set(name, setpoint);
+function putAmount(layer: Layer, name: string, setpoint: Written, { draws, address }: FlowLine, { faults }: Ground): void {
+  layer.drop(address);
+  if (draws) layer.amounts = new Map([...layer.amounts, [name, setpoint]]);
   else faults.push({ place: setpoint.place, found: `an amount through line ${name}`, right: 'a flow, in sccm: the line has a controller' });
 }
 
@@ -69,5 +68,5 @@ export function putGenerators(
     layer.put(`${key}.${name}`, setpoint, plain);
     if (key === 'power' && !layer.parts.generators.includes(name)) named.push(name);
   }
-  if (named.length > 0) layer.with({ generators: [...layer.parts.generators, ...named] });
+  if (named.length > 0) layer.parts.generators = [...layer.parts.generators, ...named];
 }

@@ -16,7 +16,7 @@ export function putSurface(layer: Layer, block: Block<'surface'>, pointer: Point
     const other = below !== undefined && (below.film !== film || below.mode !== mode);
     if (other) for (const key of OF_THE_FILM) layer.drop(`surface.${key}`);
     const product = block.product ?? (other ? undefined : below?.product);
-    layer.with({ surface: { film, mode, ...(product === undefined ? {} : { product }) } });
+    layer.parts.surface = { film, mode, ...(product === undefined ? {} : { product }) };
     if (stated !== undefined) checkFilm(stated, () => placeIn(ground, pointer, ['surface', block.etches === undefined ? 'grows' : 'etches']), ground);
   }
   layer.putAll('surface', block, ground.chamber.plain);
@@ -30,7 +30,7 @@ export function putReactant(layer: Layer, block: Block<'reactant'>, pointer: Poi
   if (reactant !== undefined && reactant !== block.gas) layer.forget('reactant');
   checkGas(block.gas, () => placeIn(ground, pointer, ['reactant', 'gas']), ground);
   layer.putAll('reactant', block, ground.chamber.plain);
-  layer.with({ reactant: block.gas });
+  layer.parts.reactant = block.gas;
 }
 
 /** Puts what a step sets on a target or melt, which thereby runs. */
@@ -58,5 +58,5 @@ export function putRunning(
     const place = placeIn(ground, pointer, [key, second], 'key');
     ground.faults.push({ place, found: `${running.join(' and ')} in one step`, right: 'the one that runs' });
   }
-  if (running.length > 0) layer.with({ [key]: running });
+  if (running.length > 0) layer.parts[key] = running;
 }

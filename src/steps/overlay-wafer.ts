@@ -9,21 +9,22 @@ import type { Scale } from './written.ts';
 export function putWafer(layer: Layer, wafer: NonNullable<Throughout['wafer']>, scale: Scale): void {
   if (typeof wafer === 'string') {
     layer.mark('wafer', wafer);
-    layer.with({ wafer, feature: undefined });
+    layer.parts.wafer = wafer;
+    layer.parts.feature = undefined;
     return;
   }
   layer.unmark('wafer');
   const { feature, ...plain } = wafer;
   layer.putAll('wafer', plain, scale);
-  if (wafer.diameter !== undefined) layer.with({ wafer: 'disc' });
-  else if (wafer.width !== undefined || wafer.length !== undefined) layer.with({ wafer: 'panel' });
+  if (wafer.diameter !== undefined) layer.parts.wafer = 'disc';
+  else if (wafer.width !== undefined || wafer.length !== undefined) layer.parts.wafer = 'panel';
   if (typeof feature === 'string') {
     layer.mark('wafer.feature', feature);
-    layer.with({ feature: undefined });
+    layer.parts.feature = undefined;
   } else if (feature !== undefined) {
     layer.unmark('wafer.feature');
     layer.putAll('wafer.feature', feature, scale);
-    layer.with({ feature: feature.shape });
+    layer.parts.feature = feature.shape;
   }
 }
 
@@ -31,7 +32,7 @@ export function putWafer(layer: Layer, wafer: NonNullable<Throughout['wafer']>, 
 export function putBackside(layer: Layer, backside: NonNullable<Throughout['backside']>, pointer: Pointer, ground: Ground): void {
   if (typeof backside === 'string') {
     layer.mark('backside', backside);
-    layer.with({ backside: undefined });
+    layer.parts.backside = undefined;
     return;
   }
   layer.unmark('backside');
@@ -39,5 +40,5 @@ export function putBackside(layer: Layer, backside: NonNullable<Throughout['back
   if (below !== undefined && below !== backside.gas) layer.forget('backside');
   checkGas(backside.gas, () => placeIn(ground, pointer, ['backside', 'gas']), ground);
   layer.putAll('backside', backside, ground.chamber.plain);
-  layer.with({ backside: backside.gas });
+  layer.parts.backside = backside.gas;
 }

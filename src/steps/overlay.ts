@@ -54,7 +54,7 @@ function putHold(layer: Layer, block: Throughout, pointer: Pointer, ground: Grou
   if (pressure !== undefined) {
     layer.drop('throttle');
     layer.drop('fill_to');
-    layer.with({ throttle: 'holds' });
+    layer.parts.throttle = 'holds';
     layer.put('pressure', pressure, ground.chamber.pressure);
   }
   if (throttle !== undefined) {
@@ -62,7 +62,7 @@ function putHold(layer: Layer, block: Throughout, pointer: Pointer, ground: Grou
     layer.drop('pressure');
     layer.drop('fill_to');
     layer.drop('throttle');
-    layer.with({ throttle: typeof throttle === 'string' ? throttle : 'position' });
+    layer.parts.throttle = typeof throttle === 'string' ? throttle : 'position';
     if (typeof throttle !== 'string') layer.put('throttle', throttle, ground.chamber.plain);
   }
   if (fill_to !== undefined) layer.put('fill_to', fill_to, ground.chamber.pressure);
@@ -77,15 +77,15 @@ function putComposition(layer: Layer, composition: NonNullable<Throughout['compo
   for (const gas of gases) checkGas(gas, () => placeIn(ground, pointer, ['composition', gas], 'key'), ground);
   if (layer.parts.composition.length > 0) layer.forget('composition');
   ground.faults.push(...putShares(layer, 'composition', composition));
-  layer.with({ composition: gases });
+  layer.parts.composition = gases;
 }
 
 function putPlasma(layer: Layer, plasma: NonNullable<Throughout['plasma']>, { chamber }: Ground): void {
   layer.putAll('plasma', plasma, chamber.plain);
-  if (plasma.ion !== undefined) layer.with({ ion: plasma.ion });
+  if (plasma.ion !== undefined) layer.parts.ion = plasma.ion;
 }
 
 function putBody(layer: Layer, body: NonNullable<Throughout['body']>, { chamber }: Ground): void {
   layer.putAll('body', body, chamber.plain);
-  if (body.flow !== undefined) layer.with({ flow: body.flow });
+  if (body.flow !== undefined) layer.parts.flow = body.flow;
 }

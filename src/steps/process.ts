@@ -1,8 +1,10 @@
-import type { ProcessDocument } from '../documents/document.ts';
+import type { Placed } from '../documents/document.ts';
 import type { Assumption, Process } from '../documents/generated/types.ts';
 import type { Fault, Outcome } from '../shelf/fault.ts';
 import { success } from '../shelf/fault.ts';
 import type { Place } from '../shelf/place.ts';
+import type { Dimension } from '../units/dimensions.ts';
+import { isUnitFault, readMeasure } from '../units/read.ts';
 import { dimensionOf } from './addresses.ts';
 import { unknownAddress } from './chamber-limits.ts';
 import type { Given } from './given.ts';
@@ -76,7 +78,7 @@ export interface StandIn {
 }
 
 /** The process that one document states, without what it is based on. */
-export function processFrom(document: ProcessDocument): Outcome<ProcessSpec> {
+export function processFrom(document: Placed<Process>): Outcome<ProcessSpec> {
   const { content } = document;
   const faults: Fault[] = [];
   const assumptions = Object.entries(content.assumptions ?? {}).map(([name, one]) => assumptionFrom(name, one, document));
@@ -112,7 +114,7 @@ function merged<T>(base: readonly T[], own: readonly T[], key: (one: T) => strin
   return [...byKey.values()];
 }
 
-function assumptionFrom(name: string, assumption: Assumption, document: ProcessDocument): AssumptionSpec {
+function assumptionFrom(name: string, assumption: Assumption, document: Placed<Process>): AssumptionSpec {
   const { level, over, at_least, at_most, when, review_level, remark } = assumption;
   const pointer = ['assumptions', name];
   const limits = (side: 'at_least' | 'at_most', bound: NonNullable<Assumption['at_least']>) =>
@@ -151,24 +153,33 @@ export function gradedLimits(
 
 const GRADES: readonly Grade[] = ['error', 'warning', 'note'];
 
-function usualRanges({ content, place }: ProcessDocument, faults: Fault[]): readonly UsualRange[] {
+function usualRanges(document: Placed<Process>, faults: Fault[]): readonly UsualRange[] {
   const ranges: UsualRange[] = [];
-  for (const [address, { at_least, at_most }] of Object.entries(content.usual ?? {})) {
-    const key = place(['usual', address], 'key');
-    if (dimensionOf(address) === undefined) faults.push(unknownAddress(address, key));
-    else {
-      ranges.push({
-        address,
-        ...(at_least === undefined ? {} : { atLeast: { is: at_least, place: place(['usual', address, 'at_least']) } }),
-        ...(at_most === undefined ? {} : { atMost: { is: at_most, place: place(['usual', address, 'at_most']) } }),
-        place: key,
-      });
+  for (const [address, limits] of Object.entries(document.content.usual ?? {})) {
+    const place = document.place(['usual', address], 'key');
+    const dimension = dimensionOf(address);
+    if (dimension === undefined) {
+      faults.push(unknownAddress(address, place));
+      continue;
     }
+    const limit = (side: 'at_least' | 'at_most') => usualLimit(limits[side], dimension, document.place(['usual', address, side]), faults);
+    const atLeast = limit('at_least');
+    const atMost = limit('at_most');
+    ranges.push({ address, ...(atLeast === undefined ? {} : { atLeast }), ...(atMost === undefined ? {} : { atMost }), place });
   }
   return ranges;
 }
 
-function standIns({ content, place }: ProcessDocument, faults: Fault[]): readonly StandIn[] {
+/** A limit as written, once it is sure that it can be read. */
+function usualLimit(is: string | number | undefined, dimension: Dimension, place: Place, faults: Fault[]): LateValue | undefined {
+  if (is === undefined) return undefined;
+  const measure = readMeasure(is, dimension);
+  if (!isUnitFault(measure)) return { is, place };
+  faults.push({ place, found: measure.found, right: measure.right });
+  return undefined;
+}
+
+function standIns({ content, place }: Placed<Process>, faults: Fault[]): readonly StandIn[] {
   const entries: readonly [string, NonNullable<Process['stands_in']>[string]][] = Object.entries(content.stands_in ?? {});
   return entries.flatMap(([address, stated]) => {
     const placeOf = (side: readonly string[], part?: 'key') => place(['stands_in', address, ...side], part);

@@ -1,15 +1,13 @@
 import type { ChamberFacts } from './chamber.ts';
 import type { Given } from './given.ts';
-import type { Layer } from './layer.ts';
+import type { Layer, Parts } from './layer.ts';
 import type { Emitter, Line, Setup } from './step.ts';
 
 /** What a step is made of, once all its layers have been put. */
 export function setupOf({ parts, givens }: Layer, chamber: ChamberFacts): Setup {
   const lines = flowingLines(parts.lines, givens, chamber);
   const composition = parts.composition.length > 0;
-  const target = runningOf(parts.targets, chamber.targets);
-  const melt = runningOf(parts.melts, chamber.melts);
-  return {
+  const setup: Writable<Setup> = {
     lines,
     gases: composition ? parts.composition : gasesOf(lines),
     composition,
@@ -18,19 +16,28 @@ export function setupOf({ parts, givens }: Layer, chamber: ChamberFacts): Setup 
     pumpSpeed: chamber.pumpSpeed,
     pumpRows: chamber.pumpRows,
     throttle: parts.throttle,
-    ...(target === undefined ? {} : { target }),
-    ...(melt === undefined ? {} : { melt }),
-    ...(parts.surface === undefined ? {} : { surface: parts.surface }),
-    ...(parts.reactant === undefined ? {} : { reactant: parts.reactant }),
-    ...(parts.ion === undefined ? {} : { ion: parts.ion }),
-    ...(parts.backside === undefined ? {} : { backside: parts.backside }),
-    ...(chamber.walls === undefined ? {} : { walls: chamber.walls }),
     wafer: parts.wafer,
-    ...(parts.feature === undefined ? {} : { feature: parts.feature }),
     inlets: chamber.inlets,
     gauges: chamber.gauges,
-    powered: parts.generators.filter((name) => isOn(givens.get(`power.${name}`))),
+    powered: poweredOf(parts.generators, givens),
   };
+  putOptional(setup, parts, chamber);
+  return setup;
+}
+
+type Writable<T> = { -readonly [K in keyof T]: T[K] };
+
+function putOptional(setup: Writable<Setup>, parts: Parts, chamber: ChamberFacts): void {
+  const target = runningOf(parts.targets, chamber.targets);
+  const melt = runningOf(parts.melts, chamber.melts);
+  if (target !== undefined) setup.target = target;
+  if (melt !== undefined) setup.melt = melt;
+  if (parts.surface !== undefined) setup.surface = parts.surface;
+  if (parts.reactant !== undefined) setup.reactant = parts.reactant;
+  if (parts.ion !== undefined) setup.ion = parts.ion;
+  if (parts.backside !== undefined) setup.backside = parts.backside;
+  if (parts.feature !== undefined) setup.feature = parts.feature;
+  if (chamber.walls !== undefined) setup.walls = chamber.walls;
 }
 
 /** Lines with a flow; one that is set to nothing brings nothing. */
@@ -38,8 +45,9 @@ function flowingLines(names: readonly string[], givens: ReadonlyMap<string, Give
   const flowing: Line[] = [];
   for (const name of names) {
     const line = lines.get(name);
-    const given = givens.get(`flows.${name}`);
-    if (line !== undefined && (given === undefined || isOn(given))) flowing.push(line.line);
+    if (line === undefined) continue;
+    const given = givens.get(line.address);
+    if (given === undefined || isOn(given)) flowing.push(line.line);
   }
   return flowing;
 }
@@ -50,6 +58,11 @@ function gasesOf(lines: readonly Line[]): readonly string[] {
     for (const { gas } of brings) if (!gases.includes(gas)) gases.push(gas);
   }
   return gases;
+}
+
+/** Generators that deliver power. */
+function poweredOf(names: readonly string[], givens: ReadonlyMap<string, Given>): readonly string[] {
+  return names.length === 0 ? names : names.filter((name) => isOn(givens.get(`power.${name}`)));
 }
 
 function isOn(given: Given | undefined): boolean {

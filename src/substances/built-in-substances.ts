@@ -1,12 +1,20 @@
-// TEMPORARY until built-in/generated/data.ts is there
-import { readFileSync } from 'node:fs';
-import { readSubstances } from '../documents/read.ts';
-import { Source } from '../shelf/place.ts';
-import { siteSubstances } from './site-substances.ts';
+import { builtInAtom, builtInFilm, builtInGas, builtInIon, builtInNames, builtInWall } from '../documents/built-in.ts';
+import type { Placed } from '../documents/document.ts';
+import type { BlocksBySort, Sort, Substances } from './blocks.ts';
 
-const docs = ['gases', 'atoms', 'films'].flatMap((n) => {
-  const o = readSubstances(new Source(`built-in/${n}.yaml`, readFileSync(new URL(`../built-in/${n}.yaml`, import.meta.url), 'utf8')));
-  if (o.value === undefined) console.error(o.faults.slice(0, 3).map((f) => [f.place.line, f.found, f.right]));
-  return o.value === undefined ? [] : [o.value];
-});
-export const BUILT_IN_SUBSTANCES = siteSubstances(docs);
+/** The substances that the program knows without a site. */
+export const BUILT_IN_SUBSTANCES: Substances = {
+  find: (sort, name) => {
+    const block = FINDERS[sort](name);
+    return block === undefined ? undefined : { content: block.content, place: block.place([]) };
+  },
+  names: builtInNames,
+};
+
+const FINDERS: { readonly [S in Sort]: (name: string) => Placed<BlocksBySort[S]> | undefined } = {
+  gases: builtInGas,
+  atoms: builtInAtom,
+  films: builtInFilm,
+  ions: builtInIon,
+  walls: builtInWall,
+};

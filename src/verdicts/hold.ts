@@ -56,9 +56,12 @@ function sided(side: Limit['side'], grades: Grades, level: Level): readonly { le
   return value === undefined ? [] : [{ level, limit: { side, value } }];
 }
 
+/** A value that differs from its limit by no more than rounding lies on it. */
+const ROUNDING = 1e-9;
+
 function relate(value: number, uncertainty: number, { side, value: limit }: Limit): Relation {
   const good = side === 'at_most' ? limit - value : value - limit;
-  if (good >= uncertainty) return 'kept';
+  if (good >= uncertainty - ROUNDING * Math.abs(limit)) return 'kept';
   return good < -uncertainty ? 'crossed' : 'unsure';
 }
 

@@ -19,8 +19,9 @@ describe.each(filesOfLaws)('%s.ts', (file) => {
     }
   });
 
-  test.each(entries)('$name names its source', ({ source }) => {
+  test.each(entries)('$name names its source and says where it holds', ({ source, range }) => {
     expect(source ?? '').not.toBe('');
+    expect(range ?? '').not.toBe('');
   });
 
   test.each(entries)('$name gives its worked values to the printed digits', async (entry) => {

@@ -11,6 +11,8 @@ export interface Entry {
   readonly documented: readonly { readonly name: string; readonly unit: string | undefined }[];
   readonly returns: string | undefined;
   readonly source: string | undefined;
+  /** Where the law holds. */
+  readonly range: string | undefined;
   readonly examples: readonly Example[];
 }
 
@@ -49,6 +51,7 @@ function entry(file: string, name: string, parameters: string, comment: string):
     documented: tagged('param').map((line) => ({ name: line.split(' ')[0] ?? '', unit: unitIn(line) })),
     returns: tagged('returns').map(unitIn)[0],
     source: tagged('source')[0],
+    range: lines.find((line) => line.startsWith('Range: ')),
     examples: tagged('example').map((line) => example(line, name)),
   };
 }

@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { meanFreePath, mixtureMeanFreePath } from '../../src/physics/collisions.ts';
 import { mixtureMolarMass } from '../../src/physics/state.ts';
 import { diffusivityInMixture, mixtureThermalConductivity, mixtureViscosity } from '../../src/physics/transport.ts';
+import { between } from './values.ts';
 
 interface Gas {
   readonly share: number;
@@ -13,7 +14,6 @@ interface Gas {
   readonly speed: number;
 }
 
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const gas: fc.Arbitrary<Gas> = fc.record({
   share: between(0.01, 1),
   molarMass: between(0.002, 0.4),
@@ -104,14 +104,12 @@ describe('mixture laws', () => {
     );
   });
 
-  test('a mixture conducts neither more nor less than its gases do, up to Wilke’s excess', () => {
+  test('the molar mass of a mixture lies between those of its gases', () => {
     fc.assert(
       fc.property(gases, (mixture) => {
-        const { path, molarMass } = numbersOf(mixture);
         const masses = mixture.map((one) => one.molarMass);
-        expect(molarMass).toBeGreaterThanOrEqual(Math.min(...masses) * (1 - 1e-12));
-        expect(molarMass).toBeLessThanOrEqual(Math.max(...masses) * (1 + 1e-12));
-        expect(path).toBeGreaterThan(0);
+        expect(numbersOf(mixture).molarMass).toBeGreaterThanOrEqual(Math.min(...masses) * (1 - 1e-12));
+        expect(numbersOf(mixture).molarMass).toBeLessThanOrEqual(Math.max(...masses) * (1 + 1e-12));
       }),
     );
   });

@@ -2,9 +2,15 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { omega11 } from '../../src/physics/collision-integrals.ts';
 import { ATOMIC_MASS, BOLTZMANN, ELEMENTARY_CHARGE } from '../../src/physics/constants.ts';
-import { fastCrossSection, logReducedEnergy } from '../../src/physics/fast-collisions.ts';
+import {
+  fastCrossSection,
+  logReducedEnergy,
+  UNIVERSAL_CROSS_SECTION_RANGE,
+} from '../../src/physics/fast-collisions.ts';
 import {
   collisionsToThermalise,
+  EMISSION_CUT_AT_LEAST,
+  emissionCut,
   emissionEnergy,
   energyDecrement,
   fastFreePath,
@@ -14,9 +20,9 @@ import {
   uncollidedFraction,
   uncollidedFractionCosine,
 } from '../../src/physics/sputtered-atoms.ts';
+import { between } from './values.ts';
 
 const eV = ELEMENTARY_CHARGE;
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 
 /** Copper in argon, pair values of the built-in table rounded. */
 const copper = { molarMass: 0.063546, z: 29 };
@@ -52,6 +58,13 @@ describe('emission', () => {
   });
 });
 
+test('argon at 400 V opens copper’s spectrum far enough, at 30 V not', () => {
+  const enthalpy = 3.5 * eV;
+  const cut = (voltage: number) => emissionCut(argon.molarMass, copper.molarMass, voltage, enthalpy);
+  expect(cut(400) / enthalpy).toBeGreaterThan(EMISSION_CUT_AT_LEAST);
+  expect(cut(30) / enthalpy).toBeLessThan(EMISSION_CUT_AT_LEAST);
+});
+
 describe('fast collisions', () => {
   test('the cross-section above 0.1 eV leans half on that of the universal potential', () => {
     for (const energy of [1, 3, 10, 30]) {
@@ -59,6 +72,14 @@ describe('fast collisions', () => {
       const hard = Math.PI * 3.66e-10 ** 2 * omega11((energy * eV) / (3 * BOLTZMANN * 170));
       const middle = fastCrossSection(energy * eV, 3.66e-10, 170, 29, 18, 1);
       expect(Math.abs(middle / Math.sqrt(soft * hard) - 1)).toBeLessThan(0.015);
+    }
+  });
+
+  test('the energies of sputtered copper in argon lie within the fit of the universal potential', () => {
+    const { from, to } = UNIVERSAL_CROSS_SECTION_RANGE;
+    for (const energy of [0.1, 100]) {
+      expect(logReducedEnergy(energy * eV, 29, 18, 1)).toBeGreaterThan(from);
+      expect(logReducedEnergy(energy * eV, 29, 18, 1)).toBeLessThan(to);
     }
   });
 

@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process';
-import { chmodSync, linkSync, mkdirSync, openSync, closeSync, symlinkSync, truncateSync, writeFileSync } from 'node:fs';
+import { chmodSync, linkSync, mkdirSync, symlinkSync, truncateSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { describe, expect, test } from 'vitest';
 import { diskShelf } from '../../src/shelf/disk.ts';
@@ -256,10 +256,11 @@ describe('listing a folder', () => {
     expect(shelf.kind(`${folder}/absent`)).toBeUndefined();
   });
 
-  test('10,000 entries come sorted', () => {
+  test('10,000 entries come sorted', { timeout: 60_000 }, () => {
     const many = temporaryFolder();
+    write(many, { one: '' });
     mkdirSync(`${many}/many`);
-    for (let at = 0; at < 10_000; at += 1) closeSync(openSync(`${many}/many/${(at * 7919) % 10_000}.yaml`, 'w'));
+    for (let at = 0; at < 10_000; at += 1) linkSync(`${many}/one`, `${many}/many/${(at * 7919) % 10_000}.yaml`);
     const names = (shelf.list(`${many}/many`).value ?? []).map((entry) => entry.name);
     expect(names).toHaveLength(10_000);
     expect(names.every((name, at) => at === 0 || (names[at - 1] ?? '') < name)).toBe(true);

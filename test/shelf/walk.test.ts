@@ -165,6 +165,7 @@ describe('the site of a path', () => {
     expect(findSite(shelf, 'top/recipes/not-yet.yaml')).toBe('top/regimen.yaml');
     expect(findSite(shelf, 'c.yaml')).toBeUndefined();
     expect(findSite(shelf, '../elsewhere/x.yaml')).toBeUndefined();
+    expect(findSite(shelfOf('..odd/regimen.yaml'), '..odd/x/y.yaml')).toBe('..odd/regimen.yaml');
     expect(findSite(shelf, 'd/'.repeat(5000))).toBeUndefined();
   });
 

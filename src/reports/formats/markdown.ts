@@ -88,7 +88,7 @@ function drawEntries({ entries }: Entries): readonly string[] {
 function drawChain({ links }: Chain): readonly string[] {
   return links.flatMap(({ number, symbol, name, value, si, from, grounds, remarks }) => {
     const sources = [grounds, from.length === 0 ? '' : `from ${from.join(', ')}`, ...remarks].filter((text) => text !== '');
-    const named = name === symbol ? escaped(symbol) : `${escaped(symbol)} (${escaped(name)})`;
+    const named = name === '' ? `\`${symbol}\`` : `${escaped(symbol)} (${escaped(name)})`;
     return [`${number}. ${named} = ${escaped(value)}${si === undefined ? '' : ` = ${escaped(si)}`}`, ...sources.map((text) => `   ${escaped(text)}`)];
   });
 }
@@ -101,5 +101,5 @@ function escaped(text: string): string {
 const MARKS = /[\\`*<>[\]|]|(?<![A-Za-z0-9])_|_(?![A-Za-z0-9])/g;
 
 function inCell(text: string): string {
-  return escaped(text).replace(/\s+/g, ' ');
+  return escaped(text).replace(/\s+/g, ' ').trim();
 }

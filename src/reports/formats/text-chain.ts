@@ -5,7 +5,7 @@ import { padEnd, padStart, widthOf, wrap } from './wrap.ts';
 /** A derivation, one number after another: number, symbol, value; below it its name, what it is read from and by which law. */
 export function drawChain({ links }: Chain, canvas: Canvas): readonly string[] {
   const numbers = Math.max(0, ...links.map(({ number }) => String(number).length));
-  const symbols = Math.min(LONGEST_SYMBOL, Math.max(0, ...links.map(({ symbol }) => widthOf(symbol))));
+  const symbols = Math.min(LONGEST_SYMBOL, Math.max(0, ...links.map(({ symbol, name }) => (name === '' ? 0 : widthOf(symbol)))));
   return links.flatMap((link) => drawLink(link, { numbers, symbols }, canvas));
 }
 
@@ -17,13 +17,15 @@ function drawLink(link: Link, { numbers, symbols }: { numbers: number; symbols: 
   const indent = ' '.repeat(numbers + 2);
   const sources = from.length === 0 ? '' : `from ${from.join(', ')}`;
   const first = `${begin}${value}${si === undefined ? '' : `  = ${si}`}`;
-  const named = `${first}   ${name}`;
   const room = width - indent.length;
-  const head = widthOf(named) <= width ? [styles.strong(first) + named.slice(first.length)] : [styles.strong(first), ...wrap(name, room).map((line) => indent + line)];
-  const below = [grounds, sources].filter((text) => text !== '').join('; ');
+  // A given needs no more than a line: what it is, and where it stands.
+  const beside = name === '' ? grounds : name;
+  const named = beside === '' ? first : `${first}   ${beside}`;
+  const head = widthOf(named) <= width ? [styles.strong(first) + styles.faint(named.slice(first.length))] : [styles.strong(first), ...wrap(beside, room).map((line) => indent + styles.faint(line))];
+  const below = [name === '' ? '' : grounds, sources].filter((text) => text !== '').join('; ');
   return [
     ...head,
-    ...wrap(below, room).map((line) => indent + styles.faint(line)),
+    ...(below === '' ? [] : wrap(below, room)).map((line) => indent + styles.faint(line)),
     ...remarks.flatMap((remark) => wrap(remark, room).map((line) => indent + line)),
   ];
 }

@@ -31,6 +31,15 @@ export function drawText(blocks: readonly Block[], { width, colour }: TextOption
   return text;
 }
 
+/** What stands between two texts that follow each other: texts of one line each are a list. */
+export function gapBetween(before: string, after: string): string {
+  return before === '' || after === '' || (isOneLine(before) && isOneLine(after)) ? '' : '\n';
+}
+
+function isOneLine(text: string): boolean {
+  return text.indexOf('\n') >= text.length - 1;
+}
+
 function drawBlock(block: Block, canvas: Canvas): readonly string[] {
   switch (block.kind) {
     case 'heading':

@@ -10,20 +10,29 @@ import { printNumber } from '../../units/display.ts';
 import { listed, sentence } from '../words.ts';
 import { stepFacts } from './step-facts.ts';
 
+/** What the steps of one recipe have in common. */
+export interface Telling {
+  /** The recipe's. */
+  readonly file: string;
+  readonly shown: Shown;
+  /** Assumptions whose grounds were told at an earlier step: nobody reads them twice. */
+  readonly told: Set<string>;
+}
+
 /** One step: what it is set to, and what was found. */
-export function stepBlock({ run, verdicts }: JudgedStep, file: string, shown: Shown): StepBlock {
+export function stepBlock({ run, verdicts }: JudgedStep, telling: Telling): StepBlock {
   const { number, path, process, reason } = run.step;
-  const findings = findingsOf(run, verdicts, file, shown);
+  const findings = findingsOf(run, verdicts, telling);
   const passes = verdicts.filter(({ kind }) => kind === 'pass').length;
-  const told = findings.length > 0;
-  if (told && passes > 0) findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
+  const anything = findings.length > 0;
+  if (anything && passes > 0) findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
   return {
     kind: 'step',
     number,
     path,
     process,
-    ...stepFacts(run, shown),
-    outcome: told ? [] : [passes > 0 ? `pass ${passes}` : nothingJudged(reason)],
+    ...stepFacts(run, telling.shown),
+    outcome: anything ? [] : [passes > 0 ? `pass ${passes}` : nothingJudged(reason)],
     findings,
   };
 }
@@ -43,45 +52,53 @@ function nothingJudged(reason: string | undefined): string {
 }
 
 /** Findings, gravest first as the verdicts stand; what is open in one line; waived ones last. */
-function findingsOf(run: StepRun, verdicts: readonly Verdict[], file: string, shown: Shown): Finding[] {
+function findingsOf(run: StepRun, verdicts: readonly Verdict[], telling: Telling): Finding[] {
   const findings: Finding[] = [];
   for (const verdict of verdicts) {
     if (verdict.waived !== undefined || (verdict.kind !== 'fail' && verdict.kind !== 'review')) continue;
-    findings.push(finding(verdict, run, file, shown));
+    findings.push(finding(verdict, run, telling));
   }
   const open = verdicts.filter(({ kind, waived }) => kind === 'open' && waived === undefined);
-  if (open.length > 0) findings.push(openFinding(open, run, file));
-  for (const verdict of verdicts) if (verdict.waived !== undefined) findings.push(waivedFinding(verdict, run, file, shown));
+  if (open.length > 0) findings.push(openFinding(open, run, telling));
+  for (const verdict of verdicts) if (verdict.waived !== undefined) findings.push(waivedFinding(verdict, run, telling));
   return findings;
 }
 
-function finding(verdict: Verdict, run: StepRun, file: string, shown: Shown): Finding {
-  const { kind, level, instance, statement, remarks } = verdict;
+function finding(verdict: Verdict, run: StepRun, { file, shown, told }: Telling): Finding {
+  const { kind, level, instance } = verdict;
   const sentences: (Told | undefined)[] = [
     first(instance === undefined ? undefined : sentence(`worst ${instanceClause(instance, run, shown)}`)),
     first(groundsSentence(verdict, run, shown)),
     first(perhapsSentence(verdict, shown)),
-    detail(`Intended: ${statement}`),
-    ...assumedSentences(verdict, run, shown).map(detail),
-    ...remarks.map((remark) => detail(sentence(remark))),
+    ...(told.has(verdict.name) ? [] : standingSentences(verdict, run, shown)),
   ];
+  told.add(verdict.name);
   return {
     word: kind,
     level,
     lead: verdictClause(verdict, run, shown),
-    sentences: sentences.filter((told) => told !== undefined),
+    sentences: sentences.filter((one) => one !== undefined),
     where: whereOf([verdict], run, file),
   };
 }
 
+/** What holds for an assumption in whichever step it is judged. */
+function standingSentences(verdict: Verdict, run: StepRun, shown: Shown): readonly Told[] {
+  return [
+    detail(`Intended: ${verdict.statement}`),
+    ...assumedSentences(verdict, run, shown).map(detail),
+    ...verdict.remarks.map((remark) => detail(sentence(remark))),
+  ];
+}
+
 /** All that a step lacks, in one line. */
-function openFinding(open: readonly Verdict[], run: StepRun, file: string): Finding {
+function openFinding(open: readonly Verdict[], run: StepRun, { file }: Telling): Finding {
   const needs = [...new Set(open.flatMap(({ needs = [] }) => needs))];
   const numbers = [...new Set(open.map((verdict) => verdictNumber(verdict, run)))];
   return { word: 'open', lead: `${listed(numbers)}: needs ${listed(needs)}`, sentences: [], where: whereOf(open, run, file) };
 }
 
-function waivedFinding(verdict: Verdict, run: StepRun, file: string, shown: Shown): Finding {
+function waivedFinding(verdict: Verdict, run: StepRun, { file, shown }: Telling): Finding {
   const { kind, level, waived } = verdict;
   const grant = waived === undefined ? '' : `Waived until ${waived.until} by ${waived.approved_by}: ${waived.reason}`;
   return {

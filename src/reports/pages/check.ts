@@ -18,12 +18,13 @@ export interface Part extends Page {
   readonly counts: Counts;
 }
 
-/** One recipe, judged. It depends on nothing but that recipe. */
+/** One recipe, judged, with the faults of its document; those that judging found are in the judgement. It depends on nothing but that recipe. */
 export function checkPart(judgement: Judgement, faults: readonly Fault[], options: CheckOptions): Part {
   const shown = shownFor(judgement.run, options.units);
+  const all = [...faults, ...judgement.faults];
   return {
-    blocks: [...faultBlocks(faults), ...recipeBlocks(judgement, shown, options)],
-    counts: countJudgement(judgement, faults.length),
+    blocks: [...faultBlocks(all), ...recipeBlocks(judgement, shown, options)],
+    counts: countJudgement(judgement, all.length),
     sheet: () => checkSheet(judgement, shown),
   };
 }
@@ -59,10 +60,11 @@ function recipeHead({ run, steps }: Judgement, withOutcome: boolean): RecipeHead
 /** The steps, each cycle told before its first step that is told. */
 function withCycles(steps: readonly JudgedStep[], { run }: Judgement, shown: Shown): readonly (StepBlock | CycleBlock)[] {
   const open = new Set<string>();
+  const telling = { file: run.recipe.file, shown, told: new Set<string>() };
   return steps.flatMap((step) => {
     const entered = run.recipe.cycles.filter(({ path }) => !open.has(path) && step.run.step.path.startsWith(`${path}/`));
     for (const { path } of entered) open.add(path);
-    return [...entered.map((cycle) => cycleBlock(cycle)), stepBlock(step, run.recipe.file, shown)];
+    return [...entered.map((cycle) => cycleBlock(cycle)), stepBlock(step, telling)];
   });
 }
 

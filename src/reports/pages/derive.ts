@@ -1,9 +1,7 @@
 import type { Reference } from '../../quantities/reference.ts';
-import { referenceName } from '../../quantities/reference.ts';
 import type { Line, StepRun } from '../../quantities/run.ts';
 import type { Node } from '../../quantities/plan.ts';
 import { isDefault, type Given } from '../../steps/given.ts';
-import { quantityNamed } from '../../quantities/catalogue.ts';
 import { DIMENSIONS, type Dimension } from '../../units/dimensions.ts';
 import type { Judgement } from '../../verdicts/judgement.ts';
 import type { Verdict } from '../../verdicts/verdict.ts';
@@ -53,17 +51,17 @@ function linkOf(line: Line, numbers: ReadonlyMap<Node, number>, step: StepRun, s
   return {
     number: numbers.get(node) ?? 0,
     symbol: symbolOf(node),
-    name: nodeName(node, step),
+    name: given === undefined ? nodeName(node, step) : '',
     value,
     ...(si === undefined ? {} : { si }),
     from: node.inputs.flatMap((input) => numbers.get(input) ?? []),
-    grounds: given === undefined ? lawOf(line) : originOf(given),
+    grounds: given === undefined ? [lawOf(line), countsOf(node)].filter((text) => text !== '').join('; ') : originOf(given),
     remarks: remarks.map(sentence),
   };
 }
 
 function symbolOf(node: Node): string {
-  if (node.kind === 'given' || node.kind === 'constant') return node.name.split('.').at(-1) ?? node.name;
+  if (node.kind === 'given' || node.kind === 'constant') return node.name;
   return node.quantity?.symbol ?? node.name;
 }
 
@@ -73,13 +71,19 @@ function valueOf({ node, reading, uncertainty, given }: Line, shown: Shown): { v
   if (reading.kind === 'inapplicable') return { value: `does not apply: ${reading.because}` };
   if (given !== undefined) {
     const value = printGiven(shown, given, reading.value, true);
-    return { value, si: siText(reading.value, given.dimension) };
+    return { value, ...siOf(value, reading.value, given.dimension) };
   }
   const dimension = nodeDimension(node);
   const regime = bandOf(shown, nodeReference(node)?.id ?? '', reading.value);
   const whose = node.kind === 'choice' && reading.of !== undefined ? `, of ${reading.of}` : '';
   const value = `${print(shown, reading.value, dimension, shown.coverage * uncertainty)}${regime === undefined ? '' : ` (${regime})`}${whose}`;
-  return { value, si: siText(reading.value, dimension) };
+  return { value, ...siOf(value, reading.value, dimension) };
+}
+
+/** The value in SI, unless it was printed so. */
+function siOf(printed: string, value: number, dimension: Dimension): { si?: string } {
+  const si = siText(value, dimension);
+  return si === printed ? {} : { si };
 }
 
 function siText(value: number, dimension: Dimension): string {
@@ -96,6 +100,12 @@ function lawOf({ node }: Line): string {
   if (node.kind === 'choice') return `the ${node.quantity.worst ?? 'largest'} of ${listed(node.subjects)}`;
   if (node.quantity === undefined) return '';
   return node.quantity.source;
+}
+
+/** Counts that the formula of a substance fixes. */
+function countsOf({ inputs }: Node): string {
+  const counts = inputs.flatMap((input) => (input.kind === 'constant' ? [String(input.value)] : []));
+  return counts.length === 0 ? '' : `atoms counted ${listed(counts)}`;
 }
 
 function originOf({ origin }: Given): string {
@@ -132,9 +142,3 @@ function chainSheet(links: readonly Link[]): Sheet {
     rows: links.map(({ number, symbol, name, value, si = '', from, grounds }) => [String(number), symbol, name, value, si, from.join(' '), grounds]),
   };
 }
-
-export function knownNumber({ id }: Reference): boolean {
-  return quantityNamed(id) !== undefined;
-}
-
-export { referenceName };

@@ -31,7 +31,8 @@ function pressureOf({ step, givens }: StepRun, shown: Shown): string {
 /** A ramp with both its ends, a range by its usual value. */
 function spanned(given: Given, shown: Shown): string {
   if (given.span?.kind !== 'ramp') return printGiven(shown, given);
-  return `${printGiven(shown, given, given.span.from)} to ${printGiven(shown, given, given.span.to)}`;
+  const unit = shown.asked.get(given.dimension) ?? given.unit;
+  return `${printNumber(inUnit(shown, given.span.from, unit, given.dimension))} to ${printGiven(shown, given, given.span.to)}`;
 }
 
 /** Flows of one unit share it: `Ar 150, CHF3 40 sccm`. */

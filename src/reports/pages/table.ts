@@ -20,7 +20,7 @@ export function tablePage(run: Run, { units, columns = regimeColumns(run) }: Tab
 }
 
 /** Pressure, mean free path, the Knudsen number over each length that a step names, residence time and turnovers. */
-export function regimeColumns({ steps }: Run): readonly Reference[] {
+export function regimeColumns({ steps }: Pick<Run, 'steps'>): readonly Reference[] {
   const lengths = new Set(steps.flatMap(({ plan }) => quantityNamed('knudsen')?.lengths?.(plan.scope) ?? []));
   return [
     { id: 'gas-pressure' },
@@ -51,12 +51,28 @@ function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): rea
         { title: 'step', align: 'left' },
         ...columns.map((reference) => ({ title: columnTitle(reference), align: 'right' as const })),
       ],
-      rows: run.steps.map((step) => [String(step.step.number), step.step.path, ...columns.map((one) => cellOf(step, one, shown))]),
+      rows: rowsOf(run, columns, shown),
       key: 2,
     },
     { kind: 'sentence', weight: 'detail', text: `Uncertainties are expanded, k = ${printNumber(shown.coverage)}.` },
     ...(lacking === undefined ? [] : [{ kind: 'sentence' as const, weight: 'first' as const, text: lacking }]),
   ];
+}
+
+function rowsOf({ steps }: Run, columns: readonly Reference[], shown: Shown): readonly (readonly string[])[] {
+  const cells = columns.map((reference) => withBands(steps.map((step) => cellOf(step, reference, shown))));
+  return steps.map(({ step }, row) => [String(step.number), step.path, ...cells.map((column) => column[row] ?? '')]);
+}
+
+/** Cells of one column; behind aligned numbers the bands begin at one edge. */
+function withBands(cells: readonly Cell[]): readonly string[] {
+  const widest = Math.max(...cells.map(({ band }) => band.length));
+  return widest === 0 ? cells.map(({ text }) => text) : cells.map(({ text, band }) => (text === '' ? '' : `${text} ${band.padEnd(widest)}`));
+}
+
+interface Cell {
+  readonly text: string;
+  readonly band: string;
 }
 
 /** The number's own name, by which it can be asked for; a Knudsen number by its symbol. */
@@ -71,15 +87,14 @@ const SHORT: ReadonlyMap<string, string> = new Map([
   ['gas-temperature', 'temperature'],
 ]);
 
-function cellOf(step: StepRun, reference: Reference, shown: Shown): string {
+function cellOf(step: StepRun, reference: Reference, shown: Shown): Cell {
   const reading = step.read(reference);
-  if (reading.kind === 'missing') return 'open';
-  if (reading.kind === 'inapplicable') return '';
+  if (reading.kind === 'missing') return { text: 'open', band: '' };
+  if (reading.kind === 'inapplicable') return { text: '', band: '' };
   const expanded = shown.coverage * step.uncertainty(reference);
-  const regime = bandOf(shown, reference.id, reading.value);
   const text = print(shown, reading.value, dimensionOfNumber(reference), expanded);
   const whose = reading.of === undefined ? '' : ` (${reading.of})`;
-  return `${text}${regime === undefined ? '' : ` ${regime}`}${whose}`;
+  return { text: text + whose, band: bandOf(shown, reference.id, reading.value) ?? '' };
 }
 
 /** What would supply the numbers that are open, all at once. */

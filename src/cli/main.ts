@@ -1,0 +1,44 @@
+import { readCommandLine } from './command-line.ts';
+import { helpText } from './help.ts';
+import { standardOut } from './out.ts';
+import { failureOf } from './part.ts';
+import { tellFailure, tellProblem } from './tell.ts';
+import { VERSION } from './version.ts';
+import type { ExitCode } from './call.ts';
+import type { Asked } from './command-line.ts';
+import type { Out } from './out.ts';
+
+/** The command line from its words to the exit code. Only what the command needs is loaded. */
+export async function main(words: readonly string[]): Promise<void> {
+  const out = standardOut();
+  try {
+    process.exitCode = await answer(readCommandLine(words), out);
+  } catch (error) {
+    process.exitCode = tellFailure(out, failureOf(error), words.includes('--trace') || isSet('REGIMEN_TRACE'));
+  }
+}
+
+async function answer(asked: Asked, out: Out): Promise<ExitCode> {
+  switch (asked.kind) {
+    case 'version':
+      out.write(`${VERSION}\n`);
+      return 0;
+    case 'help':
+      out.write(helpText(asked.command));
+      return 0;
+    case 'problem':
+      return tellProblem(out, asked.problem);
+    case 'run': {
+      const { readOptions } = await import('./read-options.ts');
+      const { options, problem } = readOptions(asked.given);
+      if (problem !== undefined) return tellProblem(out, problem);
+      const run = await asked.command.load();
+      return run({ args: asked.args, options, out });
+    }
+  }
+}
+
+function isSet(name: string): boolean {
+  const { [name]: value = '' } = process.env;
+  return value !== '';
+}

@@ -1,0 +1,41 @@
+import { findSite } from '../shelf/find-site.ts';
+import { folderOf } from '../shelf/paths.ts';
+import { openSite } from '../steps/site.ts';
+import { processFaults } from '../verdicts/judge.ts';
+import type { Shelf } from '../shelf/shelf.ts';
+import type { Site } from '../steps/site.ts';
+import type { Outcome } from '../shelf/fault.ts';
+
+/** The sites that one run meets; each is opened once, and its faults are told the first time it is met. */
+export interface Sites {
+  /** The site of a recipe or folder. */
+  of(path: string): Outcome<Site>;
+  /** Those met so far. */
+  met(): readonly Site[];
+}
+
+/** The nearest site of each path, or, where `chosen` names one, that for all. */
+export function sitesOn(shelf: Shelf, chosen?: string): Sites {
+  const known = new Map<string, string | undefined>();
+  const open = new Map<string, Site>();
+  return {
+    of(path) {
+      const near = chosen ?? path;
+      const file = findSite(shelf, near, known);
+      const key = file ?? bareKey(shelf, near);
+      const before = open.get(key);
+      if (before !== undefined) return { value: before, faults: [] };
+      const { value, faults } = openSite(shelf, file ?? near);
+      if (value === undefined) return { faults };
+      open.set(key, value);
+      return { value, faults: [...faults, ...processFaults(value)] };
+    },
+    met: () => [...open.values()],
+  };
+}
+
+/** Without a site document each folder stands for itself. */
+function bareKey(shelf: Shelf, near: string): string {
+  return shelf.kind(near) === 'folder' ? near : folderOf(near);
+}
+
