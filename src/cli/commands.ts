@@ -1,9 +1,10 @@
-import type { Run } from './call.ts';
 import type { OptionName } from './options.ts';
 
-/** A command as its user sees it, and where to find what it does. */
+export type CommandName = 'check' | 'table' | 'derive' | 'gas' | 'list' | 'start';
+
+/** A command as its user sees it. */
 export interface Command {
-  readonly name: string;
+  readonly name: CommandName;
   /** What follows the name: `[PATH]...`. */
   readonly takes: string;
   /** Names of its arguments that must be there, in order. */
@@ -16,8 +17,6 @@ export interface Command {
   readonly says: readonly string[];
   readonly options: readonly OptionName[];
   readonly examples: readonly string[];
-  /** Loads what it does, and only that. */
-  readonly load: () => Promise<Run>;
 }
 
 const PATHS = 'PATH is a recipe, a folder of them or - for standard input; without one, the recipes of the site are taken.';
@@ -37,7 +36,6 @@ export const COMMANDS: readonly Command[] = [
     ],
     options: [...OUTPUT, 'block-at', 'unproven', 'site', 'at', 'jobs', 'today'],
     examples: ['regimen check', 'regimen check recipes/etch --block-at warning', 'regimen check --out report.md --out report.json'],
-    load: async () => (await import('./check.ts')).check,
   },
   {
     name: 'table',
@@ -48,7 +46,6 @@ export const COMMANDS: readonly Command[] = [
     says: ['Prints a table of numbers for every step of the recipes.', PATHS],
     options: [...OUTPUT, 'columns', 'site', 'at', 'jobs'],
     examples: ['regimen table liner.yaml', 'regimen table liner.yaml --columns pressure,knudsen.throw:target'],
-    load: async () => (await import('./table.ts')).table,
   },
   {
     name: 'derive',
@@ -62,7 +59,6 @@ export const COMMANDS: readonly Command[] = [
     ],
     options: [...OUTPUT, 'site', 'at'],
     examples: ['regimen derive liner.yaml titanium knudsen.throw:target', 'regimen derive liner.yaml 3 free-throw'],
-    load: async () => (await import('./derive.ts')).derive,
   },
   {
     name: 'gas',
@@ -73,7 +69,6 @@ export const COMMANDS: readonly Command[] = [
     says: ['Names with parts make one mixture (Ar=4 CF4=1), names without are listed one by one.'],
     options: ['temperature', 'pressure', ...OUTPUT, 'site'],
     examples: ['regimen gas Ar He', "regimen gas Ar=4 CF4=1 --pressure '30 mTorr'"],
-    load: async () => (await import('./gas.ts')).gas,
   },
   {
     name: 'list',
@@ -84,7 +79,6 @@ export const COMMANDS: readonly Command[] = [
     says: ['WHAT is quantities, processes, gases, films or units; what the site of the working folder adds is listed too.'],
     options: ['out', 'format', 'site'],
     examples: ['regimen list processes', 'regimen list gases'],
-    load: async () => (await import('./list.ts')).list,
   },
   {
     name: 'start',
@@ -95,7 +89,6 @@ export const COMMANDS: readonly Command[] = [
     says: ['Writes a site document, a chamber and a recipe that checks clean into FOLDER. Nothing that is there is overwritten.'],
     options: [],
     examples: ['regimen start my-line'],
-    load: async () => (await import('./start.ts')).start,
   },
 ];
 

@@ -8,7 +8,7 @@ import type { ExitCode } from './call.ts';
 import type { Asked } from './command-line.ts';
 import type { Out } from './out.ts';
 
-/** The command line from its words to the exit code. Only what the command needs is loaded. */
+/** The command line from its words to the exit code. What the commands do is loaded only for one of them. */
 export async function main(words: readonly string[]): Promise<void> {
   const out = standardOut();
   try {
@@ -29,11 +29,10 @@ async function answer(asked: Asked, out: Out): Promise<ExitCode> {
     case 'problem':
       return tellProblem(out, asked.problem);
     case 'run': {
-      const { readOptions } = await import('./read-options.ts');
+      const { readOptions, ...commands } = await import('./every-command.ts');
       const { options, problem } = readOptions(asked.given);
       if (problem !== undefined) return tellProblem(out, problem);
-      const run = await asked.command.load();
-      return run({ args: asked.args, options, out });
+      return commands[asked.command.name]({ args: asked.args, options, out });
     }
   }
 }

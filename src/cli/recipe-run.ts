@@ -9,7 +9,7 @@ import { AT_HAND, partsOf } from './parts.ts';
 import { findRecipes } from './recipe-files.ts';
 import { reportsOn } from './reports.ts';
 import { sitesOn } from './sites.ts';
-import { formatProblem, tellFailure, tellFault, tellProblem } from './tell.ts';
+import { formatProblem, tellFailure, tellProblem, tellUnwritten } from './tell.ts';
 import { toldPathFault } from './told-fault.ts';
 import type { Counts } from '../reports/counts.ts';
 import type { Call, Options } from './call.ts';
@@ -134,6 +134,6 @@ function nothingFound(args: readonly string[], { passedOver }: JobStream): { fou
 
 function finished(outputs: Outputs, { counts, whole }: RunResult, out: Out): RunResult {
   const faults = [...outputs.faults, ...outputs.finish(true)];
-  for (const fault of faults) tellFault(out, fault);
+  for (const fault of faults) tellUnwritten(out, fault);
   return { counts, whole: whole && faults.length === 0 };
 }

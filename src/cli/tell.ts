@@ -18,6 +18,12 @@ export function tellFault(out: Out, { place, found, right }: Fault): 2 {
   return 2;
 }
 
+/** A fault of a file that could not be written. */
+export function tellUnwritten(out: Out, { place, found, right }: Fault): 2 {
+  out.tell(`regimen: ${place.file}: ${found}; ${right}`);
+  return 2;
+}
+
 /** The program itself failed: one line, and where it did on request. */
 export function tellFailure(out: Out, { message, stack }: Failure, trace: boolean): 2 {
   out.tell(`regimen: a fault of the program: ${message.split('\n')[0] ?? ''}; ${REPORT}`);

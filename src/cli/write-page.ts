@@ -1,6 +1,6 @@
 import { drawHeader, drawPage } from './draw.ts';
 import { openOutputs } from './outputs.ts';
-import { tellFault } from './tell.ts';
+import { tellUnwritten } from './tell.ts';
 import type { Page } from '../reports/page.ts';
 import type { Call, ExitCode } from './call.ts';
 
@@ -12,6 +12,6 @@ export function writePage({ options, out }: Pick<Call, 'options' | 'out'>, page:
     else sink.write(drawHeader(page, style) + drawPage(page, style));
   }
   const faults = [...outputs.faults, ...outputs.finish(true)];
-  for (const fault of faults) tellFault(out, fault);
+  for (const fault of faults) tellUnwritten(out, fault);
   return faults.length === 0 ? 0 : 2;
 }

@@ -56,8 +56,8 @@ function reader<Content>(entries: ReadonlyMap<string, Entry>): (name: string) =>
 
 function placed<Content>([fileIndex, json]: Entry): Placed<Content> {
   const file = FILES[fileIndex] ?? '';
-  const root: Encoded = JSON.parse(json);
-  // The generator has read it as a document of which this is the content.
+  // The generator has read it as a document, and this is what it has made of its content.
+  const root = JSON.parse(json) as Encoded;
   const content = decoded(file, root) as Content;
   return { content, place: (pointer: Pointer) => encodedPlaceAt(file, root, pointer) };
 }

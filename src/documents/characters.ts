@@ -46,11 +46,11 @@ export function hasControl(text: string): boolean {
 
 const CARRIAGE_RETURN = 0x0d;
 
-/* eslint-disable no-control-regex -- control characters are what is looked for */
 const CONTROL = /[\0-\x08\x0b-\x1f\x7f-\x9f\u2028\u2029\u202a-\u202e\u2066-\u2069]/;
 const FORBIDDEN =
   /[\0-\x08\x0b\x0c\x0e-\x1f\x7f-\x9f\u00ad\u061c\u200b-\u200f\u2028-\u202e\u2060-\u2069\ufeff\ufff9-\ufffb]|\r(?!\n)/g;
-/* eslint-enable no-control-regex */
+
+const DIRECTION = /[\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069]/;
 const BEYOND_ASCII = /[\u0080-\uffff]/;
 const ODD_BLANK = /[\u00a0\u1680\u2000-\u200a\u202f\u205f\u3000]/g;
 const ODD_IN_KEY = /[\u00a0\u1680\u2000-\u200a\u202f\u205f\u3000\u2010-\u2015\u2212\uff01-\uff5e]/;
@@ -76,6 +76,7 @@ function characterName(code: number): string {
 function groupName(code: number): string {
   if (code < 0xa0) return 'a control character';
   if (code >= 0x2010 && code <= 0x2015) return 'a typographic dash';
+  if (DIRECTION.test(String.fromCharCode(code))) return 'a mark of writing direction';
   if (code >= 0xff01 && code <= 0xff5e) return 'a full-width character';
   if (ODD_IN_KEY.test(String.fromCharCode(code))) return 'a blank of another width';
   return 'an invisible character';

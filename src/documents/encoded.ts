@@ -72,7 +72,7 @@ function placeIn(file: string, place: number): Place {
 }
 
 function decodedMap(file: string, values: EncodedMap[2]): unknown {
-  const map: Record<string, unknown> = Object.create(null);
+  const map: Record<string, unknown> = { __proto__: null };
   for (const [key, value] of Object.entries(values)) map[key] = decoded(file, value);
   return map;
 }

@@ -16,7 +16,7 @@ function decimalComma(source: Source, previous: NodePair | undefined, pair: Node
   const after = keyText(pair);
   if (previous === undefined || !/^[0-9]/.test(after)) return undefined;
   const before = previous.value ?? previous.key;
-  const whole = isScalar(before) ? String(before.source) : '';
+  const whole = isScalar(before) ? before.source : '';
   if (!/[0-9]$/.test(whole) || source.text.charCodeAt(before.range[1]) !== COMMA) return undefined;
   const place = source.place(before.range[0], pair.key.range[1]);
   const digits = /^[0-9]+/.exec(after)?.[0] ?? '';

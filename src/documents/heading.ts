@@ -21,7 +21,11 @@ export function sortOfNodes(source: Source, root: ParsedNode): Sort | Fault {
   const sort = readHeading(isScalar(heading.value) ? heading.value.value : undefined);
   if (typeof sort !== 'string') return { place: nodePlace(source, writtenNode(heading.key, heading.value)), ...sort };
   if (heading === first) return sort;
-  return { place: nodePlace(source, heading.key), found: 'regimen is not the first key', right: 'make it the first line' };
+  return {
+    place: nodePlace(source, heading.key),
+    found: 'regimen is not the first key',
+    right: 'make it the first line',
+  };
 }
 
 function noHeading(source: Source, node: ParsedNode, key: string): Fault {

@@ -3,7 +3,7 @@ import { PLAN, ROOTS } from './generated/plan.ts';
 import { keyText, nodePlace, writtenNode } from './nodes.ts';
 import { readSingle } from './single-value.ts';
 import { isSpan, readSpan } from './span.ts';
-import { needed } from '../units/unit-fault.ts';
+import { needed, quoted } from '../units/unit-fault.ts';
 import type { ParsedNode, Scalar, YAMLMap, YAMLSeq } from 'yaml';
 import type { Fault } from '../shelf/fault.ts';
 import type { Source } from '../shelf/place.ts';
@@ -40,7 +40,14 @@ function readList(pass: Pass, list: YAMLSeq.Parsed, value: Value, plan: PlanNode
   });
 }
 
-function readNode(pass: Pass, at: ParsedNode, node: ParsedNode | null, old: Value, plan: PlanNode, name: string): Value {
+function readNode(
+  pass: Pass,
+  at: ParsedNode,
+  node: ParsedNode | null,
+  old: Value,
+  plan: PlanNode,
+  name: string,
+): Value {
   const { measure } = plan;
   if (measure === undefined || (node !== null && goesOn(node, plan))) {
     if (node !== null) readChildren(pass, node, old, plan, name);
@@ -55,11 +62,21 @@ function goesOn(node: ParsedNode, { keys, rest, items }: PlanNode): boolean {
   return isMap(node) && (keys !== undefined || rest !== undefined) && !isSpan(node);
 }
 
-function readValue(pass: Pass, at: ParsedNode, node: ParsedNode | null, measure: MeasurePlan, name: string): Value | undefined {
+function readValue(
+  pass: Pass,
+  at: ParsedNode,
+  node: ParsedNode | null,
+  measure: MeasurePlan,
+  name: string,
+): Value | undefined {
   if (isMap(node)) return readSpan(pass, node, measure, name);
   if (isScalar(node) && isText(node)) return readSingle(pass, node, measure, name);
-  const found = isSeq(node) ? 'a list' : isScalar(node) && node.value !== null ? 'yes or no' : 'no value';
-  pass.faults.push({ place: nodePlace(pass.source, at), found: `${name}: ${found}`, right: needed(measure.dimensions) });
+  const found = isSeq(node) ? 'a list' : isScalar(node) && node.value !== null ? quoted(node.source) : 'no value';
+  pass.faults.push({
+    place: nodePlace(pass.source, at),
+    found: `${name}: ${found}`,
+    right: needed(measure.dimensions),
+  });
   return undefined;
 }
 
@@ -67,7 +84,7 @@ function isText({ value }: Scalar.Parsed): boolean {
   return typeof value === 'string' || typeof value === 'number';
 }
 
-function isValueMap(value: Value): value is { [key: string]: Value } {
+function isValueMap(value: Value): value is Record<string, Value> {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
 

@@ -23,21 +23,26 @@ export interface Wording {
 /** What is wrong with a value, by the keyword of the rule that it breaks. */
 export function wrongValue(wrong: WrongValue): Wording {
   const { name, value, error, rules } = wrong;
-  const limit = String(error.params['limit']);
+  const limit = String(error.params.limit);
   switch (error.keyword) {
     case 'type':
       return wrongType(wrong);
     case 'enum':
-      return wrongChoice(wrong, listOf(error.params['allowedValues']));
+      return wrongChoice(wrong, listOf(error.params.allowedValues));
     case 'const':
-      return wrongChoice(wrong, [String(error.params['allowedValue'])]);
+      return wrongChoice(wrong, [String(error.params.allowedValue)]);
     case 'minLength':
       return { found: `${name}: an empty text`, right: `write some text${suchAs(rules)}` };
     case 'maxLength':
       return { found: `${name}: a text of more than ${limit} characters`, right: 'shorten it' };
     case 'minItems':
     case 'minProperties':
-      return { found: `${name}: ${kindOf(value)} of too few entries`, right: `at least ${limit} ${limit === '1' ? 'is' : 'are'} needed` };
+      if (limit === '1')
+        return {
+          found: `${name}: an empty ${Array.isArray(value) ? 'list' : 'map'}`,
+          right: 'write at least one entry',
+        };
+      return { found: `${name}: ${kindOf(value)} of too few entries`, right: `at least ${limit} are needed` };
     case 'maxItems':
     case 'maxProperties':
       return { found: `${name}: ${kindOf(value)} of too many entries`, right: `at most ${limit} can stand here` };
@@ -48,7 +53,10 @@ export function wrongValue(wrong: WrongValue): Wording {
     case 'maximum':
       return { found: `${name}: ${wrong.written}`, right: `a number of at most ${limit} is needed` };
     default:
-      return { found: `${name}: ${shown(wrong)}`, right: described(ruleFor(error.keyword, rules)) ?? `another value is needed${suchAs(rules)}` };
+      return {
+        found: `${name}: ${shown(wrong)}`,
+        right: described(ruleFor(error.keyword, rules)) ?? `another value is needed${suchAs(rules)}`,
+      };
   }
 }
 
@@ -69,7 +77,7 @@ export function described(rule: Rule | undefined): string | undefined {
 
 function wrongType(wrong: WrongValue): Wording {
   const { name, value, error, rules } = wrong;
-  const types = listOf(error.params['type']);
+  const types = listOf(error.params.type);
   const found = `${name}: ${shown(wrong)}`;
   if (types.length === 1 && types[0] === 'string' && (typeof value === 'number' || typeof value === 'boolean')) {
     return { found: `${name}: ${wrong.written} without quotes is ${kindOf(value)}`, right: inQuotes(wrong) };

@@ -40,7 +40,9 @@ export function mistakes(rejected: Rejected, errors: readonly SchemaError[]): Mi
     else present.push(presentFault(rejected, error, meant));
   }
   // A key that is missing because it is misspelt has been told.
-  const untold = absences.filter(({ instancePath, params }) => !meant.has(`${instancePath}/${text(params['missingProperty'])}`));
+  const untold = absences.filter(
+    ({ instancePath, params }) => !meant.has(`${instancePath}/${text(params.missingProperty)}`),
+  );
   const absent = untold.map((error) => absentFault(rejected, error));
   return { present, absent, more: Math.max(0, telling.length - MOST) };
 }
@@ -65,8 +67,14 @@ function presentFault(rejected: Rejected, error: SchemaError, meant: Set<string>
   return { place, ...wrongValue({ name: nameAt(pointer, sort), value, written, error, rules }) };
 }
 
-function unknownKey(rejected: Rejected, pointer: Pointer, error: SchemaError, rules: readonly Rule[], meant: Set<string>): Fault {
-  const key = text(error.params['additionalProperty']);
+function unknownKey(
+  rejected: Rejected,
+  pointer: Pointer,
+  error: SchemaError,
+  rules: readonly Rule[],
+  meant: Set<string>,
+): Fault {
+  const key = text(error.params.additionalProperty);
   const owner = pointer.reduce<Value | undefined>(childOf, rejected.content);
   const allowed = [...new Set(rules.flatMap(allowedKeys))];
   const free = allowed.filter((name) => childOf(owner, name) === undefined);
@@ -86,7 +94,12 @@ function allowedKeys({ properties = {} }: Rule): readonly string[] {
   });
 }
 
-function wrongName({ source, root, sort, content }: Rejected, pointer: Pointer, name: string, rules: readonly Rule[]): Fault {
+function wrongName(
+  { source, root, sort, content }: Rejected,
+  pointer: Pointer,
+  name: string,
+  rules: readonly Rule[],
+): Fault {
   const place = placeOf(source, root, [...pointer, name], 'key');
   const owner = pointer.reduce<Value | undefined>(childOf, content);
   const right = described(keyRule(rules)) ?? 'write a plain name';
@@ -101,7 +114,7 @@ function excluded({ source, root, sort }: Rejected, pointer: Pointer, rules: rea
 
 function absentFault({ source, root, sort, content }: Rejected, { instancePath, params }: SchemaError): Fault {
   const pointer = pointerOf(content, instancePath);
-  const key = text(params['missingProperty']);
+  const key = text(params.missingProperty);
   const owner = pointer.reduce<Value | undefined>(childOf, content);
   const place = placeOf(source, root, pointer, typeof pointer.at(-1) === 'string' ? 'key' : 'value');
   const found = `no ${key} in ${ownerName(owner, pointer, sort)}`;

@@ -6,7 +6,7 @@ export type NodePair = YAMLMap.Parsed['items'][number];
 
 /** A key's text. */
 export function keyText(pair: NodePair): string {
-  return isScalar(pair.key) ? String(pair.key.value ?? '') : '';
+  return isScalar(pair.key) && typeof pair.key.value === 'string' ? pair.key.value : '';
 }
 
 /** The value, or the key where nothing is written behind it: `pressure:` and the end of the line. */

@@ -23,7 +23,10 @@ const DECIMAL = /^[-+]?(?:(?:0|[1-9][0-9]*)(?:\.[0-9]*)?|\.[0-9]+)(?:[eE][-+]?[0
 
 function unusual(written: string, value: number): { readonly found: string; readonly right: string } {
   if (!Number.isFinite(value)) {
-    return { found: `${quoted(written)} is no measurable number`, right: 'write a finite number, or leave the key out' };
+    return {
+      found: `${quoted(written)} is no measurable number`,
+      right: 'write a finite number, or leave the key out',
+    };
   }
   const kind = /^[-+]?0[xo]/.test(written) ? 'is not a decimal number' : 'starts with a zero and is read in two ways';
   return { found: `${quoted(written)} ${kind}`, right: `write ${value}, or quotes around it where it is text` };

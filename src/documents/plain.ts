@@ -31,9 +31,9 @@ interface Reading {
 
 function nodeValue(reading: Reading, node: ParsedNode | null): Value {
   if (node === null) return null;
-  if (isAlias(node)) return refused(reading, node, `the alias *${node.source}`);
-  if (node.anchor !== undefined) refused(reading, node, `the anchor &${node.anchor}`);
-  if (node.tag !== undefined) refused(reading, node, 'a tag');
+  if (isAlias(node)) return refused(reading, node, '*', `the alias *${node.source}`);
+  if (node.anchor !== undefined) refused(reading, node, '&', `the anchor &${node.anchor}`);
+  if (node.tag !== undefined) refused(reading, node, '!', 'a tag');
   if (isScalar(node)) return scalarValue(reading, node);
   if (isMap(node)) return mapValue(reading, node);
   return isSeq(node) ? node.items.map((item) => nodeValue(reading, item)) : null;
@@ -56,8 +56,7 @@ function mapValue(reading: Reading, map: YAMLMap.Parsed): ValueMap {
 }
 
 function emptyMap(): ValueMap {
-  const map: ValueMap = Object.create(null);
-  return map;
+  return { __proto__: null };
 }
 
 function scalarValue({ source, faults }: Reading, node: Scalar.Parsed): Value {
@@ -65,7 +64,11 @@ function scalarValue({ source, faults }: Reading, node: Scalar.Parsed): Value {
   const fault = typeof value === 'number' ? numberFault(node.source, value) : undefined;
   if (fault !== undefined) faults.push({ place: nodePlace(source, node), ...fault });
   if (node.type === 'QUOTE_DOUBLE' && hasControl(node.source)) {
-    faults.push({ place: nodePlace(source, node), found: 'a control character written as an escape', right: 'remove it' });
+    faults.push({
+      place: nodePlace(source, node),
+      found: 'a control character written as an escape',
+      right: 'remove it',
+    });
   }
   return typeof value === 'string' || typeof value === 'number' || typeof value === 'boolean' ? value : null;
 }
@@ -84,7 +87,9 @@ function keyFault(reading: Reading, node: ParsedNode, key: string, first: Parsed
   }
   if (hasControl(key)) return { place, found: 'a key with a control character', right: 'write a plain name' };
   const odd = oddCharacter(key);
-  return odd === undefined ? undefined : { place, found: `${odd} in the key ${quoted(key)}`, right: 'write a plain character' };
+  return odd === undefined
+    ? undefined
+    : { place, found: `${odd} in the key ${quoted(key)}`, right: 'write a plain character' };
 }
 
 const REFUSED: ReadonlySet<string> = new Set(['__proto__', '<<', '']);
@@ -95,8 +100,10 @@ function firstKeys(map: YAMLMap.Parsed): ReadonlyMap<string, ParsedNode> {
   return firsts;
 }
 
-function refused({ source, faults }: Reading, node: ParsedNode, found: string): null {
+/** What stands before a node, from its sign on, is told with the node. */
+function refused({ source, faults }: Reading, node: ParsedNode, sign: string, found: string): null {
+  const start = source.text.lastIndexOf(sign, node.range[0]);
   const right = 'write the value itself, in quotes where it is text';
-  faults.push({ place: nodePlace(source, node), found, right });
+  faults.push({ place: source.place(start, node.range[1]), found, right });
   return null;
 }

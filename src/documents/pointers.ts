@@ -9,7 +9,12 @@ import type { Value } from './plain.ts';
 import type { Sort } from './sort.ts';
 
 /** Where the value that a pointer leads to stands, or its key; the last place on the way, where it leads past the end. */
-export function placeOf(source: Source, root: ParsedNode, pointer: Pointer, part: 'key' | 'value' = 'value'): TextPlace {
+export function placeOf(
+  source: Source,
+  root: ParsedNode,
+  pointer: Pointer,
+  part: 'key' | 'value' = 'value',
+): TextPlace {
   let node: ParsedNode | null = root;
   let key: ParsedNode = root;
   for (const step of pointer) {

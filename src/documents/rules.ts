@@ -31,14 +31,20 @@ export function rulesAt(sort: Sort, content: Value, pointer: Pointer): readonly 
   let rules = expanded([referred(`${sort}.json#`)], value);
   for (const step of pointer) {
     value = childOf(value, step);
-    rules = expanded(rules.flatMap((rule) => below(rule, step)), value);
+    rules = expanded(
+      rules.flatMap((rule) => below(rule, step)),
+      value,
+    );
   }
   return rules;
 }
 
 /** The rule for the keys of a map, where it has one. */
 export function keyRule(rules: readonly Rule[]): Rule | undefined {
-  const all = expanded(rules.flatMap((rule) => asRules(rule.propertyNames)), '');
+  const all = expanded(
+    rules.flatMap((rule) => asRules(rule.propertyNames)),
+    '',
+  );
   return all.find(({ description }) => description !== undefined);
 }
 
@@ -48,18 +54,14 @@ export function childOf(value: Value | undefined, step: string | number): Value 
   return isOwn(value, String(step)) ? value[step] : undefined;
 }
 
-let schemas: Readonly<Record<string, Readonly<Record<string, unknown>>>> | undefined;
+let schemas: unknown;
 
 function referred(reference: string): Rule {
-  schemas ??= readSchemas();
+  schemas ??= JSON.parse(SCHEMAS);
   const [file = '', pointer = ''] = reference.split('#');
-  let node: unknown = schemas[file];
-  for (const step of pointer.split('/').slice(1)) node = isRecord(node) ? node[step] : undefined;
+  let node: unknown = schemas;
+  for (const step of [file, ...pointer.split('/').slice(1)]) node = isRecord(node) ? node[step] : undefined;
   return isRecord(node) ? node : {};
-}
-
-function readSchemas(): Readonly<Record<string, Readonly<Record<string, unknown>>>> {
-  return JSON.parse(SCHEMAS);
 }
 
 function below(rule: Rule, step: string | number): readonly Rule[] {
@@ -93,7 +95,9 @@ function holds(condition: Rule | boolean, value: Value | undefined): boolean {
   if ('const' in condition && condition.const !== value) return false;
   if (condition.required?.some((key) => !isOwn(value, key)) === true) return false;
   if (condition.anyOf?.some((one) => holds(one, value)) === false) return false;
-  return Object.entries(condition.properties ?? {}).every(([key, rule]) => !isOwn(value, key) || holds(rule, value[key]));
+  return Object.entries(condition.properties ?? {}).every(
+    ([key, rule]) => !isOwn(value, key) || holds(rule, value[key]),
+  );
 }
 
 function typeOf(value: Value | undefined): string {
@@ -101,7 +105,7 @@ function typeOf(value: Value | undefined): string {
   return value === null ? 'null' : typeof value;
 }
 
-function isOwn(value: Value | undefined, key: string): value is { [key: string]: Value } {
+function isOwn(value: Value | undefined, key: string): value is Record<string, Value> {
   return typeof value === 'object' && value !== null && !Array.isArray(value) && Object.hasOwn(value, key);
 }
 

@@ -25,7 +25,9 @@ export function readSingle(
 export function readFixed(pass: Pass, node: Scalar.Parsed, plan: MeasurePlan, name: string): Fixed | undefined {
   const place = nodePlace(pass.source, node);
   const measure = readMeasure(node.source, plan.dimensions, plan.tolerance === true ? WITH_TOLERANCE : ALONE);
-  const fault = isUnitFault(measure) ? (wordFault(node.source, plan) ?? measure) : countFault(node.source, plan, measure.value);
+  const fault = isUnitFault(measure)
+    ? (wordFault(node.source, plan) ?? measure)
+    : countFault(node.source, plan, measure.value);
   if (fault !== undefined) pass.faults.push({ place, found: `${name}: ${fault.found}`, right: fault.right });
   return isUnitFault(measure) || fault !== undefined ? undefined : { kind: 'fixed', measure, place };
 }
@@ -37,7 +39,8 @@ function accuracy(pass: Pass, node: Scalar.Parsed, plan: MeasurePlan, name: stri
   const place = nodePlace(pass.source, node);
   const tolerance = readAccuracy(node.source, plan.dimensions[0]);
   if (!isUnitFault(tolerance)) return { kind: 'accuracy', tolerance, place };
-  pass.faults.push({ place, found: `${name}: ${tolerance.found}`, right: tolerance.right });
+  const fault = wordFault(node.source, plan) ?? tolerance;
+  pass.faults.push({ place, found: `${name}: ${fault.found}`, right: fault.right });
   return undefined;
 }
 
@@ -61,7 +64,8 @@ interface Wrong {
 }
 
 function countFault(text: string, { whole, least }: MeasurePlan, value: number): Wrong | undefined {
-  if (whole === true && !Number.isInteger(value)) return { found: `${quoted(text)} is no whole number`, right: 'a whole number is needed' };
+  if (whole === true && !Number.isInteger(value))
+    return { found: `${quoted(text)} is no whole number`, right: 'a whole number is needed' };
   if (least === undefined || value >= least) return undefined;
   return { found: quoted(text), right: `a number of at least ${least} is needed` };
 }

@@ -45,7 +45,7 @@ const HEADING = /^\s*\{?\s*["']?regimen["']?\s*:(?:\s+["']?([a-z]*)|$)/;
 
 /** The first line that is not blank, a comment, a directive or the mark of a document's start. */
 function firstLine(text: string): string | undefined {
-  for (let start = text.startsWith('\uFEFF') ? 1 : 0; start < text.length; ) {
+  for (let start = text.startsWith('\uFEFF') ? 1 : 0; start < text.length;) {
     const end = text.indexOf('\n', start);
     const line = text.slice(start, Math.min(end === -1 ? text.length : end, start + LONGEST_LINE));
     if (!PASSED_OVER.test(line)) return line;

@@ -19,9 +19,18 @@ export function readSpan(pass: Pass, map: YAMLMap.Parsed, plan: MeasurePlan, nam
     pass.faults.push({ place: nodePlace(pass.source, map), found: `${name}: ${found}`, right });
   };
   const ramp = map.items.some((pair) => keyText(pair) === 'from' || keyText(pair) === 'to');
-  if ((plan.ramp !== true && plan.range !== true) || !isNearSpan(map)) return wrong('a map', needed(plan.dimensions));
-  if (ramp && plan.ramp !== true) return wrong('a ramp cannot stand here', `one value, or ${RANGE_KEYS.join(', ')}`);
-  if (!ramp && plan.range !== true) return wrong('a range cannot stand here', 'one value, or from and to');
+  if (!isNearSpan(map)) {
+    wrong('a map', needed(plan.dimensions));
+    return;
+  }
+  if (ramp && plan.ramp !== true) {
+    wrong('a ramp cannot stand here', needed(plan.dimensions));
+    return;
+  }
+  if (!ramp && plan.range !== true) {
+    wrong('a range cannot stand here', needed(plan.dimensions));
+    return;
+  }
   const values = readValues(pass, map, plan, name, ramp ? RAMP_KEYS : RANGE_KEYS);
   if (values === undefined) return undefined;
   return ramp ? toRamp(pass, map, values, name, wrong) : toRange(pass, map, values, wrong);
@@ -38,7 +47,13 @@ type Wrong = (found: string, right: string) => undefined;
 type Values = ReadonlyMap<string, Fixed>;
 
 /** The values of a span by key; undefined where one of them, or a key, is wrong. */
-function readValues(pass: Pass, map: YAMLMap.Parsed, plan: MeasurePlan, name: string, keys: readonly string[]): Values | undefined {
+function readValues(
+  pass: Pass,
+  map: YAMLMap.Parsed,
+  plan: MeasurePlan,
+  name: string,
+  keys: readonly string[],
+): Values | undefined {
   const values = new Map<string, Fixed>();
   let sound = true;
   for (const pair of map.items) {
@@ -75,9 +90,13 @@ function toRamp(pass: Pass, map: YAMLMap.Parsed, values: Values, name: string, w
   if (over === undefined) return undefined;
   if (from === undefined || to === undefined) {
     const missing = from === undefined ? 'from' : 'to';
-    return wrong(`a ramp without ${missing}`, `add ${missing}`);
+    wrong(`a ramp without ${missing}`, `add ${missing}`);
+    return;
   }
-  if (from.measure.dimension !== to.measure.dimension) return wrong('a ramp between values of two kinds', `give ${name} in units of one kind`);
+  if (from.measure.dimension !== to.measure.dimension) {
+    wrong('a ramp between values of two kinds', `give ${name} in units of one kind`);
+    return;
+  }
   return { kind: 'ramp', from, to, over, place: nodePlace(pass.source, map) };
 }
 
@@ -87,7 +106,11 @@ function overOf(pass: Pass, map: YAMLMap.Parsed): 'step' | 'laps' | undefined {
   const value = isScalar(pair.value) ? pair.value.value : undefined;
   if (value === 'step' || value === 'laps') return value;
   const found = typeof value === 'string' ? `over: ${quoted(value)}` : 'over: no word';
-  pass.faults.push({ place: nodePlace(pass.source, writtenNode(pair.key, pair.value)), found, right: 'write step or laps' });
+  pass.faults.push({
+    place: nodePlace(pass.source, writtenNode(pair.key, pair.value)),
+    found,
+    right: 'write step or laps',
+  });
   return undefined;
 }
 
@@ -97,13 +120,23 @@ function toRange(pass: Pass, map: YAMLMap.Parsed, values: Values, wrong: Wrong):
   const most = values.get('at_most');
   const inOrder = [least, usually, most].filter((value) => value !== undefined);
   if (usually === undefined && (least === undefined || most === undefined)) {
-    return wrong('a range without usually', least === most ? 'add usually, at_least and at_most' : 'add usually, or both limits');
+    wrong(
+      'a range without usually',
+      least === most ? 'add usually, at_least and at_most' : 'add usually, or both limits',
+    );
+    return;
   }
   for (const [index, value] of inOrder.entries()) {
     const before = inOrder[index - 1];
     if (before === undefined) continue;
-    if (before.measure.dimension !== value.measure.dimension) return wrong('a range of values of two kinds', 'give it in units of one kind');
-    if (before.measure.value > value.measure.value) return wrong('a range that is not in order', 'at_least is the lowest, at_most the highest');
+    if (before.measure.dimension !== value.measure.dimension) {
+      wrong('a range of values of two kinds', 'give it in units of one kind');
+      return;
+    }
+    if (before.measure.value > value.measure.value) {
+      wrong('a range that is not in order', 'at_least is the lowest, at_most the highest');
+      return;
+    }
   }
   return {
     kind: 'range',

@@ -11,11 +11,12 @@ export function syntaxFaults(source: Source, errors: readonly YAMLError[]): read
   const faults: Fault[] = [];
   let line = 0;
   for (const error of inOrder) {
-    const place = source.place(error.pos[0], error.pos[1]);
+    const start = startOf(source.text, error);
+    const place = source.place(start, Math.max(start + 1, error.pos[1]));
     if (place.line === line) continue;
     const passing = isPassing(source.text, error);
     if (!passing && faults.length > 0) break;
-    faults.push({ place, ...wording(source.text, error) });
+    faults.push({ place, ...wording(source.text, start, error) });
     if (!passing) break;
     line = place.line;
   }
@@ -32,15 +33,53 @@ function isPassing(text: string, error: YAMLError): boolean {
   return PASSING.has(error.code);
 }
 
-const PASSING: ReadonlySet<string> = new Set(['BAD_SCALAR_START', 'TAG_RESOLVE_FAILED', 'BAD_DQ_ESCAPE', 'BLOCK_IN_FLOW']);
+const PASSING: ReadonlySet<string> = new Set([
+  'BAD_SCALAR_START',
+  'TAG_RESOLVE_FAILED',
+  'BAD_DQ_ESCAPE',
+  'BLOCK_IN_FLOW',
+]);
 
 const QUOTES = 'put the text in quotes';
 
-function wording(text: string, { code, pos, message }: YAMLError): Wording {
+/** What is not closed is told where it opens, all else at its first character. */
+function startOf(text: string, { pos, message }: YAMLError): number {
   const [start] = pos;
+  const quote = /Missing closing (["'])/.exec(message)?.[1];
+  if (quote !== undefined) return openingQuote(text, start, quote);
+  const bracket = /end with a ([}\]])/.exec(message)?.[1];
+  if (bracket !== undefined) return openingBracket(text, start);
+  let first = start;
+  while (text[first] === ' ') first += 1;
+  return first;
+}
+
+/** The last quote that neither is escaped by a backslash nor stands for one within single quotes. */
+function openingQuote(text: string, end: number, quote: string): number {
+  let at = text.lastIndexOf(quote, end - 1);
+  while (at > 0 && (text[at - 1] === '\\' || (quote === "'" && text[at - 1] === quote))) {
+    at = text.lastIndexOf(quote, text[at - 1] === quote ? at - 2 : at - 1);
+  }
+  return Math.max(0, at);
+}
+
+function openingBracket(text: string, end: number): number {
+  let closed = 0;
+  for (let at = end - 1; at >= 0; at -= 1) {
+    const character = text.charAt(at);
+    if (character === '}' || character === ']') closed += 1;
+    if (character !== '{' && character !== '[') continue;
+    if (closed === 0) return at;
+    closed -= 1;
+  }
+  return end;
+}
+
+function wording(text: string, start: number, { code, message }: YAMLError): Wording {
   const rest = lineFrom(text, start);
   switch (code) {
     case 'BLOCK_AS_IMPLICIT_KEY':
+      if (/^-\s/.test(rest)) return listEntry;
       return hasColon(rest) ? colonInText : deeperLine;
     case 'BLOCK_IN_FLOW':
       return colonInText;
@@ -57,7 +96,10 @@ function wording(text: string, { code, pos, message }: YAMLError): Wording {
     case 'TAB_AS_INDENT':
       return { found: 'a tab in the indentation', right: 'indent with blanks' };
     case 'BAD_DQ_ESCAPE':
-      return { found: `the escape ${firstWord(rest).slice(0, 2)} in a quoted text`, right: 'write \\\\ for a backslash, or use single quotes' };
+      return {
+        found: `the escape ${firstWord(rest).slice(0, 2)} in a quoted text`,
+        right: 'write \\\\ for a backslash, or use single quotes',
+      };
     case 'BAD_INDENT':
       return badIndent(text, start, message);
     case 'MULTILINE_IMPLICIT_KEY':
@@ -74,6 +116,7 @@ function wording(text: string, { code, pos, message }: YAMLError): Wording {
 }
 
 const colonInText: Wording = { found: 'a colon and a blank within a text', right: QUOTES };
+const listEntry: Wording = { found: 'a list entry where a key is wanted', right: 'indent the list below its key' };
 const deeperLine: Wording = {
   found: 'a value, and below it a line that is indented deeper',
   right: 'align the lines of one map, or leave the value behind the colon out',
@@ -98,7 +141,7 @@ function unclosed(bracket: string): Wording {
 }
 
 function withoutColon(rest: string): Wording {
-  if (/^-\s/.test(rest)) return { found: 'a list entry where a key is wanted', right: 'indent the list below its key' };
+  if (/^-\s/.test(rest)) return listEntry;
   const tight = /^([A-Za-z_][\w.-]*):(?=\S)/.exec(rest)?.[1];
   return tight === undefined
     ? { found: `${shortened(rest)} without a colon`, right: 'write a key, a colon and a value' }
@@ -111,9 +154,11 @@ function missingCharacter(rest: string, message: string): Wording {
   const bracket = /end with a ([}\]])/.exec(message)?.[1];
   if (bracket !== undefined) return unclosed(bracket);
   if (message.startsWith('Comments')) return { found: 'a # right behind a value', right: 'put a blank before the #' };
-  if (message.includes('Sequence item')) return { found: 'a line that is indented otherwise than those above', right: 'align the keys of a map' };
+  if (message.includes('Sequence item'))
+    return { found: 'a line that is indented otherwise than those above', right: 'align the keys of a map' };
   if (message.includes('followed by map values')) return withoutColon(rest);
-  if (message.includes('Missing ,')) return { found: `${shortened(rest)} within braces or brackets`, right: 'put a comma between two entries' };
+  if (message.includes('Missing ,'))
+    return { found: `${shortened(rest)} within braces or brackets`, right: 'put a comma between two entries' };
   return unexpected(rest, message);
 }
 
@@ -121,7 +166,8 @@ function unexpected(rest: string, message: string): Wording {
   if (message.includes('Block scalar header')) {
     return { found: 'text behind | or >', right: 'start the text on the next line' };
   }
-  if (message.includes('at node end')) return { found: `${shortened(rest)} behind a closed value`, right: 'quote the whole text' };
+  if (message.includes('at node end'))
+    return { found: `${shortened(rest)} behind a closed value`, right: 'quote the whole text' };
   if (message.includes('empty item') || message.includes('Unexpected ,')) {
     return { found: 'a comma without a value before it', right: 'remove the comma' };
   }

@@ -8,7 +8,7 @@ import type { Fault, Outcome } from '../shelf/fault.ts';
 import type { Source } from '../shelf/place.ts';
 
 /** Collections within collections; deeper ones exhaust the stack of whatever walks them. */
-export const DEEPEST = 64;
+const DEEPEST = 64;
 
 /** The nodes of a YAML text: one document, without directives, not nested too deep, without errors of syntax. */
 export function readNodes(source: Source): Outcome<ParsedNode> {

@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { chmodSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { build } from 'esbuild';
-import type { Metafile } from 'esbuild';
+import type { Metafile, Plugin } from 'esbuild';
 
 /*
  * `npm run build`: everything that the package ships, in dist/. What the program needs of other packages is bundled into it,
@@ -18,6 +18,12 @@ const ENTRIES = {
   index: 'src/index.ts',
 };
 
+/** Of these packages the variants for any platform: they are ES modules throughout, and ask the system for nothing when loaded. */
+const ALIASES = {
+  yaml: './node_modules/yaml/browser/dist/index.js',
+  '#supports-color': './node_modules/chalk/source/vendor/supports-color/browser.js',
+};
+
 /** The command itself: as little as can be, so that all else can be loaded when it is known what is wanted. */
 const COMMAND = `#!/usr/bin/env node
 import { main } from './main.js';
@@ -26,7 +32,7 @@ await main(process.argv.slice(2));
 
 async function buildAll(): Promise<void> {
   rmSync(DIST, { recursive: true, force: true });
-  const types = writeTypes();
+  const types = process.env.FAST ? undefined : writeTypes();
   writeLicences(await bundle());
   writeFileSync(join(DIST, 'regimen.js'), COMMAND);
   chmodSync(join(DIST, 'regimen.js'), 0o755);
@@ -38,6 +44,8 @@ async function bundle(): Promise<Metafile> {
     entryPoints: ENTRIES,
     outdir: DIST,
     chunkNames: 'part-[hash]',
+    alias: ALIASES,
+    plugins: [requiredBuiltIns],
     bundle: true,
     splitting: true,
     format: 'esm',
@@ -51,6 +59,17 @@ async function bundle(): Promise<Metafile> {
   });
   return metafile;
 }
+
+/** Modules of Node that a bundled package asks for by `require`, which an ES module does not have, are imported instead. */
+const requiredBuiltIns: Plugin = {
+  name: 'required-built-ins',
+  setup({ onResolve, onLoad }) {
+    onResolve({ filter: /^node:/ }, ({ path, kind }) => (kind === 'require-call' ? { path, namespace: 'required' } : undefined));
+    onLoad({ filter: /./, namespace: 'required' }, ({ path }) => ({
+      contents: path === 'node:process' ? 'module.exports = globalThis.process;' : `export * from '${path}';`,
+    }));
+  },
+};
 
 /** Declarations of the library face and of all that it names. */
 function writeTypes(): Promise<void> {

@@ -14,7 +14,12 @@ const MAPS = ['gases', 'atoms', 'films', 'ions', 'walls'] as const;
 export function dataModule(folder: string): string {
   const documents = [...filesOf(folder, ''), ...filesOf(folder, 'processes')].map((path) => readFile(folder, path));
   const files = documents.map(({ source }) => source.file);
-  const maps = MAPS.map((map) => mapCode(map, documents.flatMap((document, file) => substancesOf(document, file, map))));
+  const maps = MAPS.map((map) =>
+    mapCode(
+      map,
+      documents.flatMap((document, file) => substancesOf(document, file, map)),
+    ),
+  );
   const processes = mapCode('processes', documents.flatMap(processOf));
   const list = files.map((file) => `  ${quotedText(file)},\n`).join('');
   return `${HEAD}export const FILES: readonly string[] = [\n${list}];\n\n${[...maps, processes].join('\n')}`;
@@ -37,7 +42,9 @@ function filesOf(folder: string, room: string): readonly string[] {
 function readFile(folder: string, path: string): AnyDocument {
   const { value, faults } = readDocument(new Source(`built-in/${path}`, readFileSync(join(folder, path), 'utf8')));
   if (value !== undefined) return value;
-  const lines = faults.map(({ place, found, right }) => `${place.file}:${place.line}:${place.column} ${found}; ${right}`);
+  const lines = faults.map(
+    ({ place, found, right }) => `${place.file}:${place.line}:${place.column} ${found}; ${right}`,
+  );
   throw new Error(lines.join('\n'));
 }
 
@@ -55,7 +62,9 @@ function mapCode(map: string, entries: readonly Named[]): string {
   const names = entries.map(([name]) => name);
   const twice = names.find((name, index) => names.indexOf(name) !== index);
   if (twice !== undefined) throw new Error(`${map}: ${twice} stands there twice`);
-  const lines = entries.map(([name, file, value]) => `  [${quotedText(name)}, [${file}, ${quotedText(JSON.stringify(value))}]],\n`);
+  const lines = entries.map(
+    ([name, file, value]) => `  [${quotedText(name)}, [${file}, ${quotedText(JSON.stringify(value))}]],\n`,
+  );
   return `export const ${map.toUpperCase()}: ReadonlyMap<string, Entry> = new Map<string, Entry>([\n${lines.join('')}]);\n`;
 }
 
@@ -67,9 +76,13 @@ function encode(document: AnyDocument, value: unknown, pointer: Pointer): Encode
     const entries = value.map((one, index) => encode(document, one, [...pointer, index]));
     return [placeIn(document, pointer, 'key'), 'list', entries];
   }
-  if (typeof value !== 'object' || value === null) throw new Error(`${document.source.file}: ${pointer.join('.')} is empty`);
+  if (typeof value !== 'object' || value === null)
+    throw new Error(`${document.source.file}: ${pointer.join('.')} is empty`);
   if (isRead(value)) return encodeRead(value);
-  const values = Object.entries(value).map(([key, one]): [string, Encoded] => [key, encode(document, one, [...pointer, key])]);
+  const values = Object.entries(value).map(([key, one]): [string, Encoded] => [
+    key,
+    encode(document, one, [...pointer, key]),
+  ]);
   return [placeIn(document, pointer, 'key'), 'map', Object.fromEntries(values)];
 }
 
@@ -90,7 +103,9 @@ function encodeRead(value: Read): Encoded {
   const place = encodedPlace(value.place.line, value.place.column);
   if (value.kind === 'fixed') return encodeFixed(value);
   if (value.kind !== 'range') return [place, 'word', value.kind];
-  const [usually, least, most] = [value.usually, value.at_least, value.at_most].map((end) => (end === undefined ? 0 : encodeFixed(end)));
+  const [usually, least, most] = [value.usually, value.at_least, value.at_most].map((end) =>
+    end === undefined ? 0 : encodeFixed(end),
+  );
   return [place, 'range', usually ?? 0, least ?? 0, most ?? 0];
 }
 

@@ -1,4 +1,5 @@
-import { isMap, referred, SORTS } from './schemas.ts';
+import { isList, isMap, referred } from './schemas.ts';
+import { SORTS } from '../documents/sort.ts';
 import { isDimension } from '../units/dimensions.ts';
 import type { Json, JsonMap, Located } from './schemas.ts';
 import type { MeasurePlan, PlanNode } from '../documents/measure-plan.ts';
@@ -10,8 +11,13 @@ export function planModule(schemas: Schemas): string {
   const planner = new Map<string, number>();
   const nodes: PlanNode[] = [];
   const roots = SORTS.map((sort) => [sort, planOf(schemas, [located(schemas, `${sort}.json`)], planner, nodes)]);
-  const kept = pruned(nodes, roots.map(([, index]) => Number(index)));
-  const rootLines = roots.map(([sort, index]) => `  ${String(sort)}: ${kept.indices.get(Number(index)) ?? 0},\n`).join('');
+  const kept = pruned(
+    nodes,
+    roots.map(([, index]) => Number(index)),
+  );
+  const rootLines = roots
+    .map(([sort, index]) => `  ${String(sort)}: ${kept.indices.get(Number(index)) ?? 0},\n`)
+    .join('');
   const nodeLines = kept.nodes.map((node) => `  ${JSON.stringify(node)},\n`).join('');
   return `${HEAD}export const ROOTS: Readonly<Record<Sort, number>> = {\n${rootLines}};\n
 export const PLAN: readonly PlanNode[] = [\n${nodeLines}];\n`;
@@ -30,7 +36,10 @@ function located(schemas: Schemas, file: string): Located {
 /** Index of the node for a place that all these schemas describe, whichever branches a value takes. */
 function planOf(schemas: Schemas, start: readonly Located[], known: Map<string, number>, nodes: PlanNode[]): number {
   const applied = closure(schemas, start);
-  const name = applied.map((one) => identity(one)).sort().join(' ');
+  const name = applied
+    .map((one) => identity(one))
+    .sort()
+    .join(' ');
   const old = known.get(name);
   if (old !== undefined) return old;
   const index = nodes.push({}) - 1;
@@ -39,7 +48,7 @@ function planOf(schemas: Schemas, start: readonly Located[], known: Map<string, 
     next.length === 0 ? undefined : planOf(schemas, next, known, nodes);
   const keys = Object.fromEntries(keysOf(applied).map((key) => [key, follow(below(applied, key)) ?? 0]));
   const rest = follow(below(applied, undefined));
-  const items = follow(applied.flatMap((one) => child(one, one.node['items'])));
+  const items = follow(applied.flatMap((one) => child(one, one.node.items)));
   const measure = measureOf(applied);
   nodes[index] = {
     ...(measure === undefined ? {} : { measure }),
@@ -68,14 +77,17 @@ function closure(schemas: Schemas, start: readonly Located[]): readonly Located[
     const { $ref: reference } = one.node;
     if (typeof reference === 'string') add(referred(schemas, one.file, reference));
     for (const branch of ['then', 'else']) child(one, one.node[branch]).forEach(add);
-    for (const list of ['allOf', 'anyOf', 'oneOf']) listed(one.node[list]).flatMap((entry) => child(one, entry)).forEach(add);
+    for (const list of ['allOf', 'anyOf', 'oneOf'])
+      listed(one.node[list])
+        .flatMap((entry) => child(one, entry))
+        .forEach(add);
   };
   start.forEach(add);
   return [...all.values()];
 }
 
 function listed(value: Json | undefined): readonly Json[] {
-  return Array.isArray(value) ? value : [];
+  return isList(value) ? value : [];
 }
 
 function child({ file }: Located, node: Json | undefined): readonly Located[] {
@@ -95,22 +107,23 @@ function propertiesOf(node: JsonMap): JsonMap {
 function below(applied: readonly Located[], key: string | undefined): readonly Located[] {
   return applied.flatMap((one) => {
     const named = key === undefined ? undefined : propertiesOf(one.node)[key];
-    return child(one, named ?? one.node['additionalProperties']);
+    return child(one, named ?? one.node.additionalProperties);
   });
 }
 
 function measureOf(applied: readonly Located[]): MeasurePlan | undefined {
-  const nodes = applied.filter(({ node }) => node['dimension'] !== undefined);
+  const nodes = applied.filter(({ node }) => node.dimension !== undefined);
   const [first, ...others] = nodes.map(({ file, node }) => toMeasure(file, node));
   const differs = others.some((other) => JSON.stringify(other) !== JSON.stringify(first));
-  if (differs) throw new Error(`${nodes.map(({ file, node }) => `${file}: ${String(node['description'])}`).join(' and ')} differ`);
+  if (differs)
+    throw new Error(`${nodes.map(({ file, node }) => `${file}: ${JSON.stringify(node)}`).join(' and ')} differ`);
   return first;
 }
 
 function toMeasure(file: string, node: JsonMap): MeasurePlan {
-  const names = [node['dimension'] ?? ''].flat().map(String);
+  const names = [node.dimension ?? ''].flat().map(String);
   const [dimension, ...more] = names.filter(isDimension);
-  const forms = listed(node['forms']).map(String);
+  const forms = listed(node.forms).map(String);
   if (dimension === undefined || names.some((name) => name !== 'accuracy' && !isDimension(name))) {
     throw new Error(`${file}: no dimension ${names.join(', ')}`);
   }
@@ -138,7 +151,7 @@ interface Kept {
 /** The nodes from which a physical value can be reached, numbered anew. */
 function pruned(nodes: readonly PlanNode[], roots: readonly number[]): Kept {
   const useful = new Set(nodes.flatMap((node, index) => (node.measure === undefined ? [] : [index])));
-  for (let size = -1; size !== useful.size; ) {
+  for (let size = -1; size !== useful.size;) {
     size = useful.size;
     nodes.forEach((node, index) => {
       if (successors(node).some((next) => useful.has(next))) useful.add(index);
@@ -146,7 +159,8 @@ function pruned(nodes: readonly PlanNode[], roots: readonly number[]): Kept {
   }
   // Beside `rest`, a key of its own without any value to read has to be told from the others.
   nodes.forEach(({ keys = {}, rest }, index) => {
-    if (useful.has(index) && rest !== undefined && useful.has(rest)) Object.values(keys).forEach((key) => useful.add(key));
+    if (useful.has(index) && rest !== undefined && useful.has(rest))
+      Object.values(keys).forEach((key) => useful.add(key));
   });
   for (const root of roots) useful.add(root);
   const indices = new Map([...useful].sort((a, b) => a - b).map((old, index) => [old, index]));

@@ -1,4 +1,4 @@
-import { isMap } from './schemas.ts';
+import { isList, isMap } from './schemas.ts';
 import type { Json, JsonMap } from './schemas.ts';
 
 /** The module from which messages take what a schema says: descriptions, examples, keys and the branches to them. */
@@ -20,7 +20,7 @@ function ruleTexts(file: string, schema: JsonMap): Json {
   const rule: Record<string, Json> = {};
   for (const [key, value] of Object.entries(schema)) {
     if (key === '$ref' && typeof value === 'string') rule[key] = value.startsWith('#') ? `${file}${value}` : value;
-    else if (key === 'examples' && Array.isArray(value)) Object.assign(rule, exampleOf(value));
+    else if (key === 'examples' && isList(value)) Object.assign(rule, exampleOf(value));
     else if (MAPS.has(key) && isMap(value)) rule[key] = ofEach(file, value);
     else if (SUBSCHEMAS.has(key)) rule[key] = subschema(file, value);
     else if (KEPT.has(key)) rule[key] = value;
@@ -53,6 +53,6 @@ function ofEach(file: string, map: JsonMap): Json {
 }
 
 function subschema(file: string, value: Json): Json {
-  if (Array.isArray(value)) return value.map((one) => subschema(file, one));
+  if (isList(value)) return value.map((one) => subschema(file, one));
   return isMap(value) ? ruleTexts(file, value) : value;
 }

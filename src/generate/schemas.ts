@@ -1,5 +1,6 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
+import { SORTS } from '../documents/sort.ts';
 
 /** A JSON value, as a schema or one of its nodes. */
 export type Json = string | number | boolean | null | readonly Json[] | JsonMap;
@@ -7,10 +8,7 @@ export interface JsonMap {
   readonly [key: string]: Json;
 }
 
-/** The sorts of document, each with a schema of its name; `common.json` beside them holds what they share. */
-export const SORTS = ['recipe', 'chamber', 'substances', 'process', 'site'] as const;
-
-/** Schemas of the documents by file name, the shared definitions among them. */
+/** Schemas of the documents by file name: one of each sort's name, and `common.json` with what they share. */
 export function documentSchemas(folder: string): ReadonlyMap<string, JsonMap> {
   const wanted = new Set(['common.json', ...SORTS.map((sort) => `${sort}.json`)]);
   const names = readdirSync(folder).filter((name) => wanted.has(name));
@@ -19,6 +17,15 @@ export function documentSchemas(folder: string): ReadonlyMap<string, JsonMap> {
 
 export function isMap(value: Json | undefined): value is JsonMap {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
+
+export function isList(value: Json | undefined): value is readonly Json[] {
+  return Array.isArray(value);
+}
+
+/** A text; empty for anything else. */
+export function textOf(value: Json | undefined): string {
+  return typeof value === 'string' ? value : '';
 }
 
 /** The schema node that a `$ref` leads to, and the file in which its own references are read. */
@@ -38,7 +45,12 @@ export interface Located {
 }
 
 function readSchema(path: string): JsonMap {
-  const schema: Json = JSON.parse(readFileSync(path, 'utf8'));
-  if (!isMap(schema)) throw new Error(`${path} is no schema`);
+  const schema: unknown = JSON.parse(readFileSync(path, 'utf8'));
+  if (!isJson(schema) || !isMap(schema)) throw new Error(`${path} is no schema`);
   return schema;
+}
+
+/** Whatever JSON can hold has been parsed from it. */
+function isJson(value: unknown): value is Json {
+  return typeof value !== 'undefined' && typeof value !== 'function';
 }

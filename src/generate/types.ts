@@ -1,5 +1,6 @@
 import { compile } from 'json-schema-to-typescript';
-import { isMap, referred, SORTS } from './schemas.ts';
+import { isList, isMap, referred, textOf } from './schemas.ts';
+import { SORTS } from '../documents/sort.ts';
 import type { Json, JsonMap, Located } from './schemas.ts';
 
 type Schemas = ReadonlyMap<string, JsonMap>;
@@ -33,10 +34,10 @@ function used(code: string): readonly string[] {
 /** One schema that holds all of them: definitions keep their names, and maps as long as no other has taken theirs. */
 function together(schemas: Schemas): Record<string, Json> {
   const nodes = definitionsOf(schemas);
-  const naming: Naming = { schemas, given: new Set(nodes.map(({ node }) => String(node['title']))) };
+  const naming: Naming = { schemas, given: new Set(nodes.map(({ node }) => textOf(node.title))) };
   const definitions = nodes.map(({ file, key, node }): [string, Json] => {
     const plainNode = plain(naming, { file, node }, node);
-    return [nameOf(file, key), isMap(plainNode) ? { ...plainNode, title: node['title'] ?? key } : plainNode];
+    return [nameOf(file, key), isMap(plainNode) ? { ...plainNode, title: node.title ?? key } : plainNode];
   });
   const properties = Object.fromEntries(SORTS.map((sort) => [sort, { $ref: `#/$defs/${nameOf(`${sort}.json`, '')}` }]));
   return {
@@ -55,7 +56,7 @@ interface Definition extends Located {
 
 function definitionsOf(schemas: Schemas): readonly Definition[] {
   return [...schemas].flatMap(([file, schema]) => {
-    const shared = Object.entries(isMap(schema['$defs']) ? schema['$defs'] : {});
+    const shared = Object.entries(isMap(schema.$defs) ? schema.$defs : {});
     const named = shared.flatMap(([key, node]) => (isMap(node) && isNamed(node) ? [{ file, key, node }] : []));
     return file === 'common.json' ? named : [{ file, key: '', node: schema }, ...named];
   });
@@ -68,12 +69,15 @@ function nameOf(file: string, key: string): string {
 /** Maps and lists; ramps and ranges are types of the measure pass. */
 function isNamed({ type, tsType, properties, additionalProperties, items }: JsonMap): boolean {
   if (tsType !== undefined) return false;
-  return (type === 'object' && (properties !== undefined || isMap(additionalProperties))) || (type === 'array' && items !== undefined);
+  return (
+    (type === 'object' && (properties !== undefined || isMap(additionalProperties))) ||
+    (type === 'array' && items !== undefined)
+  );
 }
 
 /** A node as the compiler of types shall see it, with the description of the place that refers to it. */
 function plain(naming: Naming, { file, node }: Located, site: JsonMap): Json {
-  const reference = node['$ref'];
+  const reference = node.$ref;
   if (typeof reference === 'string') return throughReference(naming, file, reference, { ...node, ...aboutSite(site) });
   const result: Record<string, Json> = {};
   for (const [key, value] of Object.entries(node)) {
@@ -121,6 +125,6 @@ function ofEach(naming: Naming, file: string, map: JsonMap): Json {
 }
 
 function below(naming: Naming, file: string, value: Json): Json {
-  if (Array.isArray(value)) return value.map((one) => below(naming, file, one));
+  if (isList(value)) return value.map((one) => below(naming, file, one));
   return isMap(value) ? plain(naming, { file, node: value }, value) : value;
 }

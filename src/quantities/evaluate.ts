@@ -6,34 +6,43 @@ import type { Inapplicable, Known, Missing, Reading } from './reading.ts';
 /** Where readings are kept, by the slots of a plan. */
 export interface Values {
   readonly plan: Plan;
+  /** The run that this one comes from, which has every number that the changes do not reach. */
+  readonly origin: Values | undefined;
+  reaches(node: Node): boolean;
   readonly givens: ReadonlyMap<string, Given>;
   readonly readings: (Reading | undefined)[];
   /** Whether any given that a number is read from is uncertain. */
   readonly uncertain: boolean[];
   /** Slopes of a law's value to each of its own inputs, once they were worked out. */
-  readonly partials: (readonly number[] | undefined)[];
+  readonly partials: (number[] | undefined)[];
 }
 
 /** The reading of a node; whatever it needs is read first. */
 export function evaluate(values: Values, node: Node): Reading {
   const kept = values.readings[node.slot];
   if (kept !== undefined) return kept;
-  const reading = read(values, node);
+  const { origin } = values;
+  const shared = origin !== undefined && !values.reaches(node);
+  const reading = shared ? evaluate(origin, node) : read(values, node);
   values.readings[node.slot] = reading;
+  if (shared) values.uncertain[node.slot] = origin.uncertain[node.slot] ?? false;
   return reading;
 }
 
 /** The arguments of a law whose inputs are all known. */
-export function lawAt(values: Values, node: Law): readonly Argument[] {
-  return shaped(node, (index) => valueOf(values, node.inputs[index]));
-}
-
-/** The value of a law with one of its inputs moved. */
-export function lawMoved(values: Values, node: Law, moved: number, value: number): number {
-  const answer = node.quantity.value(
-    shaped(node, (index) => (index === moved ? value : valueOf(values, node.inputs[index]))),
-  );
-  return typeof answer === 'number' ? answer : NaN;
+export function lawAt(values: Values, node: Law): Argument[] {
+  const args: Argument[] = [];
+  let index = 0;
+  for (const count of node.shape) {
+    if (count === 'one') {
+      args.push(valueOf(values, node.inputs[index++]));
+      continue;
+    }
+    const list: number[] = [];
+    for (let i = 0; i < count; i++) list.push(valueOf(values, node.inputs[index++]));
+    args.push(list);
+  }
+  return args;
 }
 
 function read(values: Values, node: Node): Reading {
@@ -129,21 +138,6 @@ function gravestAbsence(readings: readonly Reading[]): Missing | Inapplicable | 
   for (const reading of readings) if (reading.kind === 'missing') for (const need of reading.needs) needs.add(need);
   if (needs.size > 0) return { kind: 'missing', needs: [...needs].sort() };
   return readings.find((reading) => reading.kind === 'inapplicable');
-}
-
-function shaped(node: Law, at: (index: number) => number): readonly Argument[] {
-  const args: Argument[] = [];
-  let index = 0;
-  for (const count of node.shape) {
-    if (count === 'one') {
-      args.push(at(index++));
-      continue;
-    }
-    const list: number[] = [];
-    for (let i = 0; i < count; i++) list.push(at(index++));
-    args.push(list);
-  }
-  return args;
 }
 
 function valueOf(values: Values, node: Node | undefined): number {

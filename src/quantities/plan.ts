@@ -65,15 +65,30 @@ export class Plan {
   readonly scope: Scope;
   readonly nodes: Node[] = [];
   readonly #byName = new Map<string, Node>();
+  /** The same, for those who ask with one reference again and again. */
+  readonly #byReference = new WeakMap<Reference, Node>();
   readonly #open = new Set<string>();
 
   constructor(scope: Scope) {
     this.scope = scope;
   }
 
+  /** The node of a number, or of one number over another. */
+  node(reference: Reference, over?: Reference): Node {
+    return over === undefined ? this.number(reference) : this.ratio(reference, over);
+  }
+
   /** The node of a number. */
   number(reference: Reference): Node {
-    const name = referenceName(reference);
+    let node = this.#byReference.get(reference);
+    if (node === undefined) {
+      node = this.#named(reference, referenceName(reference));
+      this.#byReference.set(reference, node);
+    }
+    return node;
+  }
+
+  #named(reference: Reference, name: string): Node {
     const known = this.#byName.get(name);
     if (known !== undefined) return known;
     if (this.#open.has(name)) throw new Error(`${name} is read from itself`);

@@ -1,4 +1,5 @@
 import type { Given } from '../steps/given.ts';
+import { Givens, shapeOf } from '../steps/givens.ts';
 import type { Site } from '../steps/site.ts';
 import type { Recipe, Step } from '../steps/step.ts';
 import type { Library } from '../substances/library.ts';
@@ -27,48 +28,52 @@ export interface Line {
   readonly remarks: readonly string[];
 }
 
-/** A step whose numbers can be read, alone or one `over` another. Reading one works out those it needs, once, and keeps them. A run never changes. */
+/**
+ * A step whose numbers can be read, alone or one `over` another. Reading one works out those it needs, once, and keeps them.
+ * A run never changes.
+ */
 export class StepRun implements Values {
   readonly step: Step;
   readonly plan: Plan;
   readonly givens: ReadonlyMap<string, Given>;
+  readonly origin: StepRun | undefined;
   readonly readings: (Reading | undefined)[] = [];
   readonly uncertain: boolean[] = [];
-  readonly partials: (readonly number[] | undefined)[] = [];
+  readonly partials: (number[] | undefined)[] = [];
+  readonly #changed: ReadonlySet<string>;
+  readonly #reached: (boolean | undefined)[] = [];
 
-  constructor(step: Step, plan: Plan, givens: ReadonlyMap<string, Given> = step.givens) {
+  constructor(step: Step, plan: Plan, moved?: Moved) {
     this.step = step;
     this.plan = plan;
-    this.givens = givens;
+    this.givens = moved?.givens ?? step.givens;
+    this.origin = moved?.origin;
+    this.#changed = moved?.changed ?? NOTHING;
   }
 
   read(reference: Reference, over?: Reference): Reading {
-    return evaluate(this, this.#node(reference, over));
+    return evaluate(this, this.plan.node(reference, over));
   }
 
   /** Standard uncertainty of a known number; zero where it is judged at its setpoint. */
   uncertainty(reference: Reference, over?: Reference): number {
-    return standardUncertainty(this, this.#node(reference, over));
+    return standardUncertainty(this, this.plan.node(reference, over));
   }
 
   /** How every given moves the number, strongest contribution first. */
   slopes(reference: Reference, over?: Reference): readonly Slope[] {
-    return slopesOf(this, this.#node(reference, over));
+    return slopesOf(this, this.plan.node(reference, over));
   }
 
   /** All that was read on the way to a number, each once: the number itself first, every line before those it is read from. */
   derive(reference: Reference, over?: Reference): readonly Line[] {
-    return reachedFrom(this.#node(reference, over)).map((node) => lineOf(this, node));
+    return reachedFrom(this.plan.node(reference, over)).map((node) => lineOf(this, node));
   }
 
   /** What a reader must know of a number and of all that it is read from. */
   remarks(reference: Reference, over?: Reference): readonly string[] {
-    const nodes = reachedFrom(this.#node(reference, over));
+    const nodes = reachedFrom(this.plan.node(reference, over));
     return [...new Set(nodes.flatMap((node) => remarksOf(this, node)))];
-  }
-
-  #node(reference: Reference, over: Reference | undefined): Node {
-    return over === undefined ? this.plan.number(reference) : this.plan.ratio(reference, over);
   }
 
   /** The given that stands at an address in this run, or the default that stands in for it. */
@@ -79,16 +84,34 @@ export class StepRun implements Values {
 
   /** Another run of the step with some values moved; it shares every number that they do not reach. */
   with(...changes: readonly Change[]): StepRun {
-    const givens = new Map(this.givens);
+    const givens = new Givens(this.givens);
     for (const { address, value } of changes) {
       const given = this.given(address);
-      if (given !== undefined) givens.set(address, { ...given, value });
+      if (given !== undefined) givens.set({ ...given, value });
     }
-    const other = new StepRun(this.step, this.plan, givens);
-    shareUnreached(this, other, new Set(changes.map(({ address }) => address)));
-    return other;
+    const changed = new Set(changes.map(({ address }) => address));
+    return new StepRun(this.step, this.plan, { givens, changed, origin: this });
+  }
+
+  /** Whether what this run changed of the one it comes from reaches a number. */
+  reaches(node: Node): boolean {
+    const known = this.#reached[node.slot];
+    if (known !== undefined) return known;
+    const reached =
+      node.kind === 'given' ? this.#changed.has(node.address) : node.inputs.some((input) => this.reaches(input));
+    this.#reached[node.slot] = reached;
+    return reached;
   }
 }
+
+/** What a run changed of the one it comes from. */
+interface Moved {
+  readonly givens: ReadonlyMap<string, Given>;
+  readonly changed: ReadonlySet<string>;
+  readonly origin: StepRun;
+}
+
+const NOTHING: ReadonlySet<string> = new Set();
 
 /** A recipe on its chamber and site, whose steps can be read. */
 export interface Run {
@@ -121,23 +144,10 @@ function planOf(step: Step, library: Library): Plan {
 
 function signatureOf(step: Step): string {
   let signature = JSON.stringify(step.setup);
-  for (const address of step.givens.keys()) signature += `\n${address}`;
+  signature += `\n${shapeOf(step.givens)}`;
   for (const address of step.unknown) signature += `\n?${address}`;
   for (const address of step.none) signature += `\n-${address}`;
   return signature;
-}
-
-/** Copies the readings that no changed address reaches. */
-function shareUnreached(from: StepRun, to: StepRun, changed: ReadonlySet<string>): void {
-  const reached: boolean[] = [];
-  for (const node of from.plan.nodes) {
-    const moved = node.kind === 'given' ? changed.has(node.address) : node.inputs.some((input) => reached[input.slot]);
-    reached[node.slot] = moved;
-    if (moved) continue;
-    to.readings[node.slot] = from.readings[node.slot];
-    to.uncertain[node.slot] = from.uncertain[node.slot] ?? false;
-    to.partials[node.slot] = from.partials[node.slot];
-  }
 }
 
 function givenAt(run: StepRun, address: string, fallback: Given | undefined): Given | undefined {

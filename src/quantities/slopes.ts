@@ -1,12 +1,13 @@
 import type { Given } from '../steps/given.ts';
-import { evaluate, lawMoved, type Values } from './evaluate.ts';
-import type { Law, Node } from './plan.ts';
+import { evaluate, lawAt, type Values } from './evaluate.ts';
+import type { Choice, Law, Node } from './plan.ts';
+import type { Argument } from './quantity.ts';
 import type { Slope } from './reading.ts';
 
 /*
  * Slopes are found as one would by hand: each law is called again with each of its own inputs moved a little, and the
  * slopes are chained from the number back to the givens. Since inputs have lower slots than what is read from them, one
- * pass down the slots does it.
+ * walk down the slots does it.
  */
 
 /** Standard uncertainty of a number: root of the sum of squares of what each given contributes (GUM 5.1.2). */
@@ -29,6 +30,9 @@ export function slopesOf(values: Values, node: Node): readonly Slope[] {
   return slopes.sort((a, b) => b.contribution - a.contribution || (a.address < b.address ? -1 : 1));
 }
 
+/** Slopes from the number to the nodes on the way, by slot; kept between walks, and left all zero by each. */
+const slopeTo: number[] = [];
+
 /** Walks from a number down to the givens with the slope of the number to each node on the way. */
 function chain(
   values: Values,
@@ -36,68 +40,94 @@ function chain(
   onlyUncertain: boolean,
   visit: (given: Given, slope: number, address: string) => void,
 ): void {
-  const slopes = new Float64Array(target.slot + 1);
-  slopes[target.slot] = 1;
+  const { nodes } = values.plan;
+  while (slopeTo.length < nodes.length) slopeTo.push(0);
+  slopeTo[target.slot] = 1;
   for (let slot = target.slot; slot >= 0; slot--) {
-    const slope = slopes[slot] ?? 0;
-    const node = values.plan.nodes[slot];
+    const slope = slopeTo[slot] ?? 0;
+    const node = nodes[slot];
     if (slope === 0 || node === undefined) continue;
+    slopeTo[slot] = 0;
     if (node.kind === 'given') {
       const given = values.givens.get(node.address) ?? node.fallback;
       if (given !== undefined) visit(given, slope, node.address);
-      continue;
-    }
-    const partials = partialsOf(values, node, onlyUncertain);
-    for (const [index, input] of node.inputs.entries()) {
-      if (onlyUncertain && !values.uncertain[input.slot]) continue;
-      slopes[input.slot] = (slopes[input.slot] ?? 0) + slope * (partials[index] ?? 0);
+    } else if (node.kind === 'same') {
+      for (const { slot: input } of node.inputs) slopeTo[input] = (slopeTo[input] ?? 0) + slope;
+    } else {
+      pass(values, node, slope, onlyUncertain);
     }
   }
 }
 
-/** Slopes of a node's value to its own inputs. NaN marks those not asked for so far. */
-function partialsOf(values: Values, node: Node, onlyUncertain: boolean): readonly number[] {
-  if (node.kind === 'same') return ITSELF;
-  if (node.kind === 'choice') return chosenSlopes(values, node.inputs, node);
-  if (node.kind !== 'law') return [];
-  const partials = [...(values.partials[node.slot] ?? [])];
-  for (const [index, input] of node.inputs.entries()) {
-    const wanted = !onlyUncertain || values.uncertain[input.slot];
-    const kept = partials[index] ?? NaN;
-    partials[index] = wanted && Number.isNaN(kept) ? partial(values, node, index, input) : kept;
+/** Hands a slope on from a node to its inputs. */
+function pass(values: Values, node: Node, slope: number, onlyUncertain: boolean): void {
+  const partials = partialsOf(values, node, onlyUncertain);
+  for (let index = 0; index < node.inputs.length; index++) {
+    const input = node.inputs[index];
+    if (input === undefined || (onlyUncertain && !values.uncertain[input.slot])) continue;
+    slopeTo[input.slot] = (slopeTo[input.slot] ?? 0) + slope * (partials[index] ?? 0);
   }
-  values.partials[node.slot] = partials;
+}
+
+/** Slopes of a node's value to its own inputs, worked out as far as they are wanted and kept. NaN marks those not wanted so far. */
+function partialsOf(values: Values, node: Node, onlyUncertain: boolean): readonly number[] {
+  if (values.origin !== undefined && !values.reaches(node)) return partialsOf(values.origin, node, onlyUncertain);
+  if (node.kind === 'choice') return chosenSlopes(values, node);
+  if (node.kind !== 'law') return [];
+  let partials = values.partials[node.slot];
+  if (partials === undefined) {
+    partials = node.inputs.map(() => NaN);
+    values.partials[node.slot] = partials;
+  }
+  const args = lawAt(values, node);
+  let index = 0;
+  for (const [position, arg] of args.entries()) {
+    const count = typeof arg === 'number' ? 1 : arg.length;
+    for (let i = 0; i < count; i++, index++) {
+      const input = node.inputs[index];
+      const wanted = input !== undefined && (!onlyUncertain || values.uncertain[input.slot]);
+      if (wanted && Number.isNaN(partials[index])) partials[index] = partial(values, node, args, position, i);
+    }
+  }
   return partials;
 }
 
 /** The worst of several moves with the one that was chosen. */
-function chosenSlopes(values: Values, inputs: readonly Node[], node: Node): readonly number[] {
+function chosenSlopes(values: Values, node: Choice): readonly number[] {
   const reading = evaluate(values, node);
-  if (node.kind !== 'choice' || reading.kind !== 'known') return [];
-  return inputs.map((_, index) => (node.subjects[index] === reading.of ? 1 : 0));
+  return node.subjects.map((subject) => (reading.kind === 'known' && subject === reading.of ? 1 : 0));
 }
 
-const ITSELF: readonly number[] = [1];
-const RELATIVE_MOVE = 1e-5;
+const RELATIVE_MOVE = 1e-7;
 const MOVE_FROM_ZERO = 1e-9;
-
-/** Up to this relative difference the slopes to both sides are those of a smooth law; beyond, the law has a kink or a jump there. */
-const SMOOTH = 0.01;
+/** A law whose value changes by this many times the relative change of an input may stand at a jump. */
+const STEEP = 30;
 
 /**
- * Slope of a law to one input: the mean of the slopes to both sides. At a kink or a jump (the worst of several changes, a table
- * goes on to its next row) the flatter side counts, since a jump is no slope; where the law has a value on one side only, that side.
+ * Slope of a law to one of its arguments: how much its value changes over a small move upward. Where it has no value above, or
+ * stands at a jump (a table goes on to its next row), the move downward counts, and of two the flatter: a jump is no slope.
  */
-function partial(values: Values, node: Law, index: number, input: Node): number {
-  const at = evaluate(values, input);
+function partial(values: Values, node: Law, args: readonly Argument[], position: number, index: number): number {
   const centre = evaluate(values, node);
-  if (at.kind !== 'known' || centre.kind !== 'known') return 0;
-  const move = Math.abs(at.value) * RELATIVE_MOVE || MOVE_FROM_ZERO;
-  const up = (lawMoved(values, node, index, at.value + move) - centre.value) / move;
-  const down = (centre.value - lawMoved(values, node, index, at.value - move)) / move;
+  if (centre.kind !== 'known') return 0;
+  const at = valueAt(args, position, index);
+  const move = Math.abs(at) * RELATIVE_MOVE || MOVE_FROM_ZERO;
+  const up = (moved(node, args, position, index, at + move) - centre.value) / move;
+  if (Math.abs(up * at) <= STEEP * Math.abs(centre.value)) return up;
+  const down = (centre.value - moved(node, args, position, index, at - move)) / move;
   if (!Number.isFinite(up)) return Number.isFinite(down) ? down : 0;
-  if (!Number.isFinite(down)) return up;
-  const smooth = Math.abs(up - down) <= SMOOTH * Math.max(Math.abs(up), Math.abs(down));
-  if (smooth) return (up + down) / 2;
-  return Math.abs(up) < Math.abs(down) ? up : down;
+  return Math.abs(down) < Math.abs(up) ? down : up;
+}
+
+function valueAt(args: readonly Argument[], position: number, index: number): number {
+  const arg = args[position];
+  return (typeof arg === 'object' ? arg[index] : arg) ?? NaN;
+}
+
+/** The value of a law with one number among its arguments replaced; NaN where it has none. */
+function moved({ quantity }: Law, args: readonly Argument[], position: number, index: number, value: number): number {
+  const arg = args[position];
+  const replaced = typeof arg === 'object' ? arg.with(index, value) : value;
+  const answer = quantity.value(args.with(position, replaced));
+  return typeof answer === 'number' ? answer : NaN;
 }

@@ -41,7 +41,10 @@ export function cautionSummary(cautions: readonly Caution[]): string | undefined
   const clauses: string[] = [];
   for (const caution of cautions) {
     if (caution.kind === 'hazard') hazards.set(caution.hazard, caution.gases);
-    else clauses.push(`${listed(caution.fuels)} with ${listed(caution.oxidisers)}, fuel with oxidiser, in ${listed(caution.steps)}`);
+    else
+      clauses.push(
+        `${listed(caution.fuels)} with ${listed(caution.oxidisers)}, fuel with oxidiser, in ${listed(caution.steps)}`,
+      );
   }
   return `${[...hazardClauses([...hazards]), ...clauses].join('; ')}. ${capital(PRACTICE)}.`;
 }

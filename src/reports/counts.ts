@@ -2,6 +2,7 @@ import type { Judgement } from '../verdicts/judgement.ts';
 import type { Kind, Level, Verdict } from '../verdicts/verdict.ts';
 import type { Hazard } from '../substances/gas.ts';
 import { cautionCount } from './cautions.ts';
+import { joined, type GasesByHazard } from './hazards.ts';
 
 /** What many recipes add up to. Plain data: parts of a run add theirs. */
 export interface Counts {
@@ -20,7 +21,7 @@ export interface Counts {
   /** YAML files that are none of ours. */
   readonly passedOver: number;
   /** Gases met by hazard, for the caution at the end of many recipes. */
-  readonly hazards: Readonly<Partial<Record<Hazard, readonly string[]>>>;
+  readonly hazards: GasesByHazard;
   /** Recipes in which a fuel and an oxidiser flow in one step. */
   readonly fuelWithOxidiser: number;
 }
@@ -92,7 +93,7 @@ export function addCounts(a: Counts, b: Counts): Counts {
     notes: a.notes + b.notes,
     faults: a.faults + b.faults,
     passedOver: a.passedOver + b.passedOver,
-    hazards: union(a.hazards, b.hazards),
+    hazards: joined(a.hazards, b.hazards),
     fuelWithOxidiser: a.fuelWithOxidiser + b.fuelWithOxidiser,
   };
 }
@@ -142,23 +143,3 @@ function sum<K extends string>(a: Readonly<Record<K, number>>, b: Readonly<Recor
   for (const key in b) total[key] += b[key];
   return total;
 }
-
-function union(a: Counts['hazards'], b: Counts['hazards']): Counts['hazards'] {
-  const all: Partial<Record<Hazard, readonly string[]>> = { ...a };
-  for (const [hazard, gases] of hazardEntries(b)) {
-    const before = all[hazard] ?? [];
-    const more = gases.filter((gas) => !before.includes(gas));
-    all[hazard] = more.length === 0 ? before : [...before, ...more].sort();
-  }
-  return all;
-}
-
-export function hazardEntries(hazards: Counts['hazards']): readonly (readonly [Hazard, readonly string[]])[] {
-  return HAZARDS.flatMap((hazard) => {
-    const gases = hazards[hazard];
-    return gases === undefined ? [] : [[hazard, gases] as const];
-  });
-}
-
-/** In the order in which they are told. */
-const HAZARDS: readonly Hazard[] = ['pyrophoric', 'flammable', 'oxidising', 'toxic', 'corrosive', 'asphyxiant'];

@@ -15,14 +15,17 @@ export function groundsSentence(verdict: Verdict, run: StepRun, shown: Shown): s
   const lines = new Map(at.derive(judgedReference(verdict, run), verdict.over).map((line) => [line.node, line]));
   const [target] = lines.keys();
   if (target === undefined) return undefined;
-  const inputs = plainInputs(lines, target).flatMap((node) => lines.get(node) ?? []).filter(isTelling);
+  const inputs = plainInputs(lines, target)
+    .flatMap((node) => lines.get(node) ?? [])
+    .filter(isTelling);
   if (inputs.length === 0 || inputs.length > MOST_INPUTS) return undefined;
   return `From ${inputs.map((input) => inputWords(input, lines, at, shown)).join(', ')}.`;
 }
 
 /** Defaults that a reader must know of: those that carry a notable share of the uncertainty, and whatever stands in for a setpoint. */
-export function assumedSentences(verdict: Verdict, run: StepRun, shown: Shown): readonly string[] {
-  return verdict.assumed.filter(isNotable).map((assumed) => `Assumed: ${assumedWords(assumed, run, shown)}.`);
+export function assumedSentence(verdict: Verdict, run: StepRun, shown: Shown): string | undefined {
+  const words = verdict.assumed.filter(isNotable).map((assumed) => assumedWords(assumed, run, shown));
+  return words.length === 0 ? undefined : `Assumed: ${words.join('; ')}.`;
 }
 
 function isNotable({ address, share }: Assumed): boolean {
@@ -56,7 +59,8 @@ function runOf(verdict: Verdict, run: StepRun): StepRun | undefined {
 /** The number that decided: of `worst` or an alloy's role that of the subject. */
 function judgedReference({ reference, subject }: Verdict, { plan }: StepRun): Verdict['reference'] {
   if (subject === undefined) return reference;
-  if (reference.of === 'worst') return { ...reference, of: subjectNamed(subject, quantityNamed(reference.id)?.subjects?.(plan.scope) ?? []) };
+  if (reference.of === 'worst')
+    return { ...reference, of: subjectNamed(subject, quantityNamed(reference.id)?.subjects?.(plan.scope) ?? []) };
   const role = reference.of;
   if (role !== 'target' && role !== 'melt') return reference;
   return { ...reference, of: subjectNamed(subject, plan.scope.emittedSubjects(role)) };

@@ -19,7 +19,11 @@ export function noteText(note: Note, { run }: Judgement): NoteText {
   return { path: step, ...lineOf(waiver.place), text: waiverText(note.kind, step, waiver) };
 }
 
-function waiverText(kind: WaiverNote['kind'], step: string, { assumption, until, holdsTo }: WaiverNote['waiver']): string {
+function waiverText(
+  kind: WaiverNote['kind'],
+  step: string,
+  { assumption, until, holdsTo }: WaiverNote['waiver'],
+): string {
   const waiver = `${step}: the waiver for ${assumption}`;
   switch (kind) {
     case 'waiver-unused':
@@ -33,6 +37,9 @@ function waiverText(kind: WaiverNote['kind'], step: string, { assumption, until,
 
 type WaiverNote = Exclude<Note, { kind: 'chamber-revision' }>;
 
-function lineOf({ line, column }: { readonly line: number; readonly column: number }): { line: number; column: number } {
+function lineOf({ line, column }: { readonly line: number; readonly column: number }): {
+  line: number;
+  column: number;
+} {
   return { line, column };
 }

@@ -34,7 +34,8 @@ export interface RecipeHead {
   readonly name: string;
   readonly revision?: string;
   readonly chamber: string;
-  readonly file: string;
+  /** Absent where nothing in the file is spoken of. */
+  readonly file?: string;
   readonly size: readonly string[];
   /** The whole outcome in a few words, where the recipe's steps are not shown. */
   readonly outcome?: string;

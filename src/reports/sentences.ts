@@ -44,7 +44,9 @@ export function instanceClause(instance: Instance, run: StepRun, shown: Shown): 
   const side = limit === 'at_least' ? 'least' : 'most';
   if (given?.span?.kind !== 'range') return `with ${address} at its ${side}`;
   const value = limit === 'at_least' ? given.span.atLeast : given.span.atMost;
-  return value === undefined ? `with ${address} at its ${side}` : `with ${address} at its ${side}, ${printGiven(shown, given, value)}`;
+  return value === undefined
+    ? `with ${address} at its ${side}`
+    : `with ${address} at its ${side}, ${printGiven(shown, given, value)}`;
 }
 
 /** The limit of a verdict alone: "at most 1". */
@@ -61,7 +63,12 @@ export function perhapsSentence(verdict: Verdict, shown: Shown): string | undefi
   const graver = bound[limit.side]?.[perhaps];
   if (graver === undefined) return `The uncertainty does not rule out ${perhaps}.`;
   const dimension = verdictDimension(verdict);
-  const clause = limitClause({ ...verdict, limit: { ...limit, value: graver } }, dimension, unitFor(shown, value, dimension), shown);
+  const clause = limitClause(
+    { ...verdict, limit: { ...limit, value: graver } },
+    dimension,
+    unitFor(shown, value, dimension),
+    shown,
+  );
   return `The uncertainty does not rule out ${perhaps}: ${clause}.`;
 }
 

@@ -8,7 +8,8 @@ export function numberWords(reference: Reference, subject?: string): string {
   let words = idWords(id);
   if (length !== undefined) words += ` ${preposition(id, length)} the ${length}`;
   const whose = subject ?? of;
-  if (whose !== undefined && whose !== 'worst') words += ` of ${whose.startsWith('target/') || whose.startsWith('melt/') ? whose.slice(whose.indexOf('/') + 1) : whose}`;
+  if (whose !== undefined && whose !== 'worst')
+    words += ` of ${whose.startsWith('target/') || whose.startsWith('melt/') ? whose.slice(whose.indexOf('/') + 1) : whose}`;
   if (at !== undefined) words += AT[at];
   return words;
 }

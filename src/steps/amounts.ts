@@ -15,7 +15,11 @@ export function settleAmounts(layer: Layer, faults: Fault[]): void {
     }
     layer.mark(`flows.${line}`, 'unknown');
     if (layer.unknown.has('time')) continue;
-    faults.push({ place: setpoint.place, found: `an amount through line ${line} in a step without time`, right: 'a time, over which it is fed' });
+    faults.push({
+      place: setpoint.place,
+      found: `an amount through line ${line} in a step without time`,
+      right: 'a time, over which it is fed',
+    });
   }
 }
 
@@ -23,7 +27,8 @@ function amountScale(time: Given): Scale {
   const perMole = AVOGADRO / time.value;
   return {
     value: ({ value }) => value * perMole,
-    uncertainty: (measure) => perMole * Math.hypot(STATED.uncertainty(measure), (measure.value * time.uncertainty) / time.value),
+    uncertainty: (measure) =>
+      perMole * Math.hypot(STATED.uncertainty(measure), (measure.value * time.uncertainty) / time.value),
     shown: { dimension: 'flow', unit: 'umol/s' },
   };
 }

@@ -1,5 +1,5 @@
 import type { Shares } from '../documents/generated/types.ts';
-import type { ChamberDraft } from './chamber.ts';
+import type { ChamberDraft } from './chamber-draft.ts';
 import { checkAtom, unknownName } from './names.ts';
 import { putShares } from './shares.ts';
 import type { Emitter } from './step.ts';

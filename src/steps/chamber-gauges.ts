@@ -1,6 +1,6 @@
 import type { Chamber } from '../documents/generated/types.ts';
 import { STATED, type GaugeAccuracy } from './accuracies.ts';
-import type { ChamberDraft } from './chamber.ts';
+import type { ChamberDraft } from './chamber-draft.ts';
 import { fixedOf } from './facts.ts';
 
 /** Gauges that say how well they measure, smallest full scale first. */

@@ -3,7 +3,7 @@ import type { Dimension } from '../units/dimensions.ts';
 import type { Place } from '../shelf/place.ts';
 import { dimensionOf, nearestAddress } from './addresses.ts';
 import { STATED } from './accuracies.ts';
-import { referredScale, type ChamberDraft } from './chamber.ts';
+import { referredScale, type ChamberDraft } from './chamber-draft.ts';
 
 /** Puts the limits of a chamber's setpoints at `chamber.limits.ADDRESS.at_least` and `.at_most`. */
 export function putLimits(draft: ChamberDraft): void {
@@ -15,7 +15,8 @@ export function putLimits(draft: ChamberDraft): void {
     }
     for (const side of ['at_least', 'at_most'] as const) {
       const text = limits[side];
-      if (text !== undefined) putLimit(`${address}.${side}`, text, dimension, draft.document.place(['limits', address, side]), draft);
+      if (text !== undefined)
+        putLimit(`${address}.${side}`, text, dimension, draft.document.place(['limits', address, side]), draft);
     }
     checkOrder(address, draft);
   }
@@ -37,11 +38,4 @@ function checkOrder(address: string, { layer, document, faults }: ChamberDraft):
   if (low === undefined || high === undefined || low.value <= high.value) return;
   const place = document.place(['limits', address]);
   faults.push({ place, found: 'limits that are not in order', right: 'at_least is the lowest, at_most the highest' });
-}
-
-/** The fault of an address at which no step has a setpoint. */
-export function unknownAddress(address: string, place: Place) {
-  const meant = nearestAddress(address);
-  const right = meant === undefined ? 'an address such as pressure, flows.Ar or lengths.gap' : `'${meant}'?`;
-  return { place, found: `no step has a setpoint '${address}'`, right };
 }

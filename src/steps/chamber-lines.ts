@@ -4,7 +4,7 @@ import type { Fixed, Unknown } from '../documents/setpoint.ts';
 import { vapourPressure } from '../physics/vapour.ts';
 import { STANDARD_REFERENCE, type FlowReference } from '../units/flow-reference.ts';
 import { STATED } from './accuracies.ts';
-import type { ChamberDraft } from './chamber.ts';
+import type { ChamberDraft } from './chamber-draft.ts';
 import { fixedOf } from './facts.ts';
 import { flowScale, type Delivery, type FlowLine, type Uncertain } from './flow-line.ts';
 import { checkGas } from './names.ts';
@@ -21,14 +21,6 @@ export function chamberLines(draft: ChamberDraft): ReadonlyMap<string, FlowLine>
     lines.set(name, chamberLine(name, line, reference, draft));
   }
   return lines;
-}
-
-/** What "standard" means on a chamber. */
-export function flowReference({ flow_reference }: Chamber): FlowReference {
-  return {
-    temperature: fixedOf(flow_reference?.temperature)?.measure.value ?? STANDARD_REFERENCE.temperature,
-    pressure: fixedOf(flow_reference?.pressure)?.measure.value ?? STANDARD_REFERENCE.pressure,
-  };
 }
 
 function chamberLine(name: string, line: GasLine, reference: FlowReference, draft: ChamberDraft): FlowLine {
@@ -83,8 +75,9 @@ function scaled({ measure }: Fixed, plain: Delivery): Uncertain {
 
 function bringsOf(name: string, { brings, draws, bubbles }: GasLine, draft: ChamberDraft): Line['brings'] {
   const { document, faults } = draft;
-  const known = (gas: string, pointer: Pointer, part?: 'key') =>
+  const known = (gas: string, pointer: Pointer, part?: 'key'): void => {
     checkGas(gas, () => document.place(['gas_lines', name, ...pointer], part), draft);
+  };
   if (bubbles !== undefined) {
     known(bubbles.gas, ['bubbles', 'gas']);
     known(bubbles.carrier, ['bubbles', 'carrier']);
@@ -115,13 +108,20 @@ type Bubbles = NonNullable<GasLine['bubbles']>;
 function bubbledShare(name: string, bubbles: Bubbles, draft: ChamberDraft): number | undefined {
   const temperature = known(bubbles.temperature, draft);
   const pressure = known(bubbles.pressure, draft);
-  const antoine = ['a', 'b', 'c'].map((key) => draft.library.datum(`gases.${bubbles.gas}.vapour_pressure.${key}`)?.value);
+  const antoine = ['a', 'b', 'c'].map(
+    (key) => draft.library.datum(`gases.${bubbles.gas}.vapour_pressure.${key}`)?.value,
+  );
   const [a, b, c] = antoine;
-  if (temperature === undefined || pressure === undefined || a === undefined || b === undefined || c === undefined) return undefined;
+  if (temperature === undefined || pressure === undefined || a === undefined || b === undefined || c === undefined)
+    return undefined;
   const share = vapourPressure(temperature.value, a, b, c) / pressure.value;
   const place = draft.document.place(['gas_lines', name, 'bubbles']);
   if (!(share < 1)) {
-    draft.faults.push({ place, found: `${bubbles.gas} boils in its vessel`, right: 'a vapour pressure below the pressure in the vessel' });
+    draft.faults.push({
+      place,
+      found: `${bubbles.gas} boils in its vessel`,
+      right: 'a vapour pressure below the pressure in the vessel',
+    });
     return undefined;
   }
   const steepness = (Math.LN10 * b) / (temperature.value + c) ** 2;
@@ -134,5 +134,7 @@ function bubbledShare(name: string, bubbles: Bubbles, draft: ChamberDraft): numb
 
 function known(value: Fixed | Unknown | undefined, { plain }: ChamberDraft): Uncertain | undefined {
   const fixed = fixedOf(value);
-  return fixed === undefined ? undefined : { value: fixed.measure.value, uncertainty: plain.uncertainty(fixed.measure) };
+  return fixed === undefined
+    ? undefined
+    : { value: fixed.measure.value, uncertainty: plain.uncertainty(fixed.measure) };
 }

@@ -1,5 +1,5 @@
 import { STATED } from './accuracies.ts';
-import { referredScale, type ChamberDraft } from './chamber.ts';
+import { referredScale, type ChamberDraft } from './chamber-draft.ts';
 import { checkGas } from './names.ts';
 import { putShares } from './shares.ts';
 import type { Setup } from './step.ts';

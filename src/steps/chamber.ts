@@ -31,17 +31,6 @@ export interface ChamberFacts extends PumpFacts, Emitters {
   readonly pressure: Scale;
 }
 
-/** A chamber on the way there: what its parts read and write. */
-export interface ChamberDraft {
-  readonly document: ChamberDocument;
-  readonly content: Chamber;
-  readonly library: Library;
-  readonly accuracies: Accuracies;
-  readonly plain: Scale;
-  readonly layer: Layer;
-  readonly faults: Fault[];
-}
-
 export function chamberFacts(
   document: ChamberDocument,
   library: Library,
@@ -85,16 +74,3 @@ function putPlainFacts({ content, layer, plain }: ChamberDraft): void {
 }
 
 const BELOW_CHAMBER = ['inlets', 'generators', 'electrode', 'walls', 'chuck', 'boat', 'flow_reference'] as const;
-
-/** The scale of flows that no line of the chamber delivers: only what "standard" means counts. */
-export function referredScale(content: Chamber): Scale {
-  const certain = { value: 0, uncertainty: 0 };
-  return flowScale({
-    reference: flowReference(content),
-    gain: { value: 1, uncertainty: 0 },
-    offset: certain,
-    vapour: 0,
-    accuracy: undefined,
-    fullScale: 0,
-  });
-}

@@ -44,13 +44,17 @@ export class Chambers {
     const from = join(this.#folder, folderOf(recipe.source.file));
     const path = join(from, reference);
     if (!inside(this.#shelf, this.#folder, path)) {
-      return failure({ place, found: `the path '${reference}' leads out of the site's folder`, right: 'a chamber inside it' });
+      return failure({
+        place,
+        found: `the path '${reference}' leads out of the site's folder`,
+        right: 'a chamber inside it',
+      });
     }
     if (relative(this.#folder, path) === recipe.source.file) {
       return failure({ place, found: 'the recipe itself as its chamber', right: "the path of a chamber's document" });
     }
-    const { value, faults } = this.#open(path);
-    if (value !== undefined || this.#shelf.kind(path) === 'file') return value === undefined ? { faults } : { value, faults };
+    const { value: source, faults } = this.#shelf.read(path, relative(this.#folder, path));
+    if (source !== undefined) return this.#open(path);
     return { faults: faults.map(({ found, right }) => ({ place, found: `chamber '${reference}': ${found}`, right })) };
   }
 

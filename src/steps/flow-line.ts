@@ -46,7 +46,10 @@ export function flowScale(delivery: Delivery): Scale {
     uncertainty: ({ value, unit, tolerance }: Measure) => {
       if (value === 0) return 0;
       const factor = referenceFactor(unit, reference);
-      const set = tolerance === undefined ? standardUncertainty(value * factor, accuracy, fullScale) : standardUncertainty(value, tolerance) * factor;
+      const set =
+        tolerance === undefined
+          ? standardUncertainty(value * factor, accuracy, fullScale)
+          : standardUncertainty(value, tolerance) * factor;
       return Math.hypot(gain.value * set, gain.uncertainty * value * factor, offset.uncertainty) * delivered;
     },
   };

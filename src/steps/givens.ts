@@ -36,9 +36,7 @@ export class Givens implements ReadonlyMap<string, Given> {
   }
 
   get size(): number {
-    let size = 0;
-    for (const _ of this.keys()) size += 1;
-    return size;
+    return this.flattened().size;
   }
 
   /** Addresses: those of the layer below in their order, whoever states them, then the layer's own. */
@@ -68,6 +66,14 @@ export class Givens implements ReadonlyMap<string, Given> {
     for (const [address, given] of this.entries()) visit(given, address, this);
   }
 
+  /** Which addresses there are, as one text: givens of one shape have the same. */
+  shape(): string {
+    let shape = shapeOf(this.#below);
+    for (const address of this.#own.keys()) shape += `\n${address}`;
+    for (const address of this.#dropped ?? []) shape += `\n-${address}`;
+    return shape;
+  }
+
   /** The same in one map, for others to stand on: made once, since many do. */
   flattened(): ReadonlyMap<string, Given> {
     this.#flat ??= this.#merged();
@@ -83,3 +89,16 @@ export class Givens implements ReadonlyMap<string, Given> {
 }
 
 const NONE: ReadonlyMap<string, Given> = new Map();
+
+/** Layers that many steps stand on are asked for their shape again and again. */
+const SHAPES = new WeakMap<ReadonlyMap<string, Given>, string>();
+
+export function shapeOf(givens: ReadonlyMap<string, Given>): string {
+  if (givens instanceof Givens) return givens.shape();
+  let shape = SHAPES.get(givens);
+  if (shape === undefined) {
+    shape = [...givens.keys()].join('\n');
+    SHAPES.set(givens, shape);
+  }
+  return shape;
+}

@@ -2,6 +2,7 @@ import type { Library } from '../substances/library.ts';
 import type { Fault } from '../shelf/fault.ts';
 import type { Place } from '../shelf/place.ts';
 import { nearest } from '../units/suggest.ts';
+import { nearestAddress } from './addresses.ts';
 
 /** The fault of a name that nothing has: which was probably meant, else all there are, else what to do. */
 export function unknownName(place: Place, sort: string, name: string, known: readonly string[], orElse: string): Fault {
@@ -28,11 +29,22 @@ export function checkGas(gas: string, place: () => Place, { library, faults }: C
 /** A fault where no atom or molecule of this name is known to leave a target or melt. */
 export function checkAtom(atom: string, place: () => Place, { library, faults }: Checking): void {
   if (library.atom(atom) !== undefined) return;
-  faults.push(unknownName(place(), 'atom', atom, library.atomNames(), 'describe it in a substances document of the site'));
+  faults.push(
+    unknownName(place(), 'atom', atom, library.atomNames(), 'describe it in a substances document of the site'),
+  );
 }
 
 /** A fault where no film of this name is known. */
 export function checkFilm(film: string, place: () => Place, { library, faults }: Checking): void {
   if (library.film(film) !== undefined) return;
-  faults.push(unknownName(place(), 'film', film, library.filmNames(), 'describe it in a substances document of the site'));
+  faults.push(
+    unknownName(place(), 'film', film, library.filmNames(), 'describe it in a substances document of the site'),
+  );
+}
+
+/** The fault of an address at which no step has a setpoint. */
+export function unknownAddress(address: string, place: Place): Fault {
+  const meant = nearestAddress(address);
+  const right = meant === undefined ? 'an address such as pressure, flows.Ar or lengths.gap' : `'${meant}'?`;
+  return { place, found: `no step has a setpoint '${address}'`, right };
 }

@@ -4,7 +4,7 @@ import type { Setpoint } from '../documents/setpoint.ts';
 import type { FlowLine } from './flow-line.ts';
 import type { Layer } from './layer.ts';
 import { unknownName } from './names.ts';
-import { placeIn, type Ground } from './overlay.ts';
+import { placeIn, type Ground } from './ground.ts';
 import { isWritten, usualMeasure, type Written } from './written.ts';
 
 /** Puts flows at `flows.LINE`, as what the lines deliver. `{}` says that nothing flows. */
@@ -22,7 +22,9 @@ export function putFlows(layer: Layer, flows: Flows, pointer: Pointer, ground: G
     const line = lines.get(name);
     if (line === undefined) {
       const place = placeIn(ground, pointer, ['flows', name], 'key');
-      ground.faults.push(unknownName(place, 'gas line', name, [...lines.keys()], 'describe it under `gas_lines` of the chamber'));
+      ground.faults.push(
+        unknownName(place, 'gas line', name, [...lines.keys()], 'describe it under `gas_lines` of the chamber'),
+      );
       continue;
     }
     putFlow(layer, name, setpoint, line, ground);
@@ -43,10 +45,21 @@ function putFlow(layer: Layer, name: string, setpoint: Setpoint, line: FlowLine,
 }
 
 /** An amount becomes a flow once the step's time is known: see `settleAmounts`. */
-function putAmount(layer: Layer, name: string, setpoint: Written, { draws, address }: FlowLine, { faults }: Ground): void {
+function putAmount(
+  layer: Layer,
+  name: string,
+  setpoint: Written,
+  { draws, address }: FlowLine,
+  { faults }: Ground,
+): void {
   layer.drop(address);
   if (draws) layer.amounts = new Map([...layer.amounts, [name, setpoint]]);
-  else faults.push({ place: setpoint.place, found: `an amount through line ${name}`, right: 'a flow, in sccm: the line has a controller' });
+  else
+    faults.push({
+      place: setpoint.place,
+      found: `an amount through line ${name}`,
+      right: 'a flow, in sccm: the line has a controller',
+    });
 }
 
 /** Puts powers or duties at `power.GENERATOR` and `duty.GENERATOR`. */
@@ -62,7 +75,9 @@ export function putGenerators(
   for (const [name, setpoint] of Object.entries(map)) {
     if (!generators.includes(name)) {
       const place = placeIn(ground, pointer, [key, name], 'key');
-      ground.faults.push(unknownName(place, 'generator', name, generators, 'describe it under `generators` of the chamber'));
+      ground.faults.push(
+        unknownName(place, 'generator', name, generators, 'describe it under `generators` of the chamber'),
+      );
       continue;
     }
     layer.put(`${key}.${name}`, setpoint, plain);

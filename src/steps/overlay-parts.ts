@@ -2,7 +2,7 @@ import type { Pointer } from '../documents/document.ts';
 import type { Throughout } from '../documents/generated/types.ts';
 import type { Layer } from './layer.ts';
 import { checkFilm, checkGas, unknownName } from './names.ts';
-import { placeIn, type Ground } from './overlay.ts';
+import { placeIn, type Ground } from './ground.ts';
 
 type Block<K extends keyof Throughout> = NonNullable<Throughout[K]>;
 
@@ -17,7 +17,12 @@ export function putSurface(layer: Layer, block: Block<'surface'>, pointer: Point
     if (other) for (const key of OF_THE_FILM) layer.drop(`surface.${key}`);
     const product = block.product ?? (other ? undefined : below?.product);
     layer.parts.surface = { film, mode, ...(product === undefined ? {} : { product }) };
-    if (stated !== undefined) checkFilm(stated, () => placeIn(ground, pointer, ['surface', block.etches === undefined ? 'grows' : 'etches']), ground);
+    if (stated !== undefined)
+      checkFilm(
+        stated,
+        () => placeIn(ground, pointer, ['surface', block.etches === undefined ? 'grows' : 'etches']),
+        ground,
+      );
   }
   layer.putAll('surface', block, ground.chamber.plain);
 }
@@ -37,7 +42,7 @@ export function putReactant(layer: Layer, block: Block<'reactant'>, pointer: Poi
 export function putRunning(
   layer: Layer,
   key: 'targets' | 'melts',
-  block: Block<'targets'> | Block<'melts'>,
+  block: Readonly<Record<string, object>>,
   pointer: Pointer,
   ground: Ground,
 ): void {
@@ -50,7 +55,9 @@ export function putRunning(
     } else {
       const sort = key === 'targets' ? 'target' : 'melt';
       const place = placeIn(ground, pointer, [key, name], 'key');
-      ground.faults.push(unknownName(place, sort, name, [...known.keys()], `describe it under \`${key}\` of the chamber`));
+      ground.faults.push(
+        unknownName(place, sort, name, [...known.keys()], `describe it under \`${key}\` of the chamber`),
+      );
     }
   }
   const [, second] = running;

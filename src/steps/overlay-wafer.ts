@@ -2,7 +2,7 @@ import type { Pointer } from '../documents/document.ts';
 import type { Throughout } from '../documents/generated/types.ts';
 import type { Layer } from './layer.ts';
 import { checkGas } from './names.ts';
-import { placeIn, type Ground } from './overlay.ts';
+import { placeIn, type Ground } from './ground.ts';
 import type { Scale } from './written.ts';
 
 /** Puts the wafer: what it is, or that there is none, or that it is unknown. */
@@ -29,7 +29,12 @@ export function putWafer(layer: Layer, wafer: NonNullable<Throughout['wafer']>, 
 }
 
 /** Puts the gas behind the wafer. Another gas takes nothing over from the one below. */
-export function putBackside(layer: Layer, backside: NonNullable<Throughout['backside']>, pointer: Pointer, ground: Ground): void {
+export function putBackside(
+  layer: Layer,
+  backside: NonNullable<Throughout['backside']>,
+  pointer: Pointer,
+  ground: Ground,
+): void {
   if (typeof backside === 'string') {
     layer.mark('backside', backside);
     layer.parts.backside = undefined;

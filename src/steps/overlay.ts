@@ -13,14 +13,6 @@ import { putReactant, putRunning, putSurface } from './overlay-parts.ts';
 import { putShares } from './shares.ts';
 import { putTemperatures } from './temperatures.ts';
 
-/** What setpoints are read against. */
-export interface Ground {
-  readonly document: RecipeDocument;
-  readonly chamber: ChamberFacts;
-  readonly library: Library;
-  readonly faults: Fault[];
-}
-
 /** Puts one block of setpoints, a step's own or a `throughout`, over what the layer holds so far. */
 export function overlay(layer: Layer, block: Throughout, pointer: Pointer, ground: Ground): void {
   const { plain } = ground.chamber;
@@ -41,11 +33,6 @@ export function overlay(layer: Layer, block: Throughout, pointer: Pointer, groun
   if (block.wafer !== undefined) putWafer(layer, block.wafer, plain);
   if (block.body !== undefined) putBody(layer, block.body, ground);
   if (block.other !== undefined) putOther(layer, block.other, pointer, ground);
-}
-
-/** Where a value of a block, or its key, stands in the recipe. */
-export function placeIn({ document }: Ground, pointer: Pointer, path: Pointer, part?: 'key'): Place {
-  return document.place([...pointer, ...path], part);
 }
 
 /** A pressure that is held, a throttle that is set and a volume that is filled exclude each other: the innermost counts. */
@@ -72,7 +59,12 @@ function heldAndSet(place: Place): Fault {
   return { place, found: 'a pressure that is held and a throttle that is set', right: 'one of both' };
 }
 
-function putComposition(layer: Layer, composition: NonNullable<Throughout['composition']>, pointer: Pointer, ground: Ground): void {
+function putComposition(
+  layer: Layer,
+  composition: NonNullable<Throughout['composition']>,
+  pointer: Pointer,
+  ground: Ground,
+): void {
   const gases = Object.keys(composition);
   for (const gas of gases) checkGas(gas, () => placeIn(ground, pointer, ['composition', gas], 'key'), ground);
   if (layer.parts.composition.length > 0) layer.forget('composition');

@@ -6,9 +6,8 @@ import type { Place } from '../shelf/place.ts';
 import type { Dimension } from '../units/dimensions.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import { dimensionOf } from './addresses.ts';
-import { unknownAddress } from './chamber-limits.ts';
-import type { Given } from './given.ts';
-import { readStandIn } from './stand-in.ts';
+import { unknownAddress } from './names.ts';
+import { readStandIn, type StandIn } from './stand-in.ts';
 
 /** Grades of a bound, gravest first. */
 export type Grade = 'error' | 'warning' | 'note';
@@ -71,23 +70,21 @@ export interface UsualRange {
   readonly place: Place;
 }
 
-/** What stands at an address where a recipe says nothing. */
-export interface StandIn {
-  readonly given: Given;
-  readonly place: Place;
-}
-
 /** The process that one document states, without what it is based on. */
 export function processFrom(document: Placed<Process>): Outcome<ProcessSpec> {
   const { content } = document;
   const faults: Fault[] = [];
-  const assumptions = Object.entries(content.assumptions ?? {}).map(([name, one]) => assumptionFrom(name, one, document));
+  const assumptions = Object.entries(content.assumptions ?? {}).map(([name, one]) =>
+    assumptionFrom(name, one, document),
+  );
   const spec: ProcessSpec = {
     name: content.name,
     title: content.title,
     ...(content.remark === undefined ? {} : { remark: content.remark }),
     ...(content.revision === undefined ? {} : { revision: content.revision }),
-    ...(content.based_on === undefined ? {} : { basedOn: content.based_on, basedOnPlace: document.place(['based_on']) }),
+    ...(content.based_on === undefined
+      ? {}
+      : { basedOn: content.based_on, basedOnPlace: document.place(['based_on']) }),
     assumptions,
     shows: content.shows ?? [],
     usual: usualRanges(document, faults),
@@ -162,16 +159,27 @@ function usualRanges(document: Placed<Process>, faults: Fault[]): readonly Usual
       faults.push(unknownAddress(address, place));
       continue;
     }
-    const limit = (side: 'at_least' | 'at_most') => usualLimit(limits[side], dimension, document.place(['usual', address, side]), faults);
+    const limit = (side: 'at_least' | 'at_most') =>
+      usualLimit(limits[side], dimension, document.place(['usual', address, side]), faults);
     const atLeast = limit('at_least');
     const atMost = limit('at_most');
-    ranges.push({ address, ...(atLeast === undefined ? {} : { atLeast }), ...(atMost === undefined ? {} : { atMost }), place });
+    ranges.push({
+      address,
+      ...(atLeast === undefined ? {} : { atLeast }),
+      ...(atMost === undefined ? {} : { atMost }),
+      place,
+    });
   }
   return ranges;
 }
 
 /** A limit as written, once it is sure that it can be read. */
-function usualLimit(is: string | number | undefined, dimension: Dimension, place: Place, faults: Fault[]): LateValue | undefined {
+function usualLimit(
+  is: string | number | undefined,
+  dimension: Dimension,
+  place: Place,
+  faults: Fault[],
+): LateValue | undefined {
   if (is === undefined) return undefined;
   const measure = readMeasure(is, dimension);
   if (!isUnitFault(measure)) return { is, place };
@@ -179,11 +187,13 @@ function usualLimit(is: string | number | undefined, dimension: Dimension, place
   return undefined;
 }
 
-function standIns({ content, place }: Placed<Process>, faults: Fault[]): readonly StandIn[] {
-  const entries: readonly [string, NonNullable<Process['stands_in']>[string]][] = Object.entries(content.stands_in ?? {});
+function standIns(document: Placed<Process>, faults: Fault[]): readonly StandIn[] {
+  const entries: readonly [string, NonNullable<Process['stands_in']>[string]][] = Object.entries(
+    document.content.stands_in ?? {},
+  );
   return entries.flatMap(([address, stated]) => {
-    const placeOf = (side: readonly string[], part?: 'key') => place(['stands_in', address, ...side], part);
-    const { value, faults: wrong } = readStandIn(address, stated, content.name, placeOf);
+    const placeOf = (side: readonly string[], part?: 'key') => document.place(['stands_in', address, ...side], part);
+    const { value, faults: wrong } = readStandIn(address, stated, document.content.name, placeOf);
     faults.push(...wrong);
     return value === undefined ? [] : [value];
   });

@@ -10,7 +10,10 @@ export interface Processes {
 }
 
 /** The processes of a site over those below it. One that is based on its own name changes the one below. */
-export function processesOver(documents: readonly ProcessDocument[], below: Processes): Processes & { readonly faults: readonly Fault[] } {
+export function processesOver(
+  documents: readonly ProcessDocument[],
+  below: Processes,
+): Processes & { readonly faults: readonly Fault[] } {
   const faults: Fault[] = [];
   const own = new Map<string, ProcessSpec>();
   for (const document of documents) {
@@ -19,7 +22,12 @@ export function processesOver(documents: readonly ProcessDocument[], below: Proc
     if (value === undefined) continue;
     const first = own.get(value.name);
     if (first === undefined) own.set(value.name, value);
-    else faults.push({ place: value.place, found: `a second process '${value.name}', the first is in ${first.place.file}`, right: 'a name of its own' });
+    else
+      faults.push({
+        place: value.place,
+        found: `a second process '${value.name}', the first is in ${first.place.file}`,
+        right: 'a name of its own',
+      });
   }
   const names = [...new Set([...own.keys(), ...below.names()])];
   const bases: Bases = { own, below, names, faults };
@@ -46,7 +54,10 @@ function withBase(spec: ProcessSpec, bases: Bases, above: readonly string[]): Pr
   const base = name === spec.name ? undefined : bases.own.get(name);
   const found = base === undefined ? bases.below.named(name) : withBase(base, bases, way);
   if (found !== undefined) return basedOn(spec, found);
-  if (above.length === 0) bases.faults.push(unknownName(spec.basedOnPlace ?? spec.place, 'process', name, bases.names, 'the name of a process'));
+  if (above.length === 0)
+    bases.faults.push(
+      unknownName(spec.basedOnPlace ?? spec.place, 'process', name, bases.names, 'the name of a process'),
+    );
   return spec;
 }
 

@@ -8,7 +8,8 @@ import { putDefaults } from './defaults.ts';
 import type { Given } from './given.ts';
 import { Layer } from './layer.ts';
 import { unknownName } from './names.ts';
-import { overlay, placeIn, type Ground } from './overlay.ts';
+import { placeIn, type Ground } from './ground.ts';
+import { overlay } from './overlay.ts';
 import type { ProcessSpec } from './process.ts';
 import { ResolvedStep } from './resolved-step.ts';
 import { setupOf } from './setup.ts';
@@ -60,7 +61,8 @@ function resolveEntries(entries: RecipeBlock['steps'], level: Level, walk: Walk)
   let duration: number | undefined = 0;
   for (const [index, entry] of entries.entries()) {
     const pointer = [...level.pointer, index];
-    const time = 'steps' in entry ? resolveCycle(entry, pointer, level, walk) : resolveStep(entry, pointer, level, walk);
+    const time =
+      'steps' in entry ? resolveCycle(entry, pointer, level, walk) : resolveStep(entry, pointer, level, walk);
     duration = duration === undefined || time === undefined ? undefined : duration + time;
   }
   return duration;
@@ -104,12 +106,15 @@ function processOf({ process }: StepBlock, pointer: Pointer, { site, ground }: W
   const spec = site.process(process);
   if (spec !== undefined) return spec;
   const place = placeIn(ground, pointer, ['process']);
-  ground.faults.push(unknownName(place, 'process', process, site.processNames(), 'the name of a process; `list processes` tells them'));
+  ground.faults.push(
+    unknownName(place, 'process', process, site.processNames(), 'the name of a process; `list processes` tells them'),
+  );
   return undefined;
 }
 
 function hangWaivers(waivers: readonly Waiver[], steps: readonly Step[], { site, ground }: Walk): void {
-  if (waivers.length > 0) ground.faults.push(...unmetWaivers(waivers, steps, (process) => waivableNames(site, process)));
+  if (waivers.length > 0)
+    ground.faults.push(...unmetWaivers(waivers, steps, (process) => waivableNames(site, process)));
 }
 
 function repeatOf({ repeat }: CycleBlock, pointer: Pointer, ground: Ground): Given | undefined {
@@ -117,7 +122,11 @@ function repeatOf({ repeat }: CycleBlock, pointer: Pointer, ground: Ground): Giv
   const given = givenFrom('repeat', repeat, STATED);
   const least = Math.min(given.value, given.span?.kind === 'range' ? (given.span.atLeast ?? given.value) : given.value);
   if (least >= 1) return given;
-  ground.faults.push({ place: placeIn(ground, pointer, ['repeat']), found: `a cycle that repeats ${least} times`, right: '1 or more' });
+  ground.faults.push({
+    place: placeIn(ground, pointer, ['repeat']),
+    found: `a cycle that repeats ${least} times`,
+    right: '1 or more',
+  });
   return undefined;
 }
 
@@ -138,15 +147,20 @@ function checkNames(entries: RecipeBlock['steps'], pointer: Pointer, ground: Gro
 function checkFill({ givens, parts }: Layer, faults: Fault[]): void {
   const fill = givens.get('fill_to');
   if (fill === undefined || parts.throttle === 'closed' || !('place' in fill.origin)) return;
-  faults.push({ place: fill.origin.place, found: 'fill_to with the throttle not closed', right: 'throttle: closed beside it' });
+  faults.push({
+    place: fill.origin.place,
+    found: 'fill_to with the throttle not closed',
+    right: 'throttle: closed beside it',
+  });
 }
 
-function recipeFrom({ content, source, place }: RecipeDocument, chamber: ChamberFacts, walk: Walk, duration: number | undefined): Recipe {
+function recipeFrom(document: RecipeDocument, chamber: ChamberFacts, walk: Walk, duration: number | undefined): Recipe {
+  const { content, source } = document;
   const { title, revision, qualified_on } = content;
   return {
     file: source.file,
     name: content.name,
-    place: place(['name']),
+    place: document.place(['name']),
     ...(title === undefined ? {} : { title }),
     ...(revision === undefined ? {} : { revision }),
     ...(qualified_on === undefined ? {} : { qualifiedOn: qualified_on }),

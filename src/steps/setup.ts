@@ -41,7 +41,11 @@ function putOptional(setup: Writable<Setup>, parts: Parts, chamber: ChamberFacts
 }
 
 /** Lines with a flow; one that is set to nothing brings nothing. */
-function flowingLines(names: readonly string[], givens: ReadonlyMap<string, Given>, { lines }: ChamberFacts): readonly Line[] {
+function flowingLines(
+  names: readonly string[],
+  givens: ReadonlyMap<string, Given>,
+  { lines }: ChamberFacts,
+): readonly Line[] {
   const flowing: Line[] = [];
   for (const name of names) {
     const line = lines.get(name);

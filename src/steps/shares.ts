@@ -15,7 +15,8 @@ export function putShares(layer: Layer, prefix: string, shares: WrittenShares): 
     else layer.put(`${prefix}.${name}`, share, STATED);
   }
   const [rest, second] = rests;
-  if (second !== undefined) return [{ place: second[1].place, found: 'two shares are the rest', right: 'one of them in percent' }];
+  if (second !== undefined)
+    return [{ place: second[1].place, found: 'two shares are the rest', right: 'one of them in percent' }];
   if (rest === undefined) return sum === undefined ? [] : wholeFaults(shares, sum);
   return putRest(layer, `${prefix}.${rest[0]}`, rest[1], sum);
 }
@@ -48,7 +49,14 @@ function putRest(layer: Layer, address: string, { place }: Rest, sum: Sum | unde
   }
   const { uncertainty } = sum;
   const value = 1 - sum.value;
-  if (value <= 0) return [{ place, found: `the other shares add up to ${percent(sum.value)}`, right: 'less than 100 % where one is the rest' }];
+  if (value <= 0)
+    return [
+      {
+        place,
+        found: `the other shares add up to ${percent(sum.value)}`,
+        right: 'less than 100 % where one is the rest',
+      },
+    ];
   layer.give({ address, value, uncertainty, dimension: 'fraction', unit: '%', origin: { place } });
   return [];
 }

@@ -14,15 +14,18 @@ export interface Show {
 
 export const PLAIN_SHOW: Show = { units: new Map(), bands: 'gas-dynamics', coverageFactor: 2 };
 
-export function showOf({ content, place }: SiteDocument, faults: Fault[]): Show {
-  const { bands, coverage_factor, ...written } = content.show ?? {};
+export function showOf(document: SiteDocument, faults: Fault[]): Show {
+  const { bands, coverage_factor, ...written } = document.content.show ?? {};
   const units = new Map<Dimension, string>();
   for (const [key, unit] of Object.entries(written)) {
     const dimension = key.replaceAll('_', '-');
     if (!isDimension(dimension)) continue;
     const known = unitSpelled(unit, dimension);
     if (known !== undefined) units.set(dimension, known.name);
-    else faults.push(unknownName(place(['show', key]), 'unit', unit, [...spellingsOf(dimension)], `a unit of ${dimension}`));
+    else
+      faults.push(
+        unknownName(document.place(['show', key]), 'unit', unit, [...spellingsOf(dimension)], `a unit of ${dimension}`),
+      );
   }
   return { units, bands: bands ?? PLAIN_SHOW.bands, coverageFactor: coverage_factor ?? PLAIN_SHOW.coverageFactor };
 }

@@ -7,10 +7,10 @@ import { matching } from '../shelf/walk.ts';
 type PatternKey = 'chambers' | 'substances' | 'processes' | 'recipes' | 'pass_over';
 
 /** The patterns that a site document has under a key. */
-export function patternsOf({ content, place }: SiteDocument, key: PatternKey, faults: Fault[]): readonly Pattern[] {
+export function patternsOf(document: SiteDocument, key: PatternKey, faults: Fault[]): readonly Pattern[] {
   const patterns: Pattern[] = [];
-  for (const [index, text] of (content[key] ?? []).entries()) {
-    const { value, faults: wrong } = readPattern(text, place([key, index]));
+  for (const [index, text] of (document.content[key] ?? []).entries()) {
+    const { value, faults: wrong } = readPattern(text, document.place([key, index]));
     faults.push(...wrong);
     if (value !== undefined) patterns.push(value);
   }
@@ -18,7 +18,13 @@ export function patternsOf({ content, place }: SiteDocument, key: PatternKey, fa
 }
 
 /** The files below a site's folder that meet the patterns under a key. */
-export function pathsOf(shelf: Shelf, folder: string, document: SiteDocument, key: PatternKey, faults: Fault[]): readonly string[] {
+export function pathsOf(
+  shelf: Shelf,
+  folder: string,
+  document: SiteDocument,
+  key: PatternKey,
+  faults: Fault[],
+): readonly string[] {
   const { value = [], faults: unread } = matching(shelf, folder, patternsOf(document, key, faults));
   faults.push(...unread);
   return value;

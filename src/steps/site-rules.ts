@@ -2,10 +2,10 @@ import type { SiteDocument } from '../documents/document.ts';
 import type { Fault } from '../shelf/fault.ts';
 import type { Place } from '../shelf/place.ts';
 import type { Library } from '../substances/library.ts';
-import { isDimension, type Dimension } from '../units/dimensions.ts';
+import type { Dimension } from '../units/dimensions.ts';
 import type { Tolerance } from '../units/measure.ts';
 import { fixedOf } from './facts.ts';
-import { checkGas } from './names.ts';
+import { checkGas, unknownName } from './names.ts';
 import { gradedLimits, type GradedLimits } from './process.ts';
 
 /** A ratio of flows that a site keeps within bounds, at every instant. */
@@ -32,12 +32,22 @@ export interface ClearingPoint {
   readonly time: number;
 }
 
-export function ratiosOf({ content, place }: SiteDocument, library: Library, faults: Fault[]): readonly RatioSpec[] {
-  return Object.entries(content.ratios ?? {}).map(([name, ratio]) => {
+/** What the rules of a site are read against. */
+export interface RuleGround {
+  readonly library: Library;
+  readonly chamberNames: readonly string[];
+  readonly faults: Fault[];
+}
+
+export function ratiosOf(document: SiteDocument, ground: RuleGround): readonly RatioSpec[] {
+  return Object.entries(document.content.ratios ?? {}).map(([name, ratio]) => {
     const { of, to, at_least, at_most, chambers, statement, source, level = 'warning' } = ratio;
-    for (const key of ['of', 'to'] as const) checkGas(ratio[key], () => place(['ratios', name, key]), { library, faults });
+    for (const key of ['of', 'to'] as const) {
+      checkGas(ratio[key], () => document.place(['ratios', name, key]), ground);
+    }
+    checkChambers(name, chambers ?? [], document, ground);
     const limits = (side: 'at_least' | 'at_most', bound: NonNullable<typeof at_least>) =>
-      gradedLimits(bound, level, (grade) => place(['ratios', name, side, ...grade]));
+      gradedLimits(bound, level, (grade) => document.place(['ratios', name, side, ...grade]));
     return {
       name,
       of,
@@ -47,30 +57,45 @@ export function ratiosOf({ content, place }: SiteDocument, library: Library, fau
       ...(chambers === undefined ? {} : { chambers }),
       ...(statement === undefined ? {} : { statement }),
       ...(source === undefined ? {} : { source }),
-      place: place(['ratios', name], 'key'),
+      place: document.place(['ratios', name], 'key'),
     };
   });
 }
 
-export function clearingOf({ content, place }: SiteDocument, library: Library, faults: Fault[]): Clearing {
+export function clearingOf(document: SiteDocument, ground: RuleGround): Clearing {
   const clearing = new Map<string, readonly ClearingPoint[]>();
-  for (const [gas, rows] of Object.entries(content.clearing ?? {})) {
-    checkGas(gas, () => place(['clearing', gas], 'key'), { library, faults });
+  for (const [gas, rows] of Object.entries(document.content.clearing ?? {})) {
+    checkGas(gas, () => document.place(['clearing', gas], 'key'), ground);
     const points = rows.flatMap((row) => {
       const wall = fixedOf(row.wall);
       const time = fixedOf(row.time);
       return wall === undefined || time === undefined ? [] : [{ wall: wall.measure.value, time: time.measure.value }];
     });
-    clearing.set(gas, points.sort((a, b) => a.wall - b.wall));
+    clearing.set(
+      gas,
+      points.sort((a, b) => a.wall - b.wall),
+    );
   }
   return clearing;
+}
+
+function checkChambers(ratio: string, chambers: readonly string[], document: SiteDocument, ground: RuleGround): void {
+  const { chamberNames, faults } = ground;
+  for (const [index, chamber] of chambers.entries()) {
+    if (chamberNames.includes(chamber)) continue;
+    const place = document.place(['ratios', ratio, 'chambers', index]);
+    faults.push(unknownName(place, 'chamber', chamber, chamberNames, 'the name of a chamber of the site'));
+  }
 }
 
 /** Tolerances of setpoints that give none of their own, by dimension. */
 export function tolerancesOf({ content }: SiteDocument): ReadonlyMap<Dimension, Tolerance> {
   const tolerances = new Map<Dimension, Tolerance>();
-  for (const [dimension, accuracy] of Object.entries(content.tolerances ?? {})) {
-    if (isDimension(dimension)) tolerances.set(dimension, accuracy.tolerance);
+  for (const dimension of WITH_TOLERANCE) {
+    const accuracy = content.tolerances?.[dimension];
+    if (accuracy !== undefined) tolerances.set(dimension, accuracy.tolerance);
   }
   return tolerances;
 }
+
+const WITH_TOLERANCE = ['time', 'temperature', 'pressure', 'flow', 'power', 'length'] as const;

@@ -62,7 +62,15 @@ export function openSite(shelf: Shelf, near: string): Outcome<Site> {
 
 /** A folder without a site document: what is built in, and chambers by path. */
 export function bareSite(shelf: Shelf, folder: string): Site {
-  const plain = { name: undefined, show: PLAIN_SHOW, clearing: new Map(), tolerances: new Map(), ratios: [], recipes: [], passOver: [] };
+  const plain = {
+    name: undefined,
+    show: PLAIN_SHOW,
+    clearing: new Map(),
+    tolerances: new Map(),
+    ratios: [],
+    recipes: [],
+    passOver: [],
+  };
   return assemble(shelf, folder, plain, BUILT_IN_LIBRARY, BUILT_IN_PROCESSES, new Chambers(shelf, folder, []));
 }
 
@@ -77,13 +85,14 @@ function siteFrom(shelf: Shelf, folder: string, document: SiteDocument): Outcome
   const chambers = new Chambers(shelf, folder, paths('chambers'));
   faults.push(...substances.faults, ...processes.faults, ...chambers.faults);
   const library = libraryOver([substances, BUILT_IN_SUBSTANCES]);
+  const ground = { library, chamberNames: chambers.names, faults };
   const rules = {
     document,
     name: content.name,
     show: showOf(document, faults),
-    clearing: clearingOf(document, library, faults),
+    clearing: clearingOf(document, ground),
     tolerances: tolerancesOf(document),
-    ratios: ratiosOf(document, library, faults),
+    ratios: ratiosOf(document, ground),
     recipes: patternsOf(document, 'recipes', faults),
     passOver: patternsOf(document, 'pass_over', faults),
   };
@@ -95,7 +104,14 @@ type Rules = Pick<Site, 'show' | 'clearing' | 'tolerances' | 'ratios' | 'recipes
   readonly name: string | undefined;
 };
 
-function assemble(shelf: Shelf, folder: string, { name, ...rules }: Rules, library: Library, processes: Processes, chambers: Chambers): Site {
+function assemble(
+  shelf: Shelf,
+  folder: string,
+  { name, ...rules }: Rules,
+  library: Library,
+  processes: Processes,
+  chambers: Chambers,
+): Site {
   const prepared = new WeakMap<ChamberDocument, Outcome<ChamberFacts>>();
   const chamber = (reference: string, recipe: RecipeDocument) => chambers.find(reference, recipe);
   return {

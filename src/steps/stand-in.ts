@@ -6,9 +6,15 @@ import type { Dimension } from '../units/dimensions.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import { dimensionOf } from './addresses.ts';
 import { STATED } from './accuracies.ts';
-import { unknownAddress } from './chamber-limits.ts';
-import type { StandIn } from './process.ts';
+import type { Given } from './given.ts';
+import { unknownAddress } from './names.ts';
 import { givenFrom, type Written } from './written.ts';
+
+/** What stands at an address where a recipe says nothing. */
+export interface StandIn {
+  readonly given: Given;
+  readonly place: Place;
+}
 
 type Stated = NonNullable<Process['stands_in']>[string];
 type PlaceOf = (side: readonly string[], part?: 'key') => Place;

@@ -99,7 +99,12 @@ export interface Recipe {
   readonly title?: string;
   readonly revision?: string;
   readonly qualifiedOn?: string;
-  readonly chamber: { readonly name: string; readonly file: string; readonly revision?: string; readonly title?: string };
+  readonly chamber: {
+    readonly name: string;
+    readonly file: string;
+    readonly revision?: string;
+    readonly title?: string;
+  };
   readonly cycles: readonly Cycle[];
   readonly steps: readonly Step[];
   /** Whole time with its repeats at their usual values, seconds; undefined where a step has none. */

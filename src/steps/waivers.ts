@@ -2,7 +2,7 @@ import type { Pointer } from '../documents/document.ts';
 import type { Waivers } from '../documents/generated/types.ts';
 import type { Fault } from '../shelf/fault.ts';
 import { unknownName } from './names.ts';
-import { placeIn, type Ground } from './overlay.ts';
+import { placeIn, type Ground } from './ground.ts';
 import type { Step, Waiver } from './step.ts';
 
 /** The waivers that stand at a recipe, cycle or step. */
@@ -12,7 +12,11 @@ export function waiversAt(waivers: Waivers | undefined, pointer: Pointer, ground
     const at = [...pointer, 'waivers', index];
     if (!isDay(waiver.until)) {
       const place = placeIn(ground, at, ['until']);
-      ground.faults.push({ place, found: `there is no day ${waiver.until}`, right: 'a day of the calendar, as in 2027-06-30' });
+      ground.faults.push({
+        place,
+        found: `there is no day ${waiver.until}`,
+        right: 'a day of the calendar, as in 2027-06-30',
+      });
     }
     return {
       assumption: waiver.assumption,
@@ -40,7 +44,9 @@ export function unmetWaivers(waivers: readonly Waiver[], steps: readonly Step[],
   const unmet = waivers.filter((waiver) => !steps.some((step) => step.waivers.includes(waiver)));
   if (unmet.length === 0) return [];
   const names = [...new Set(steps.flatMap(({ process }) => waivable(process)))];
-  return unmet.map(({ place, assumption }) => unknownName(place, 'assumption', assumption, names, 'the name of an assumption of the step'));
+  return unmet.map(({ place, assumption }) =>
+    unknownName(place, 'assumption', assumption, names, 'the name of an assumption of the step'),
+  );
 }
 
 const NO_WAIVERS: readonly Waiver[] = [];

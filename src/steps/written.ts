@@ -31,7 +31,9 @@ export function isWritten(setpoint: Setpoint): setpoint is Written {
 
 /** Whether a node of a document is a value that the reader has read. */
 export function isSetpoint(node: unknown): node is Setpoint {
-  return typeof node === 'object' && node !== null && 'kind' in node && typeof node.kind === 'string' && 'place' in node;
+  return (
+    typeof node === 'object' && node !== null && 'kind' in node && typeof node.kind === 'string' && 'place' in node
+  );
 }
 
 /** The value that stands for a setpoint: the start of a ramp, the usual value of a range, else the middle of its limits. */

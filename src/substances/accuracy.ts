@@ -11,7 +11,14 @@ export type Property = 'viscosity' | 'diffusion';
  */
 export function accuracyDatum(address: string, property: Property, { content }: Block<GasBlock>): Datum {
   const { spread, because } = accuracyOf(property, content);
-  return { address, value: 1, uncertainty: spread, dimension: 'number', unit: '', origin: { default: 'accuracy', because } };
+  return {
+    address,
+    value: 1,
+    uncertainty: spread,
+    dimension: 'number',
+    unit: '',
+    origin: { default: 'accuracy', because },
+  };
 }
 
 function accuracyOf(property: Property, { accuracy, collision }: GasBlock): { spread: number; because: string } {

@@ -4,7 +4,7 @@
  */
 export function countElements(formula: string): ReadonlyMap<string, number> | undefined {
   if (formula.length === 0 || formula.length > LONGEST) return undefined;
-  const open: Counts[] = [new Map()];
+  const open: Counts[] = [new Map<string, number>()];
   let end = 0;
   for (const { 0: whole, 1: symbol, 2: bracket, 3: digits, index } of formula.matchAll(PART)) {
     if (index !== end || !take(open, symbol, bracket, digits === '' ? 1 : Number(digits))) return undefined;

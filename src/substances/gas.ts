@@ -36,7 +36,10 @@ export interface Gas {
 }
 
 export function gasFrom(name: string, { content, place }: Block<GasBlock>): Gas {
-  const estimated = content.collision === undefined && content.critical !== undefined ? CRITICAL_POINT_RULE : content.collision?.estimated;
+  const estimated =
+    content.collision === undefined && content.critical !== undefined
+      ? CRITICAL_POINT_RULE
+      : content.collision?.estimated;
   return {
     name,
     title: content.title ?? name,
@@ -59,7 +62,9 @@ function tables({ heat_capacity, vapour_pressure, flammable_range, decomposes_ab
   return {
     ...(heat_capacity === undefined
       ? {}
-      : { heatCapacity: heat_capacity.at.map((row) => ({ temperature: valueOf(row.temperature), is: valueOf(row.is) })) }),
+      : {
+          heatCapacity: heat_capacity.at.map((row) => ({ temperature: valueOf(row.temperature), is: valueOf(row.is) })),
+        }),
     ...(vapour_pressure === undefined
       ? {}
       : { vapourPressure: { from: valueOf(vapour_pressure.from), to: valueOf(vapour_pressure.to) } }),
@@ -77,7 +82,13 @@ export function formulaOf(stated: string | undefined, name: string): ReadonlyMap
   return countElements(stated ?? name) ?? new Map();
 }
 
-export function remarksOf({ remark, remarks = [] }: { readonly remark?: string; readonly remarks?: readonly string[] }): readonly string[] {
+export function remarksOf({
+  remark,
+  remarks = [],
+}: {
+  readonly remark?: string;
+  readonly remarks?: readonly string[];
+}): readonly string[] {
   return remark === undefined ? remarks : [remark, ...remarks];
 }
 

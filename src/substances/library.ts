@@ -51,7 +51,9 @@ function datumAt(address: string, find: Find): Datum | undefined {
   if (!isSort(sort)) return undefined;
   const block = find(sort, name);
   if (block === undefined) return undefined;
-  return datumOf(address, keys, block) ?? (sort === 'gases' ? estimatedAt(address, keys, find('gases', name)) : undefined);
+  return (
+    datumOf(address, keys, block) ?? (sort === 'gases' ? estimatedAt(address, keys, find('gases', name)) : undefined)
+  );
 }
 
 function accuracyAt(address: string, property: string, gas: string, find: Find): Datum | undefined {
@@ -61,7 +63,11 @@ function accuracyAt(address: string, property: string, gas: string, find: Find):
 }
 
 /** A collision value of a gas of which only the critical point is known. */
-function estimatedAt(address: string, keys: readonly string[], block: Block<BlocksBySort['gases']> | undefined): Datum | undefined {
+function estimatedAt(
+  address: string,
+  keys: readonly string[],
+  block: Block<BlocksBySort['gases']> | undefined,
+): Datum | undefined {
   const critical = block?.content.critical;
   if (critical === undefined || block?.content.collision !== undefined || keys[0] !== 'collision') return undefined;
   const { diameter, wellDepth } = estimatedPair(critical);

@@ -7,7 +7,7 @@ import type { AssumptionSpec, GradedLimits, ProcessSpec } from '../steps/process
 import type { Dimension } from '../units/dimensions.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import { nearest } from '../units/suggest.ts';
-import { LEVELS } from './hold.ts';
+import { LEVELS, limitsOf, type GradedLimit } from './hold.ts';
 import type { Bound, Grades, Level } from './verdict.ts';
 
 /** An assumption of a process, ready to be held against a step: its numbers are named, its bound is in SI. */
@@ -19,6 +19,8 @@ export interface Assumption {
   readonly reference: Reference;
   readonly over?: Reference;
   readonly bound: Bound;
+  /** The same, gravest grade first. */
+  readonly limits: readonly GradedLimit[];
   /** Judged only if the recipe supplies what the number needs; else it does not apply. */
   readonly whenGiven: boolean;
   /** Judged at the value as set: its uncertainty does not count. */
@@ -47,7 +49,7 @@ function read(process: string, spec: AssumptionSpec, faults: Fault[]): Assumptio
   const reference = numberNamed(spec.quantity, spec.quantityPlace, faults);
   const over = spec.over === undefined ? undefined : divisorNamed(spec.over, spec.overPlace ?? spec.place, faults);
   if (reference === undefined || (spec.over !== undefined && over === undefined)) return undefined;
-  const dimension = dimensionOfNumber(reference, over);
+  const bound = boundIn(dimensionOfNumber(reference, over), spec, faults);
   return {
     process,
     name: spec.name,
@@ -55,7 +57,8 @@ function read(process: string, spec: AssumptionSpec, faults: Fault[]): Assumptio
     source: spec.source,
     reference,
     ...(over === undefined ? {} : { over }),
-    bound: boundIn(dimension, spec, faults),
+    bound,
+    limits: limitsOf(bound),
     whenGiven: spec.when === 'given',
     nominal: quantityNamed(reference.id)?.nominal === true,
     ...(spec.reviewLevel === undefined ? {} : { reviewLevel: spec.reviewLevel }),

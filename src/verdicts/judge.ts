@@ -1,6 +1,5 @@
 import type { Run, StepRun } from '../quantities/run.ts';
 import type { Fault } from '../shelf/fault.ts';
-import { isDefault } from '../steps/given.ts';
 import type { Recipe, Waiver } from '../steps/step.ts';
 import type { Site } from '../steps/site.ts';
 import { BESIDE_EVERY_STEP } from '../steps/waivable.ts';
@@ -43,41 +42,20 @@ export function processFaults(site: Site): readonly Fault[] {
 function verdictsOf(run: StepRun, { site, recipe }: Run): readonly Verdict[] {
   const cases = casesOf(run);
   const coverage = site.show.coverageFactor;
-  const verdicts = assumptionsFor(run, site).map((assumption) =>
-    placed(judgeAssumption(assumption, cases, coverage), run),
-  );
+  const verdicts = assumptionsFor(run, site).map((assumption) => judgeAssumption(assumption, cases, coverage));
   return [...verdicts, ...judgeRatios(run, recipe.chamber.name, site, cases)];
 }
 
 /** Those of the intended process, then those held beside every step. */
 function assumptionsFor(run: StepRun, site: Site): readonly Assumption[] {
-  const { step } = run;
-  const own = site.process(step.process);
-  const beside = BESIDE_EVERY_STEP.flatMap((name) => site.process(name) ?? []);
-  return [
-    ...(own === undefined ? [] : [...(assumptionsOf(own).value ?? []), ...usualRanges(own, step)]),
-    ...beside.flatMap((process) => assumptionsOf(process).value ?? []),
-    ...chamberLimits(step),
-  ];
-}
-
-/** A verdict stands at the first setpoint that could cure it and that the recipe states, else at the step. */
-function placed(verdict: Verdict, { step }: StepRun): Verdict {
-  if (verdict.kind === 'pass' || verdict.kind === 'notApplicable') return { ...verdict, place: step.place };
-  for (const address of verdict.cure) {
-    const origin = (step.givens.get(address) ?? firstBelow(step.givens, address))?.origin;
-    if (origin !== undefined && !isDefault(origin) && origin.place.file === step.place.file) {
-      return { ...verdict, place: origin.place };
-    }
+  const own = site.process(run.step.process);
+  const assumptions = own === undefined ? [] : [...(assumptionsOf(own).value ?? []), ...usualRanges(own)];
+  for (const name of BESIDE_EVERY_STEP) {
+    const process = site.process(name);
+    if (process !== undefined) assumptions.push(...(assumptionsOf(process).value ?? []));
   }
-  return { ...verdict, place: step.place };
-}
-
-/** The first given under an address that stands for several: `flows` for `flows.Ar`. */
-function firstBelow<T>(givens: ReadonlyMap<string, T>, address: string): T | undefined {
-  const prefix = `${address}.`;
-  for (const [key, given] of givens) if (key.startsWith(prefix)) return given;
-  return undefined;
+  assumptions.push(...chamberLimits(run));
+  return assumptions;
 }
 
 function revisionNotes({ qualifiedOn, chamber, place }: Recipe): Note[] {

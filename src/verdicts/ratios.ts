@@ -4,7 +4,7 @@ import type { Site } from '../steps/site.ts';
 import type { RatioSpec } from '../steps/site-rules.ts';
 import { boundIn, type Assumption } from './assumption.ts';
 import type { Case } from './cases.ts';
-import { gravest } from './hold.ts';
+import { limitsOf } from './hold.ts';
 import { judgeAssumption } from './judge-assumption.ts';
 import type { Bound, Verdict } from './verdict.ts';
 
@@ -30,17 +30,19 @@ function judgeRatio(ratio: RatioSpec, run: StepRun, cases: readonly Case[], cove
   // The gas flows without the one it is held against: the ratio has no number, and is above every bound.
   const { because: _, ...rest } = verdict;
   const kind = assumption.bound.at_most === undefined ? 'pass' : 'fail';
-  return { ...rest, kind, level: gravest(assumption.bound), remarks: [`${ratio.of} flows without ${ratio.to}`] };
+  return { ...rest, kind, level: assumption.limits[0]?.level ?? 'note', remarks: [`${ratio.of} flows without ${ratio.to}`] };
 }
 
-function assumptionOf({ name, of, to, statement, source, place, ...limits }: RatioSpec, run: StepRun): Assumption {
+function assumptionOf({ name, of, to, statement, source, place, ...stated }: RatioSpec, run: StepRun): Assumption {
+  const bound = kept(stated);
   return {
     process: 'site',
     name,
     statement: statement ?? `The flow of ${of} over that of ${to} stays within the site's bounds.`,
     source: source ?? 'stated by the site',
     reference: { id: 'flow-ratio', of: `${of}/${to}` },
-    bound: kept(limits),
+    bound,
+    limits: limitsOf(bound),
     whenGiven: true,
     nominal: false,
     cure: run.step.setup.lines

@@ -1,9 +1,12 @@
+import type { Plan } from '../quantities/plan.ts';
+import type { StepRun } from '../quantities/run.ts';
 import type { Fault } from '../shelf/fault.ts';
 import { dimensionOf } from '../steps/addresses.ts';
 import type { LateValue, ProcessSpec, UsualRange } from '../steps/process.ts';
 import type { Step } from '../steps/step.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import type { Assumption } from './assumption.ts';
+import { limitsOf } from './hold.ts';
 import type { Bound } from './verdict.ts';
 
 /* Setpoints held against limits that a document states for them: the chamber's, and what is usual for the process. */
@@ -12,46 +15,74 @@ import type { Bound } from './verdict.ts';
 const UNUSUAL_FACTOR = 10;
 
 /** The limits that a step's chamber sets to its setpoints: `chamber.limits.pressure.at_most`. */
-export function chamberLimits(step: Step): readonly Assumption[] {
-  const limited = new Map<string, Bound>();
-  for (const [address, { value }] of step.givens) {
-    if (!address.startsWith(LIMITS)) continue;
-    const cut = address.lastIndexOf('.');
-    const setpoint = address.slice(LIMITS.length, cut);
-    const side = address.slice(cut + 1) === 'at_least' ? 'at_least' : 'at_most';
-    limited.set(setpoint, { ...limited.get(setpoint), [side]: { error: value } });
+export function chamberLimits({ plan, step }: StepRun): readonly Assumption[] {
+  let addresses = LIMITED.get(plan);
+  if (addresses === undefined) {
+    addresses = limitAddresses(plan.scope.addresses(LIMITS));
+    LIMITED.set(plan, addresses);
   }
-  return [...limited].map(([setpoint, bound]) => ({
-    ...about(setpoint, step),
-    process: 'chamber-fit',
-    name: `${setpoint}-limits`,
-    statement: `The chamber allows the setpoint of ${setpoint}.`,
-    source: 'limits stated by the chamber',
-    bound,
-  }));
+  return addresses.map((setpoint) => limitOf(setpoint, step));
 }
 
 const LIMITS = 'chamber.limits.';
 
-/** Setpoints of a step that a factor of ten separates from what is usual for its process. */
-export function usualRanges(process: ProcessSpec, step: Step): readonly Assumption[] {
-  return process.usual.map((range) => ({
-    ...about(range.address, step),
-    process: process.name,
-    name: `usual-${range.address}`,
-    statement: `The setpoint of ${range.address} is near what is usual; else: is the unit right?`,
-    source: `usual range of ${process.name}, widened by a factor ${UNUSUAL_FACTOR}`,
-    bound: widened(range),
-  }));
+/** Setpoints with limits, by plan: steps of one plan have the same. */
+const LIMITED = new WeakMap<Plan, readonly string[]>();
+
+function limitAddresses(addresses: readonly string[]): readonly string[] {
+  return [...new Set(addresses.map((address) => address.slice(LIMITS.length, address.lastIndexOf('.'))))];
 }
 
-function about(address: string, step: Step) {
+function limitOf(setpoint: string, { givens, place }: Step): Assumption {
+  const least = givens.get(`${LIMITS}${setpoint}.at_least`)?.value;
+  const most = givens.get(`${LIMITS}${setpoint}.at_most`)?.value;
+  return about(setpoint, {
+    process: 'chamber-fit',
+    name: `${setpoint}-limits`,
+    statement: `The chamber allows the setpoint of ${setpoint}.`,
+    source: 'limits stated by the chamber',
+    bound: {
+      ...(least === undefined ? {} : { at_least: { error: least } }),
+      ...(most === undefined ? {} : { at_most: { error: most } }),
+    },
+    place,
+  });
+}
+
+/** Setpoints that a factor of ten separates from what is usual for a process. */
+export function usualRanges(process: ProcessSpec): readonly Assumption[] {
+  let ranges = USUAL.get(process);
+  if (ranges === undefined) {
+    ranges = process.usual.map((range) => usualOf(range, process));
+    USUAL.set(process, ranges);
+  }
+  return ranges;
+}
+
+const USUAL = new WeakMap<ProcessSpec, readonly Assumption[]>();
+
+function usualOf(range: UsualRange, { name, place }: ProcessSpec): Assumption {
+  return about(range.address, {
+    process: name,
+    name: `usual-${range.address}`,
+    statement: `The setpoint of ${range.address} is near what is usual; else: is the unit right?`,
+    source: `usual range of ${name}, widened by a factor ${UNUSUAL_FACTOR}`,
+    bound: widened(range),
+    place,
+  });
+}
+
+type Stated = Pick<Assumption, 'process' | 'name' | 'statement' | 'source' | 'bound' | 'place'>;
+
+/** An assumption on a setpoint itself, as set. */
+function about(address: string, stated: Stated): Assumption {
   return {
+    ...stated,
     reference: { id: 'setpoint', of: address },
+    limits: limitsOf(stated.bound),
     whenGiven: true,
     nominal: true,
     cure: [address],
-    place: step.place,
   };
 }
 

@@ -15,12 +15,19 @@ describe('addresses', () => {
     expect(dimensionOf(address)).toBe(dimension);
   });
 
-  test.each(['', 'flows', 'flows.', 'presure', 'targets.ti.colour', 'lengths.a.b', 'a.b.c.d', 'constructor', 'other.x'])(
-    'no step has a setpoint %j',
-    (address) => {
-      expect(dimensionOf(address)).toBeUndefined();
-    },
-  );
+  test.each([
+    '',
+    'flows',
+    'flows.',
+    'presure',
+    'targets.ti.colour',
+    'lengths.a.b',
+    'a.b.c.d',
+    'constructor',
+    'other.x',
+  ])('no step has a setpoint %j', (address) => {
+    expect(dimensionOf(address)).toBeUndefined();
+  });
 
   test.each([
     ['presure', 'pressure'],

@@ -4,16 +4,24 @@ import type { Given } from '../../src/steps/given.ts';
 import { Givens } from '../../src/steps/givens.ts';
 
 const origin = { default: 'test', because: 'test' };
-const given = (address: string, value: number): Given => ({ address, value, uncertainty: 0, dimension: 'number', unit: '', origin });
+const given = (address: string, value: number): Given => ({
+  address,
+  value,
+  uncertainty: 0,
+  dimension: 'number',
+  unit: '',
+  origin,
+});
 
 const address = fc.constantFrom('a', 'b', 'c', 'd');
 const move = fc.record({ address, value: fc.option(fc.integer()) });
 const moves = fc.array(move, { maxLength: 12 });
 
-function apply(to: { set(address: string, value: number): void; delete(address: string): void }, list: readonly { address: string; value: number | null }[]): void {
-  for (const one of list) {
-    if (one.value === null) to.delete(one.address);
-    else to.set(one.address, one.value);
+function apply(to: Givens | Map<string, number>, list: readonly { address: string; value: number | null }[]): void {
+  for (const { address: name, value } of list) {
+    if (value === null) to.delete(name);
+    else if (to instanceof Givens) to.set(given(name, value));
+    else to.set(name, value);
   }
 }
 
@@ -25,9 +33,9 @@ describe('layered givens', () => {
         apply(plain, below);
         apply(plain, above);
         const lower = new Givens();
-        apply({ set: (name, value) => lower.set(given(name, value)), delete: (name) => lower.delete(name) }, below);
+        apply(lower, below);
         const upper = new Givens(lower.flattened());
-        apply({ set: (name, value) => upper.set(given(name, value)), delete: (name) => upper.delete(name) }, above);
+        apply(upper, above);
         const sorted = (entries: Iterable<[string, number]>) => [...entries].sort(([a], [b]) => (a < b ? -1 : 1));
         const values = [...upper].map(([name, one]): [string, number] => [name, one.value]);
         expect(sorted(values)).toEqual(sorted(plain));

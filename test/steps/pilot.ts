@@ -54,7 +54,10 @@ export function site(files: Files = {}): Site {
 }
 
 /** Resolves the steps of a recipe on heron. `head` stands before them. */
-export function resolve(steps: string, { head = '', files = {} }: { head?: string; files?: Files } = {}): Outcome<Recipe> {
+export function resolve(
+  steps: string,
+  { head = '', files = {} }: { head?: string; files?: Files } = {},
+): Outcome<Recipe> {
   return resolveText(`regimen: recipe 1\nname: trial\nchamber: heron\n${head}steps:\n${steps}\n`, files);
 }
 

@@ -1,6 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { hold } from '../../src/verdicts/hold.ts';
+import { hold as holdLimits, limitsOf } from '../../src/verdicts/hold.ts';
+import type { Bound } from '../../src/verdicts/verdict.ts';
+
+const hold = (value: number, uncertainty: number, bound: Bound) => holdLimits(value, uncertainty, limitsOf(bound));
 
 describe('a value against a bound', () => {
   const graded = { at_most: { note: 1, warning: 5 } };

@@ -32,19 +32,35 @@ function drawBlock(block: Block): readonly string[] {
 }
 
 function drawRecipe({ name, revision, chamber, file, size, outcome }: RecipeHead): readonly string[] {
-  const facts = [...(revision === undefined ? [] : [`rev ${revision}`]), `chamber ${chamber}`, ...size, ...(outcome === undefined ? [] : [outcome])];
-  return [`## ${escaped(name)}`, '', `\`${file}\`: ${escaped(facts.join(', '))}`];
+  const facts = [
+    ...(revision === undefined ? [] : [`rev ${revision}`]),
+    `chamber ${chamber}`,
+    ...size,
+    ...(outcome === undefined ? [] : [outcome]),
+  ];
+  return [`## ${escaped(name)}`, '', `${file === undefined ? '' : `\`${file}\`: `}${escaped(facts.join(', '))}`];
 }
 
 /** Steps as a table, then what was found in each. */
 function drawSteps({ steps }: Steps): readonly string[] {
-  const columns = [RIGHT('#'), LEFT('step'), LEFT('process'), RIGHT('time'), RIGHT('pressure'), LEFT('flows'), LEFT('outcome')];
+  const columns = [
+    RIGHT('#'),
+    LEFT('step'),
+    LEFT('process'),
+    RIGHT('time'),
+    RIGHT('pressure'),
+    LEFT('flows'),
+    LEFT('outcome'),
+  ];
   const rows = steps.map((step) =>
     step.kind === 'cycle'
       ? ['', step.path, '', step.repeat, '', '', '']
       : [String(step.number), step.path, step.process, step.time, step.pressure, step.flows, outcomeOf(step)],
   );
-  return [...drawTable({ kind: 'table', columns, rows, key: 0 }), ...steps.flatMap((step) => (step.kind === 'cycle' ? [] : drawFindings(step)))];
+  return [
+    ...drawTable({ kind: 'table', columns, rows, key: 0 }),
+    ...steps.flatMap((step) => (step.kind === 'cycle' ? [] : drawFindings(step))),
+  ];
 }
 
 const LEFT = (title: string) => ({ title, align: 'left' as const });
@@ -71,10 +87,14 @@ function drawFinding({ word, level, lead, sentences, where }: Finding): readonly
 
 function drawTable({ columns, rows }: Omit<Table, 'key'> & { readonly key: number }): readonly string[] {
   const cells = rows.map((row) => columns.map((_, index) => inCell(row[index] ?? '')));
-  const widths = columns.map(({ title }, index) => Math.max(3, widthOf(inCell(title)), ...cells.map((row) => widthOf(row[index] ?? ''))));
+  const widths = columns.map(({ title }, index) =>
+    Math.max(3, widthOf(inCell(title)), ...cells.map((row) => widthOf(row[index] ?? ''))),
+  );
   const line = (texts: readonly string[]): string =>
     `| ${texts.map((text, index) => (columns[index]?.align === 'right' ? padStart : padEnd)(text, widths[index] ?? 0)).join(' | ')} |`;
-  const rule = columns.map(({ align }, index) => (align === 'right' ? `${'-'.repeat((widths[index] ?? 3) - 1)}:` : '-'.repeat(widths[index] ?? 3)));
+  const rule = columns.map(({ align }, index) =>
+    align === 'right' ? `${'-'.repeat((widths[index] ?? 3) - 1)}:` : '-'.repeat(widths[index] ?? 3),
+  );
   return [line(columns.map(({ title }) => inCell(title))), line(rule), ...cells.map(line)];
 }
 
@@ -87,9 +107,14 @@ function drawEntries({ entries }: Entries): readonly string[] {
 
 function drawChain({ links }: Chain): readonly string[] {
   return links.flatMap(({ number, symbol, name, value, si, from, grounds, remarks }) => {
-    const sources = [grounds, from.length === 0 ? '' : `from ${from.join(', ')}`, ...remarks].filter((text) => text !== '');
+    const sources = [grounds, from.length === 0 ? '' : `from ${from.join(', ')}`, ...remarks].filter(
+      (text) => text !== '',
+    );
     const named = name === '' ? `\`${symbol}\`` : `${escaped(symbol)} (${escaped(name)})`;
-    return [`${number}. ${named} = ${escaped(value)}${si === undefined ? '' : ` = ${escaped(si)}`}`, ...sources.map((text) => `   ${escaped(text)}`)];
+    return [
+      `${number}. ${named} = ${escaped(value)}${si === undefined ? '' : ` = ${escaped(si)}`}`,
+      ...sources.map((text) => `   ${escaped(text)}`),
+    ];
   });
 }
 

@@ -5,7 +5,11 @@ import { padEnd, padStart, widthOf, wrap } from './wrap.ts';
 /** Steps with common columns: number, path, process, time, pressure, flows, and to the right the outcome. */
 export function drawSteps({ steps }: Steps, canvas: Canvas): readonly string[] {
   const widths = columnsOf(steps);
-  return steps.flatMap((step) => (step.kind === 'cycle' ? [cycleLine(step, canvas)] : [...stepLines(step, widths, canvas), ...findingLines(step, canvas)]));
+  return steps.flatMap((step) =>
+    step.kind === 'cycle'
+      ? [cycleLine(step, canvas)]
+      : [...stepLines(step, widths, canvas), ...findingLines(step, canvas)],
+  );
 }
 
 /** Indent of what belongs to a step. */
@@ -46,7 +50,13 @@ function stepLines(step: StepBlock, widths: Widths, { width, styles }: Canvas): 
   const fits = widthOf(name) + widths.process + widths.time + widths.pressure + 4 * GAP + widths.flows + GAP <= width;
   if (fits) return withRight(styled, widthOf(left), outcome, { width, styles });
   const short = `${name}  ${process}`;
-  const below = wrap(facts.map((fact) => fact.trim()).filter((fact) => fact !== '').join('  '), width - INDENT);
+  const below = wrap(
+    facts
+      .map((fact) => fact.trim())
+      .filter((fact) => fact !== '')
+      .join('  '),
+    width - INDENT,
+  );
   return [
     ...withRight(styles.strong(name) + short.slice(name.length), widthOf(short.trimEnd()), outcome, { width, styles }),
     ...below.map((line) => ' '.repeat(INDENT) + styles.faint(line)),
@@ -57,7 +67,7 @@ function stepLines(step: StepBlock, widths: Widths, { width, styles }: Canvas): 
 function withRight(styled: string, taken: number, right: string, { width, styles }: Canvas): readonly string[] {
   if (right === '') return [styled];
   const room = width - taken - widthOf(right);
-  if (room >= GAP) return [styled.trimEnd() + ' '.repeat(room + (widthOfTrimmed(styled))) + styles.faint(right)];
+  if (room >= GAP) return [styled.trimEnd() + ' '.repeat(room + widthOfTrimmed(styled)) + styles.faint(right)];
   return [styled, ...wrap(right, width - INDENT).map((line) => ' '.repeat(INDENT) + styles.faint(line))];
 }
 
@@ -76,21 +86,35 @@ function findingLines({ findings }: StepBlock, canvas: Canvas): readonly string[
 function drawFinding({ word, level, lead, sentences, where }: Finding, canvas: Canvas): readonly string[] {
   const { width, styles } = canvas;
   const kind = padEnd(word, 6) + ' '.repeat(GAP) + padEnd(level ?? '', 7) + ' '.repeat(GAP);
-  const strong = word === 'fail' ? styles.strong : word === 'pass' || word === 'open' || word === 'waived' ? styles.faint : styles.plain;
+  const strong =
+    word === 'fail'
+      ? styles.strong
+      : word === 'pass' || word === 'open' || word === 'waived'
+        ? styles.faint
+        : styles.plain;
+  // A note is not worth a hue.
+  const begin = level === 'note' ? strong : styles.word[word];
   const room = width - TEXT_AT;
   const lines = [
     ...wrap(lead, room).map((line) => ({ line, style: strong })),
-    ...sentences.flatMap(({ text, weight }) => wrap(text, room).map((line) => ({ line, style: weight === 'detail' ? styles.faint : styles.plain }))),
+    ...sentences.flatMap(({ text, weight }) =>
+      wrap(text, room).map((line) => ({ line, style: weight === 'detail' ? styles.faint : styles.plain })),
+    ),
   ];
   const drawn = lines.map(({ line, style }, index) => {
-    const indent = index === 0 ? ' '.repeat(INDENT) + styles.word[word](kind) : ' '.repeat(TEXT_AT);
+    const indent = index === 0 ? ' '.repeat(INDENT) + begin(kind) : ' '.repeat(TEXT_AT);
     return indent + style(line);
   });
   return withWhere(drawn, widthOf(lines[0]?.line ?? ''), where, canvas);
 }
 
 /** Where a finding stands: at the right edge of its first line if there is room, else below. */
-function withWhere(lines: readonly string[], firstWidth: number, where: readonly string[], { width, styles }: Canvas): readonly string[] {
+function withWhere(
+  lines: readonly string[],
+  firstWidth: number,
+  where: readonly string[],
+  { width, styles }: Canvas,
+): readonly string[] {
   if (where.length === 0) return lines;
   const text = where.join('  ');
   const [first = '', ...rest] = lines;

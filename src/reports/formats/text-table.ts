@@ -4,19 +4,51 @@ import { padEnd, padStart, widthOf, wrap } from './wrap.ts';
 
 const GAP = 2;
 /** A column that wraps is not made narrower than this. */
-const NARROWEST = 24;
+const NARROWEST = 12;
 
 /** A table as wide as its cells need. One too wide is drawn in pieces, each with the key columns. */
 export function drawTable(table: Table, canvas: Canvas): readonly string[] {
   const widths = widthsOf(table, canvas.width);
-  return piecesOf(table, widths, canvas.width).flatMap((piece, index) => [...(index === 0 ? [] : ['']), ...drawPiece(table, piece, widths, canvas)]);
+  return piecesOf(table, widths, canvas.width).flatMap((piece, index) => [
+    ...(index === 0 ? [] : ['']),
+    ...drawPiece(table, piece, widths, canvas),
+  ]);
 }
 
+/** What each column needs; where that is too much, the widest of those that wrap give way first. */
 function widthsOf({ columns, rows }: Table, width: number): readonly number[] {
-  const natural = columns.map(({ title }, index) => rows.reduce((widest, row) => Math.max(widest, widthOf(row[index] ?? '')), widthOf(title)));
-  const total = natural.reduce((sum, one) => sum + one + GAP, -GAP);
-  if (total <= width) return natural;
-  return natural.map((one, index) => (columns[index]?.wraps === true ? Math.max(NARROWEST, Math.min(one, one - (total - width))) : one));
+  const widths = columns.map(({ title }, index) =>
+    rows.reduce((widest, row) => Math.max(widest, widthOf(row[index] ?? '')), widthOf(title)),
+  );
+  const floors = columns.map((_, index) =>
+    rows.reduce((longest, row) => Math.max(longest, longestWord(row[index] ?? '')), NARROWEST),
+  );
+  let excess = widths.reduce((sum, one) => sum + one + GAP, -GAP) - width;
+  while (excess > 0) {
+    const widest = widestWrapping(columns, widths, floors);
+    if (widest === undefined) break;
+    widths[widest] = (widths[widest] ?? 0) - 1;
+    excess -= 1;
+  }
+  return widths;
+}
+
+function longestWord(text: string): number {
+  return text.split(' ').reduce((longest, word) => Math.max(longest, widthOf(word)), 0);
+}
+
+function widestWrapping(
+  columns: readonly Column[],
+  widths: readonly number[],
+  floors: readonly number[],
+): number | undefined {
+  let found: number | undefined;
+  for (const [index, { wraps }] of columns.entries()) {
+    const width = widths[index] ?? 0;
+    if (wraps === true && width > (floors[index] ?? 0) && width > (found === undefined ? 0 : (widths[found] ?? 0)))
+      found = index;
+  }
+  return found;
 }
 
 /** Which columns stand together. */
@@ -39,11 +71,29 @@ function piecesOf({ columns, key }: Table, widths: readonly number[], width: num
   return [...pieces, piece];
 }
 
-function drawPiece({ columns, rows }: Table, piece: readonly number[], widths: readonly number[], { styles }: Canvas): readonly string[] {
+function drawPiece(
+  { columns, rows }: Table,
+  piece: readonly number[],
+  widths: readonly number[],
+  { styles }: Canvas,
+): readonly string[] {
   const chosen = piece.flatMap((index) => columns[index] ?? []);
   const sizes = piece.map((index) => widths[index] ?? 0);
-  const title = drawRow(chosen.map((column) => column.title), chosen, sizes).map(styles.faint);
-  return [...title, ...rows.flatMap((row) => drawRow(piece.map((index) => row[index] ?? ''), chosen, sizes))];
+  const title = drawRow(
+    chosen.map((column) => column.title),
+    chosen,
+    sizes,
+  ).map(styles.faint);
+  return [
+    ...title,
+    ...rows.flatMap((row) =>
+      drawRow(
+        piece.map((index) => row[index] ?? ''),
+        chosen,
+        sizes,
+      ),
+    ),
+  ];
 }
 
 /** A row of cells, of as many lines as its longest cell needs. */

@@ -70,16 +70,27 @@ function drawHeading({ text, aside }: Heading, { width, styles }: Canvas): reado
   return [styles.strong(text), ...wrap(beside.trim(), width).map(styles.faint)];
 }
 
-/** Name, revisions and file to the left, size and outcome to the right; in two lines where one is too short. */
-function drawRecipe({ name, revision, chamber, file, size, outcome }: RecipeHead, { width, styles }: Canvas): readonly string[] {
-  const head = [revision === undefined ? '' : `rev ${revision}`, chamber].filter((text) => text !== '').join('   ');
-  const right = [...size, ...(outcome === undefined ? [] : [outcome])].join('   ');
-  const [bare, full] = [`${name}   ${head}`, `${name}   ${head}   ${file}`];
-  const styled = (left: string): string => styles.strong(name) + styles.faint(left.slice(name.length));
+/** Name, revisions and file to the left, size and outcome to the right; what finds no room stands below. */
+function drawRecipe(
+  { name, revision, chamber, file, size, outcome }: RecipeHead,
+  { width, styles }: Canvas,
+): readonly string[] {
+  const facts = [...(revision === undefined ? [] : [`rev ${revision}`]), chamber];
+  const right = [...size, ...(outcome === undefined ? [] : [outcome])].join(GAP);
+  const bare = [name, ...facts].join(GAP);
+  const full = file === undefined ? bare : `${bare}${GAP}${file}`;
+  const head = (left: string): string => styles.strong(name) + styles.faint(left.slice(name.length));
+  const line = (left: string): string => head(left) + ' '.repeat(width - widthOf(left) - widthOf(right)) + right;
+  const below = (text: string | undefined): readonly string[] =>
+    text === undefined ? [] : wrap(text, width - 4).map((one) => `    ${styles.faint(one)}`);
   const room = width - widthOf(right) - GAP.length;
-  if (widthOf(full) <= room) return [padEnd('', 0) + styled(full) + ' '.repeat(width - widthOf(full) - widthOf(right)) + right];
-  if (widthOf(bare) <= room) return [styled(bare) + ' '.repeat(width - widthOf(bare) - widthOf(right)) + right];
-  return [...wrap(bare, width).map((line, index) => (index === 0 ? styled(line) : styles.faint(line))), ...wrap(right, width - 4).map((line) => `    ${line}`)];
+  if (widthOf(full) <= room) return [line(full)];
+  if (widthOf(bare) <= room) return [line(bare), ...below(file)];
+  return [
+    ...wrap(bare, width).map((one, index) => (index === 0 ? head(one) : styles.faint(one))),
+    ...below(right),
+    ...below(file),
+  ];
 }
 
 const GAP = '   ';
@@ -104,12 +115,16 @@ function drawFault({ where, found, right }: FaultLine, canvas: Canvas): readonly
 const WORD_WIDTH = 9;
 
 function underWord(word: string, style: (text: string) => string, text: string, { width }: Canvas): readonly string[] {
-  return wrap(text, width - WORD_WIDTH).map((line, index) => (index === 0 ? style(padEnd(word, WORD_WIDTH)) : ' '.repeat(WORD_WIDTH)) + line);
+  return wrap(text, width - WORD_WIDTH).map(
+    (line, index) => (index === 0 ? style(padEnd(word, WORD_WIDTH)) : ' '.repeat(WORD_WIDTH)) + line,
+  );
 }
 
 function drawEntries({ entries }: Entries, { width, styles }: Canvas): readonly string[] {
   return entries.flatMap(({ name, aside = '', lines }) => [
     styles.strong(name) + (aside === '' ? '' : `   ${aside}`),
-    ...lines.flatMap(({ text, weight }) => wrap(text, width - 4).map((line) => `    ${weight === 'detail' ? styles.faint(line) : line}`)),
+    ...lines.flatMap(({ text, weight }) =>
+      wrap(text, width - 4).map((line) => `    ${weight === 'detail' ? styles.faint(line) : line}`),
+    ),
   ]);
 }

@@ -15,9 +15,9 @@ export function wrap(text: string, width: number): readonly string[] {
   return line === '' ? lines : [...lines, line];
 }
 
-/** Columns that a text without styles takes up. Most texts are plain ASCII, which is counted without further ado. */
+/** Columns that a text without styles takes up. Most texts are Latin and Greek, which are counted without further ado. */
 export function widthOf(text: string): number {
-  return ASCII.test(text) ? text.length : stringWidth(text);
+  return NARROW.test(text) ? text.length : stringWidth(text);
 }
 
 export function padEnd(text: string, width: number): string {
@@ -28,4 +28,5 @@ export function padStart(text: string, width: number): string {
   return ' '.repeat(Math.max(0, width - widthOf(text))) + text;
 }
 
-const ASCII = /^[\x20-\x7e]*$/;
+/** Characters of one column each. */
+const NARROW = /^[\x20-\x7e\u00a1-\u00ac\u00ae-\u02ff\u0391-\u03c9\u2018\u2019\u2212]*$/;

@@ -11,7 +11,13 @@ import { inUnit, spreadInUnit, unitFor, type Shown } from '../shown.ts';
 export function checkSheet({ run, steps }: Judgement, shown: Shown): Sheet {
   const { file, name } = run.recipe;
   const rows = steps.flatMap((step) =>
-    step.verdicts.map((verdict) => [file, name, String(step.run.step.number), step.run.step.path, ...verdictCells(verdict, step.run, shown)]),
+    step.verdicts.map((verdict) => [
+      file,
+      name,
+      String(step.run.step.number),
+      step.run.step.path,
+      ...verdictCells(verdict, step.run, shown),
+    ]),
   );
   return { columns: COLUMNS, rows };
 }
@@ -40,7 +46,8 @@ function verdictCells(verdict: Verdict, run: StepRun, shown: Shown): readonly st
   const { process, assumption, kind, level, waived, reference, over, value, uncertainty = 0, limit, place } = verdict;
   const dimension = verdictDimension(verdict);
   const unit = value === undefined ? '' : unitFor(shown, value, dimension);
-  const cell = (si: number | undefined): string => (si === undefined ? '' : printNumber(inUnit(shown, si, unit, dimension)));
+  const cell = (si: number | undefined): string =>
+    si === undefined ? '' : printNumber(inUnit(shown, si, unit, dimension));
   return [
     process,
     assumption,

@@ -2,7 +2,7 @@ import type { StepRun } from '../../quantities/run.ts';
 import type { Cycle } from '../../steps/step.ts';
 import type { JudgedStep } from '../../verdicts/judgement.ts';
 import type { Verdict } from '../../verdicts/verdict.ts';
-import { assumedSentences, groundsSentence } from '../grounds.ts';
+import { assumedSentence, groundsSentence } from '../grounds.ts';
 import type { CycleBlock, Finding, StepBlock, Told } from '../page.ts';
 import { instanceClause, perhapsSentence, verdictClause, verdictNumber } from '../sentences.ts';
 import type { Shown } from '../shown.ts';
@@ -17,6 +17,8 @@ export interface Telling {
   readonly shown: Shown;
   /** Assumptions whose grounds were told at an earlier step: nobody reads them twice. */
   readonly told: Set<string>;
+  /** Among so many recipes that only findings and what they come from are told. */
+  readonly brief: boolean;
 }
 
 /** One step: what it is set to, and what was found. */
@@ -25,7 +27,7 @@ export function stepBlock({ run, verdicts }: JudgedStep, telling: Telling): Step
   const findings = findingsOf(run, verdicts, telling);
   const passes = verdicts.filter(({ kind }) => kind === 'pass').length;
   const anything = findings.length > 0;
-  if (anything && passes > 0) findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
+  if (anything && passes > 0 && !telling.brief) findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
   return {
     kind: 'step',
     number,
@@ -64,13 +66,13 @@ function findingsOf(run: StepRun, verdicts: readonly Verdict[], telling: Telling
   return findings;
 }
 
-function finding(verdict: Verdict, run: StepRun, { file, shown, told }: Telling): Finding {
+function finding(verdict: Verdict, run: StepRun, { file, shown, told, brief }: Telling): Finding {
   const { kind, level, instance } = verdict;
   const sentences: (Told | undefined)[] = [
     first(instance === undefined ? undefined : sentence(`worst ${instanceClause(instance, run, shown)}`)),
     first(groundsSentence(verdict, run, shown)),
     first(perhapsSentence(verdict, shown)),
-    ...(told.has(verdict.name) ? [] : standingSentences(verdict, run, shown)),
+    ...(brief || told.has(verdict.name) ? [] : standingSentences(verdict, run, shown)),
   ];
   told.add(verdict.name);
   return {
@@ -84,9 +86,10 @@ function finding(verdict: Verdict, run: StepRun, { file, shown, told }: Telling)
 
 /** What holds for an assumption in whichever step it is judged. */
 function standingSentences(verdict: Verdict, run: StepRun, shown: Shown): readonly Told[] {
+  const assumed = assumedSentence(verdict, run, shown);
   return [
     detail(`Intended: ${verdict.statement}`),
-    ...assumedSentences(verdict, run, shown).map(detail),
+    ...(assumed === undefined ? [] : [detail(assumed)]),
     ...verdict.remarks.map((remark) => detail(sentence(remark))),
   ];
 }
@@ -95,17 +98,22 @@ function standingSentences(verdict: Verdict, run: StepRun, shown: Shown): readon
 function openFinding(open: readonly Verdict[], run: StepRun, { file }: Telling): Finding {
   const needs = [...new Set(open.flatMap(({ needs = [] }) => needs))];
   const numbers = [...new Set(open.map((verdict) => verdictNumber(verdict, run)))];
-  return { word: 'open', lead: `${listed(numbers)}: needs ${listed(needs)}`, sentences: [], where: whereOf(open, run, file) };
+  return {
+    word: 'open',
+    lead: `${listed(numbers)}: needs ${listed(needs)}`,
+    sentences: [],
+    where: whereOf(open, run, file),
+  };
 }
 
-function waivedFinding(verdict: Verdict, run: StepRun, { file, shown }: Telling): Finding {
+function waivedFinding(verdict: Verdict, run: StepRun, { file, shown, brief }: Telling): Finding {
   const { kind, level, waived } = verdict;
   const grant = waived === undefined ? '' : `Waived until ${waived.until} by ${waived.approved_by}: ${waived.reason}`;
   return {
     word: 'waived',
     level,
     lead: `${kind}, ${verdictClause(verdict, run, shown)}`,
-    sentences: [{ weight: 'detail', text: sentence(grant) }],
+    sentences: brief ? [] : [{ weight: 'detail', text: sentence(grant) }],
     where: whereOf([verdict], run, file),
   };
 }

@@ -1,5 +1,6 @@
 import { hazardClauses, practice } from '../cautions.ts';
-import { blocking, hazardEntries, type Counts } from '../counts.ts';
+import { blocking, type Counts } from '../counts.ts';
+import { hazardEntries } from '../hazards.ts';
 import type { CheckOptions } from '../options.ts';
 import type { Block } from '../page.ts';
 import { counted } from '../words.ts';
@@ -12,7 +13,10 @@ export function checkClosing(counts: Counts, options: CheckOptions): readonly Bl
 
 function closingText(counts: Counts, options: CheckOptions): string {
   const { recipes, steps, stepsByWorst, waived, faults, passedOver } = counts;
-  const judged = recipes === 0 ? 'No recipe was judged.' : `${counted(recipes, 'recipe')}, ${counted(steps, 'step')}: ${countsWords(stepsByWorst)}.`;
+  const judged =
+    recipes === 0
+      ? 'No recipe was judged.'
+      : `${counted(recipes, 'recipe')}, ${counted(steps, 'step')}: ${countsWords(stepsByWorst)}.`;
   const blocks = blocking(counts, options);
   const asides = [
     ...(waived === 0 ? [] : [`${counted(waived, 'finding')} waived.`]),

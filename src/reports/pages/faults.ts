@@ -25,5 +25,7 @@ function fileBlocks(faults: readonly Fault[]): readonly Block[] {
     right,
   }));
   const more = faults.length - told.length;
-  return more === 0 ? told : [...told, { kind: 'sentence', weight: 'first', text: `${counted(more, 'more fault')} in this file.` }];
+  return more === 0
+    ? told
+    : [...told, { kind: 'sentence', weight: 'first', text: `${counted(more, 'more fault')} in this file.` }];
 }

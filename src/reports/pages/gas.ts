@@ -32,13 +32,25 @@ export function gasPage(states: readonly GasState[], shown: Shown): Page {
 export function gasNumbers({ run }: GasState): readonly Reference[] {
   const { gases } = run.step.setup;
   const [only = ''] = gases;
-  if (gases.length === 1) return [...WHOLE, ...SINGLE.map((id) => ({ id, of: id === 'collision-diameter' ? `${only}/${only}` : only }))];
-  const each = gases.flatMap((of) => [...EACH.map((id) => ({ id, of })), { id: 'collision-diameter', of: `${of}/${of}` }]);
-  const pairs = gases.flatMap((a, index) => gases.slice(index + 1).map((b) => ({ id: 'diffusivity', of: `${a}/${b}` })));
+  if (gases.length === 1)
+    return [...WHOLE, ...SINGLE.map((id) => ({ id, of: id === 'collision-diameter' ? `${only}/${only}` : only }))];
+  const each = gases.flatMap((of) => [
+    ...EACH.map((id) => ({ id, of })),
+    { id: 'collision-diameter', of: `${of}/${of}` },
+  ]);
+  const pairs = gases.flatMap((a, index) =>
+    gases.slice(index + 1).map((b) => ({ id: 'diffusivity', of: `${a}/${b}` })),
+  );
   return [...WHOLE, ...each, ...pairs];
 }
 
-const WHOLE: readonly Reference[] = ['molar-mass', 'number-density', 'mean-free-path', 'viscosity', 'thermal-conductivity'].map((id) => ({ id }));
+const WHOLE: readonly Reference[] = [
+  'molar-mass',
+  'number-density',
+  'mean-free-path',
+  'viscosity',
+  'thermal-conductivity',
+].map((id) => ({ id }));
 const SINGLE = ['mean-speed', 'collision-diameter', 'collision-frequency', 'diffusivity'] as const;
 const EACH = ['mole-fraction', 'mean-speed', 'mean-free-path', 'diffusivity'] as const;
 
@@ -57,11 +69,19 @@ function stateBlocks(state: GasState, shown: Shown): readonly Block[] {
       ],
       rows: numbers.map((reference, index) => {
         const first = numbers.findIndex(({ id }) => id === reference.id) === index;
-        return [wordsOf(reference, run), valueOf(reference, run, shown), first ? (quantityNamed(reference.id)?.source ?? '') : ''];
+        return [
+          wordsOf(reference, run),
+          valueOf(reference, run, shown),
+          first ? (quantityNamed(reference.id)?.source ?? '') : '',
+        ];
       }),
       key: 0,
     },
-    ...[...remarks.map(sentence), ...dataSentences(state)].map((text) => ({ kind: 'sentence' as const, weight: 'detail' as const, text })),
+    ...[...remarks.map(sentence), ...dataSentences(state)].map((text) => ({
+      kind: 'sentence' as const,
+      weight: 'detail' as const,
+      text,
+    })),
     { kind: 'sentence', weight: 'detail', text: `Uncertainties are expanded, k = ${printNumber(shown.coverage)}.` },
   ];
 }
@@ -96,7 +116,11 @@ function dataSentences({ run }: GasState): readonly string[] {
     if (gas === undefined) return [];
     const source = gas.sources.collision ?? gas.sources.critical ?? gas.sources.source;
     return [
-      ...(source === undefined ? [] : [sentence(`data of ${name}: ${source}${gas.estimated === undefined ? '' : `; estimated: ${gas.estimated}`}`)]),
+      ...(source === undefined
+        ? []
+        : [
+            sentence(`data of ${name}: ${source}${gas.estimated === undefined ? '' : `; estimated: ${gas.estimated}`}`),
+          ]),
       ...(gas.associates === undefined ? [] : [sentence(`${name}: ${gas.associates}`)]),
       ...gas.remarks.map((remark) => sentence(`${name}: ${remark}`)),
     ];
@@ -112,7 +136,9 @@ function cautionBlocks(states: readonly GasState[]): readonly Block[] {
     }
   }
   const entries = [...gases].flatMap(([name, { hazards }]) => hazards.map((hazard) => [hazard, [name]] as const));
-  return entries.length === 0 ? [] : [{ kind: 'caution', text: `${capital(hazardClauses(entries).join('; '))}. ${practice()}` }];
+  return entries.length === 0
+    ? []
+    : [{ kind: 'caution', text: `${capital(hazardClauses(entries).join('; '))}. ${practice()}` }];
 }
 
 function gasSheet(states: readonly GasState[], shown: Shown): Sheet {

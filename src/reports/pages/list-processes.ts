@@ -30,7 +30,13 @@ function assumptionLines({ name, statement, source, cure, ...bound }: Assumption
 }
 
 /** The bound as the process states it: "knudsen.gap at most 0.05 (warning), 0.3 (error)". */
-function boundText({ quantity, over, atLeast, atMost, when }: Pick<AssumptionSpec, 'quantity' | 'over' | 'atLeast' | 'atMost' | 'when'>): string {
+function boundText({
+  quantity,
+  over,
+  atLeast,
+  atMost,
+  when,
+}: Pick<AssumptionSpec, 'quantity' | 'over' | 'atLeast' | 'atMost' | 'when'>): string {
   const number = over === undefined ? quantity : `${quantity} over ${over}`;
   const sides = [...sideText('at least', atLeast), ...sideText('at most', atMost)];
   return `${number} ${listed(sides)}${when === undefined ? '' : ', where given'}`;
@@ -51,13 +57,31 @@ function usualText({ address, atLeast, atMost }: UsualRange): string {
 
 function standsInText({ address, value, dimension, unit, uncertainty, origin }: Given): string {
   const because = isDefault(origin) ? `; ${origin.because}` : '';
-  return sentence(`where nobody states it, ${address} is ${printMeasure(value, dimension, { unit, uncertainty: Math.sqrt(3) * uncertainty })}${because}`);
+  return sentence(
+    `where nobody states it, ${address} is ${printMeasure(value, dimension, { unit, uncertainty: Math.sqrt(3) * uncertainty })}${because}`,
+  );
 }
 
 function sheetOf(processes: readonly ProcessSpec[]): Sheet {
-  const limits = (side: GradedLimits | undefined): readonly string[] => GRADES.map((grade) => String(side?.[grade]?.is ?? ''));
+  const limits = (side: GradedLimits | undefined): readonly string[] =>
+    GRADES.map((grade) => String(side?.[grade]?.is ?? ''));
   return {
-    columns: ['process', 'title', 'assumption', 'number', 'over', 'at_least_note', 'at_least_warning', 'at_least_error', 'at_most_note', 'at_most_warning', 'at_most_error', 'when', 'statement', 'source'],
+    columns: [
+      'process',
+      'title',
+      'assumption',
+      'number',
+      'over',
+      'at_least_note',
+      'at_least_warning',
+      'at_least_error',
+      'at_most_note',
+      'at_most_warning',
+      'at_most_error',
+      'when',
+      'statement',
+      'source',
+    ],
     rows: processes.flatMap(({ name, title, assumptions }) =>
       assumptions.map((one) => [
         name,

@@ -45,4 +45,10 @@ function nameOf({ id, lengths, subjects, whole }: Quantity): string {
   return `${id}${length}${subject}`;
 }
 
-const MUST_HAVE_LENGTH: ReadonlySet<string> = new Set(['length', 'pressure-distance', 'collisions-straight', 'collisions-walk', 'diffusion-time']);
+const MUST_HAVE_LENGTH: ReadonlySet<string> = new Set([
+  'length',
+  'pressure-distance',
+  'collisions-straight',
+  'collisions-walk',
+  'diffusion-time',
+]);

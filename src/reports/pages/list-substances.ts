@@ -8,8 +8,22 @@ import type { Column, Page } from '../page.ts';
 export function listGases(library: Library): Page {
   const gases = library.gasNames().flatMap((name) => library.gas(name) ?? []);
   return tableOf(
-    [left('gas'), left('title', true), left('formula'), right('molar mass'), left('hazards', true), left('collision values', true)],
-    gases.map((gas) => [gas.name, gas.title, formulaText(gas), datum(library, `gases.${gas.name}.molar_mass`), gas.hazards.join(', '), collisionText(gas)]),
+    [
+      left('gas'),
+      left('title', true),
+      left('formula'),
+      right('molar mass'),
+      left('hazards', true),
+      left('collision values', true),
+    ],
+    gases.map((gas) => [
+      gas.name,
+      gas.title,
+      formulaText(gas),
+      datum(library, `gases.${gas.name}.molar_mass`),
+      gas.hazards.join(', '),
+      collisionText(gas),
+    ]),
   );
 }
 
@@ -30,7 +44,10 @@ export function listFilms(library: Library): Page {
 }
 
 function tableOf(columns: readonly Column[], rows: readonly (readonly string[])[]): Page {
-  return { blocks: [{ kind: 'table', columns, rows, key: 1 }], sheet: () => ({ columns: columns.map(({ title }) => title.replaceAll(' ', '_')), rows }) };
+  return {
+    blocks: [{ kind: 'table', columns, rows, key: 1 }],
+    sheet: () => ({ columns: columns.map(({ title }) => title.replaceAll(' ', '_')), rows }),
+  };
 }
 
 /** Elements in the order in which the formula names them. A substance named by its formula says no more. */

@@ -17,5 +17,7 @@ export function outcomeWords(outcomes: readonly StepOutcome[]): string {
 }
 
 export function countsWords(counts: Readonly<Record<StepOutcome, number>>): string {
-  return OUTCOME_WORDS.flatMap(([outcome, words]) => (counts[outcome] === 0 ? [] : [`${counts[outcome]} ${words}`])).join(', ');
+  return OUTCOME_WORDS.flatMap(([outcome, words]) =>
+    counts[outcome] === 0 ? [] : [`${counts[outcome]} ${words}`],
+  ).join(', ');
 }

@@ -1,8 +1,7 @@
 import type { StepRun } from '../../quantities/run.ts';
 import type { Given } from '../../steps/given.ts';
-import { printTime } from '../../units/display.ts';
-import { inUnit, printGiven, unitFor, type Shown } from '../shown.ts';
-import { printNumber } from '../../units/display.ts';
+import { printNumber, printTime } from '../../units/display.ts';
+import { inUnit, printGiven, type Shown } from '../shown.ts';
 
 /** What a step is set to, in as few words as tell it from its neighbours. */
 export interface StepFacts {
@@ -13,16 +12,23 @@ export interface StepFacts {
 
 export function stepFacts(run: StepRun, shown: Shown): StepFacts {
   const time = run.givens.get('time');
-  return { time: time === undefined ? '' : timeOf(time, shown), pressure: pressureOf(run, shown), flows: flowsOf(run, shown) };
+  return {
+    time: time === undefined ? '' : timeOf(time, shown),
+    pressure: pressureOf(run, shown),
+    flows: flowsOf(run, shown),
+  };
 }
 
 function timeOf(time: Given, shown: Shown): string {
-  return time.span === undefined && shown.asked.get('time') === undefined ? printTime(time.value) : spanned(time, shown);
+  return time.span === undefined && shown.asked.get('time') === undefined
+    ? printTime(time.value)
+    : spanned(time, shown);
 }
 
 function pressureOf({ step, givens }: StepRun, shown: Shown): string {
   const pressure = givens.get('pressure') ?? givens.get('fill_to');
   if (pressure !== undefined) return spanned(pressure, shown);
+  if (step.unknown.has('pressure')) return 'unknown';
   const throttle = givens.get('throttle');
   if (throttle !== undefined) return `throttle ${printGiven(shown, throttle)}`;
   return step.setup.throttle === 'open' || step.setup.throttle === 'closed' ? step.setup.throttle : '';
@@ -42,7 +48,7 @@ function flowsOf({ step, givens }: StepRun, shown: Shown): string {
   for (const { name } of step.setup.lines) {
     const flow = givens.get(`flows.${name}`);
     if (flow === undefined) continue;
-    const unit = shown.asked.get('flow') ?? flow.unit ?? unitFor(shown, flow.value, 'flow');
+    const unit = shown.asked.get('flow') ?? flow.unit;
     if (unitBefore !== undefined && unitBefore !== unit) parts.push(`${parts.pop() ?? ''} ${unitBefore}`);
     parts.push(`${name} ${flowNumber(flow, unit, shown)}`);
     unitBefore = unit;

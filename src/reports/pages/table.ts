@@ -1,11 +1,12 @@
 import { quantityNamed } from '../../quantities/catalogue.ts';
 import { referenceName, type Reference } from '../../quantities/reference.ts';
 import type { Run, StepRun } from '../../quantities/run.ts';
-import { printNumber, printTime } from '../../units/display.ts';
+import { printNumber } from '../../units/display.ts';
 import type { Block, Page, Sheet } from '../page.ts';
 import { dimensionOfNumber } from '../sentences.ts';
 import { bandOf, inUnit, print, shownFor, spreadInUnit, unitFor, type AskedUnits, type Shown } from '../shown.ts';
-import { counted, listed } from '../words.ts';
+import { listed } from '../words.ts';
+import { recipeHeadOf } from './recipe-head.ts';
 
 export interface TableOptions {
   readonly units: AskedUnits;
@@ -21,7 +22,7 @@ export function tablePage(run: Run, { units, columns = regimeColumns(run) }: Tab
 
 /** Pressure, mean free path, the Knudsen number over each length that a step names, residence time and turnovers. */
 export function regimeColumns({ steps }: Pick<Run, 'steps'>): readonly Reference[] {
-  const lengths = new Set(steps.flatMap(({ plan }) => quantityNamed('knudsen')?.lengths?.(plan.scope) ?? []));
+  const lengths = new Set(steps.flatMap(lengthsKnown));
   return [
     { id: 'gas-pressure' },
     { id: 'gas-temperature' },
@@ -32,18 +33,15 @@ export function regimeColumns({ steps }: Pick<Run, 'steps'>): readonly Reference
   ];
 }
 
+function lengthsKnown(step: StepRun): readonly string[] {
+  const lengths = quantityNamed('knudsen')?.lengths?.(step.plan.scope) ?? [];
+  return lengths.filter((length) => step.read({ id: 'length', length }).kind === 'known');
+}
+
 function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): readonly Block[] {
-  const { name, revision, chamber, file, duration } = run.recipe;
   const lacking = lackingSentence(run, columns);
   return [
-    {
-      kind: 'recipe',
-      name,
-      ...(revision === undefined ? {} : { revision }),
-      chamber: chamber.revision === undefined ? chamber.name : `${chamber.name} rev ${chamber.revision}`,
-      file,
-      size: [counted(run.steps.length, 'step'), ...(duration === undefined ? [] : [printTime(duration)])],
-    },
+    recipeHeadOf(run),
     {
       kind: 'table',
       columns: [
@@ -67,7 +65,9 @@ function rowsOf({ steps }: Run, columns: readonly Reference[], shown: Shown): re
 /** Cells of one column; behind aligned numbers the bands begin at one edge. */
 function withBands(cells: readonly Cell[]): readonly string[] {
   const widest = Math.max(...cells.map(({ band }) => band.length));
-  return widest === 0 ? cells.map(({ text }) => text) : cells.map(({ text, band }) => (text === '' ? '' : `${text} ${band.padEnd(widest)}`));
+  return widest === 0
+    ? cells.map(({ text }) => text)
+    : cells.map(({ text, band }) => (text === '' ? '' : `${text} ${band.padEnd(widest)}`));
 }
 
 interface Cell {
@@ -114,9 +114,31 @@ function lackingSentence({ steps }: Run, columns: readonly Reference[]): string 
 
 function tableSheet({ recipe, steps }: Run, columns: readonly Reference[], shown: Shown): Sheet {
   const rows = steps.flatMap((step) =>
-    columns.map((reference) => [recipe.file, recipe.name, String(step.step.number), step.step.path, referenceName(reference), ...numberCells(step, reference, shown)]),
+    columns.map((reference) => [
+      recipe.file,
+      recipe.name,
+      String(step.step.number),
+      step.step.path,
+      referenceName(reference),
+      ...numberCells(step, reference, shown),
+    ]),
   );
-  return { columns: ['file', 'recipe', 'step_number', 'step', 'number', 'value', 'uncertainty', 'unit', 'band', 'of', 'absent'], rows };
+  return {
+    columns: [
+      'file',
+      'recipe',
+      'step_number',
+      'step',
+      'number',
+      'value',
+      'uncertainty',
+      'unit',
+      'band',
+      'of',
+      'absent',
+    ],
+    rows,
+  };
 }
 
 /** Value, uncertainty, unit, band, whose number, and why there is none. */

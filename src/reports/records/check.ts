@@ -15,8 +15,6 @@ import { regimeColumns } from '../pages/table.ts';
 import { inCatalogueOrder, quantityRecord } from './quantity.ts';
 import { verdictRecord } from './verdict.ts';
 
-export type RecipeRecord = ReturnType<typeof recipeRecord>;
-
 /** All that was found of one recipe, in SI. It depends on nothing but that recipe. */
 export function recipeRecord(judgement: Judgement) {
   const { run, steps, notes } = judgement;
@@ -36,13 +34,9 @@ export function recipeRecord(judgement: Judgement) {
   };
 }
 
-export type CautionRecord = ReturnType<typeof cautionRecords>[number];
-
 export function cautionRecords({ run, cautions }: Judgement) {
   return cautionTexts(cautions).map((caution) => ({ file: run.recipe.file, ...caution }));
 }
-
-export type FaultRecord = ReturnType<typeof faultRecord>;
 
 export function faultRecord({ place, found, right }: Fault) {
   return { file: place.file, line: place.line, column: place.column, found, right };

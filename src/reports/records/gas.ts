@@ -2,8 +2,6 @@ import { gasNumbers, type GasState } from '../pages/gas.ts';
 import type { Shown } from '../shown.ts';
 import { inCatalogueOrder, quantityRecord } from './quantity.ts';
 
-export type GasResult = ReturnType<typeof gasRecord>;
-
 /** What is known of gases and mixtures, in SI. */
 export function gasRecord(states: readonly GasState[], shown: Shown) {
   return { format: 1, gases: states.map((state) => stateRecord(state, shown)) };
@@ -18,7 +16,9 @@ function stateRecord(state: GasState, shown: Shown) {
   });
   return {
     gas: name,
-    ...(gases.length > 1 ? { shares: Object.fromEntries(gases.map((gas) => [gas, run.given(`composition.${gas}`)?.value ?? 0])) } : {}),
+    ...(gases.length > 1
+      ? { shares: Object.fromEntries(gases.map((gas) => [gas, run.given(`composition.${gas}`)?.value ?? 0])) }
+      : {}),
     temperature: run.given('temperatures.gas')?.value ?? 0,
     pressure: run.given('pressure')?.value ?? 0,
     quantities: inCatalogueOrder(gasNumbers(state)).map((reference) => quantityRecord(run, reference, shown)),

@@ -5,11 +5,24 @@ import { verdictDimension, verdictMessage } from '../sentences.ts';
 import type { Shown } from '../shown.ts';
 import { referenceRecord } from './quantity.ts';
 
-export type VerdictRecord = ReturnType<typeof verdictRecord>;
-
 /** A verdict in SI. Keys that have nothing to say are left out. */
 export function verdictRecord(verdict: Verdict, run: StepRun, shown: Shown) {
-  const { assumption, process, reference, over, subject, kind, level, perhaps, value, uncertainty, bound, margin, place, waived } = verdict;
+  const {
+    assumption,
+    process,
+    reference,
+    over,
+    subject,
+    kind,
+    level,
+    perhaps,
+    value,
+    uncertainty,
+    bound,
+    margin,
+    place,
+    waived,
+  } = verdict;
   return {
     assumption,
     process,

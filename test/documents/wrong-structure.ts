@@ -1,0 +1,133 @@
+import { chamberWith, recipeWith } from './trial-documents.ts';
+import type { WrongDocument } from './wrong-document.ts';
+
+/** Keys and values that do not meet the schema. */
+export const WRONG_STRUCTURE: readonly WrongDocument[] = [
+  {
+    name: 'a misspelt key',
+    text: recipeWith('presure: 4 mTorr'),
+    at: '8:5',
+    found: "unknown key 'presure' in 'fill'",
+    right: 'write pressure',
+  },
+  {
+    name: 'a key with a hyphen',
+    text: recipeWith('ends-on: optical emission'),
+    at: '8:5',
+    found: "unknown key 'ends-on' in 'fill'",
+    right: 'write ends_on',
+  },
+  {
+    name: 'a misspelt key that is needed',
+    text: 'regimen: recipe 1\nname: trial\nchambre: curlew\nsteps: [{ name: fill, process: settle }]\n',
+    at: '3:1',
+    found: "unknown key 'chambre'",
+    right: 'write chamber',
+  },
+  {
+    name: 'a key of another document',
+    text: recipeWith('gas_lines: {}'),
+    at: '8:5',
+    found: "unknown key 'gas_lines' in 'fill'",
+    right:
+      'keys that can stand here: reason, ends_on, remark, pressure, throttle, fill_to, flows, composition, temperatures, power, duty, plasma, surface, reactant, targets, melts, lengths, backside, body, wafer, other, waivers',
+  },
+  {
+    name: 'a key of a step in a cycle',
+    text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps:\n  - name: lap\n    repeat: 3\n    pressure: 3 mTorr\n    steps: [{ name: fill, process: settle }]\n',
+    at: '7:5',
+    found: "unknown key 'pressure' in 'lap'",
+    right: 'keys that can stand here: ends_on, remark, throughout, waivers',
+  },
+  {
+    name: 'the key __proto__',
+    text: recipeWith('__proto__: { pressure: 4 mTorr }'),
+    at: '8:5',
+    found: 'the key __proto__',
+    right: 'choose another name',
+  },
+  {
+    name: 'the key __proto__ among names',
+    text: recipeWith('flows: { __proto__: 4 sccm }'),
+    at: '8:14',
+    found: 'the key __proto__',
+    right: 'choose another name',
+  },
+  {
+    name: 'a missing key',
+    text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps:\n  - name: fill\n',
+    at: '5:5',
+    found: "no process in 'fill'",
+    right: 'add it, such as process: ion-etch-directional',
+  },
+  {
+    name: 'no steps',
+    text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps: []\n',
+    at: '4:8',
+    found: 'steps: an empty list',
+    right: 'write at least one entry',
+  },
+  {
+    name: 'a name with blanks',
+    text: 'regimen: site 1\nname: Salt Marsh\n',
+    at: '2:7',
+    found: "name: 'Salt Marsh'",
+    right: 'a name in kebab-case: small letters, digits and single hyphens',
+  },
+  {
+    name: 'a value of a wrong case',
+    text: chamberWith('lengths: { gap: 27 mm }', 'walls: { material: steel }').replace('mixed', 'Mixed'),
+    at: '3:49',
+    found: "flow: 'Mixed'",
+    right: 'write mixed',
+  },
+  {
+    name: 'text where a map is wanted',
+    text: recipeWith('flows: 4 sccm'),
+    at: '8:12',
+    found: "flows: '4 sccm'",
+    right: 'a map of keys and values is needed',
+  },
+  {
+    name: 'a number where text is wanted',
+    text: recipeWith('reason: 12'),
+    at: '8:13',
+    found: 'reason: 12 without quotes is a number',
+    right: 'write "12"',
+  },
+  {
+    name: 'a day that is none',
+    text: recipeWith('waivers: [{ assumption: fit, reason: x, approved_by: y, until: 2027-6-1 }]'),
+    at: '8:68',
+    found: "until: '2027-6-1'",
+    right: 'a calendar day, year-month-day',
+  },
+  {
+    name: 'two keys that exclude each other',
+    text: recipeWith('pressure: 4 mTorr', 'throttle: open'),
+    at: '8:5',
+    found: 'pressure beside what excludes it',
+    right: 'a step either holds a pressure or sets its throttle: leave out one of both',
+  },
+  {
+    name: 'a step that nothing judges, without a reason',
+    text: recipeWith().replace('process: settle', 'process: unassessed'),
+    at: '5:5',
+    found: "no reason in 'fill'",
+    right: 'add it, such as reason: Wafer transfer; no gas kinetics involved.',
+  },
+  {
+    name: 'half a repeat',
+    text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps:\n  - name: lap\n    repeat: 2.5\n    steps: [{ name: fill, process: settle }]\n',
+    at: '6:13',
+    found: "repeat: '2.5' is no whole number",
+    right: 'a whole number is needed',
+  },
+  {
+    name: 'no repeat at all',
+    text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps:\n  - name: lap\n    repeat: 0\n    steps: [{ name: fill, process: settle }]\n',
+    at: '6:13',
+    found: "repeat: '0'",
+    right: 'a number of at least 1 is needed',
+  },
+];
