@@ -2,6 +2,7 @@ import type { Node } from '../quantities/plan.ts';
 import type { Line, StepRun } from '../quantities/run.ts';
 import { isDefault, type Given } from '../steps/given.ts';
 import { DIMENSIONS, type Dimension } from '../units/dimensions.ts';
+import { writtenUnit } from './number.ts';
 import { nodeDimension, nodeName, nodeReference } from './nodes.ts';
 import type { Link } from './page.ts';
 import { bandOf, print, printGiven, type Shown } from './shown.ts';
@@ -15,7 +16,7 @@ export function linksOf(lines: readonly Line[], step: StepRun, shown: Shown): re
 
 function linkOf(line: Line, numbers: ReadonlyMap<Node, number>, step: StepRun, shown: Shown): Link {
   const { node, given, remarks } = line;
-  const { value, si } = valueOf(line, shown);
+  const { value, si } = valueOf(line, step, shown);
   return {
     number: numbers.get(node) ?? 0,
     symbol: symbolOf(node),
@@ -35,7 +36,11 @@ function symbolOf(node: Node): string {
 }
 
 /** The value as it is printed everywhere, and in SI to five digits, since a pocket calculator starts from there. */
-function valueOf({ node, reading, uncertainty, given }: Line, shown: Shown): { value: string; si?: string } {
+function valueOf(
+  { node, reading, uncertainty, given }: Line,
+  step: StepRun,
+  shown: Shown,
+): { value: string; si?: string } {
   if (reading.kind === 'missing') return { value: `open, needs ${listed(reading.needs)}` };
   if (reading.kind === 'inapplicable') return { value: `does not apply: ${reading.because}` };
   if (given !== undefined) {
@@ -43,9 +48,10 @@ function valueOf({ node, reading, uncertainty, given }: Line, shown: Shown): { v
     return { value, ...siOf(value, reading.value, given.dimension) };
   }
   const dimension = nodeDimension(node);
+  const unit = shown.asked.get(dimension) ?? writtenUnit(node, step);
   const regime = bandOf(shown, nodeReference(node)?.id ?? '', reading.value);
   const whose = node.kind === 'choice' && reading.of !== undefined ? `, of ${reading.of}` : '';
-  const value = `${print(shown, reading.value, dimension, shown.coverage * uncertainty)}${regime === undefined ? '' : ` (${regime})`}${whose}`;
+  const value = `${print(shown, reading.value, dimension, shown.coverage * uncertainty, unit)}${regime === undefined ? '' : ` (${regime})`}${whose}`;
   return { value, ...siOf(value, reading.value, dimension) };
 }
 

@@ -2,7 +2,7 @@ import type { Node } from '../quantities/plan.ts';
 import type { Reference } from '../quantities/reference.ts';
 import type { StepRun } from '../quantities/run.ts';
 import type { Dimension } from '../units/dimensions.ts';
-import { dimensionOfNumber, filled } from './sentences.ts';
+import { dimensionOfNumber, filled } from './number.ts';
 import { numberWords } from './words.ts';
 
 /** What a line of a derivation is called: a given by its address, a number in words. */

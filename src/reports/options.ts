@@ -7,7 +7,7 @@ export type Fold =
   | 'none'
   /** Only steps with something to tell; a recipe without any is one line. */
   | 'steps'
-  /** Recipes without anything to tell are counted at the end, not listed. */
+  /** Recipes without anything to tell are counted at the end, not listed; of the others only findings and what they come from. */
   | 'recipes';
 
 export interface CheckOptions extends BlockOptions {

@@ -1,11 +1,9 @@
-import { quantityNamed } from '../quantities/catalogue.ts';
-import type { Reference } from '../quantities/reference.ts';
 import type { StepRun } from '../quantities/run.ts';
-import { dimensionOf } from '../steps/addresses.ts';
 import type { Dimension } from '../units/dimensions.ts';
 import { printMeasure, printTime } from '../units/display.ts';
 import type { Instance, Verdict } from '../verdicts/verdict.ts';
-import { bandOf, print, printGiven, unitFor, type Shown } from './shown.ts';
+import { dimensionOfNumber, filled, unitOfNumber } from './number.ts';
+import { bandOf, print, printGiven, type Shown } from './shown.ts';
 import { listed, numberWords, sentence } from './words.ts';
 
 /* The sentence for a verdict, which exists once: pages, records and whatever else tells of it take it from here. */
@@ -19,7 +17,7 @@ export function verdictClause(verdict: Verdict, run: StepRun, shown: Shown): str
     case 'notApplicable':
       return `${name}: ${verdict.because ?? 'does not apply'}`;
     default:
-      return `${name} ${valueClause(verdict, shown)}`;
+      return `${name} ${valueClause(verdict, run, shown)}`;
   }
 }
 
@@ -57,7 +55,7 @@ export function limitClause({ limit }: Verdict, dimension: Dimension, unit: stri
 }
 
 /** A graver grade that the uncertainty leaves open, as a sentence. */
-export function perhapsSentence(verdict: Verdict, shown: Shown): string | undefined {
+export function perhapsSentence(verdict: Verdict, run: StepRun, shown: Shown): string | undefined {
   const { perhaps, bound, limit, value = 0 } = verdict;
   if (perhaps === undefined || limit === undefined) return undefined;
   const graver = bound[limit.side]?.[perhaps];
@@ -66,10 +64,15 @@ export function perhapsSentence(verdict: Verdict, shown: Shown): string | undefi
   const clause = limitClause(
     { ...verdict, limit: { ...limit, value: graver } },
     dimension,
-    unitFor(shown, value, dimension),
+    verdictUnit(verdict, value, run, shown),
     shown,
   );
   return `The uncertainty does not rule out ${perhaps}: ${clause}.`;
+}
+
+/** The unit in which value and limits of a verdict are told. */
+export function verdictUnit({ reference, over }: Verdict, value: number, run: StepRun, shown: Shown): string {
+  return over === undefined ? unitOfNumber(shown, run, reference, value) : '';
 }
 
 /** The dimension of what a verdict judges. */
@@ -77,24 +80,11 @@ export function verdictDimension({ reference, over }: Pick<Verdict, 'reference' 
   return over === undefined ? dimensionOfNumber(reference) : 'number';
 }
 
-export function dimensionOfNumber({ id, of = '' }: Reference): Dimension {
-  if (id === 'setpoint') return dimensionOf(of) ?? 'number';
-  return quantityNamed(id)?.dimension ?? 'number';
-}
-
-/** The gas or atom that fills a role in this step. */
-export function filled({ of }: Reference, { step }: Pick<StepRun, 'step'>): string | undefined {
-  const { reactant, target, melt } = step.setup;
-  if (of === 'reactant') return reactant;
-  if (of === 'target') return target?.atoms[0]?.atom;
-  return of === 'melt' ? melt?.atoms[0]?.atom : undefined;
-}
-
-function valueClause(verdict: Verdict, shown: Shown): string {
+function valueClause(verdict: Verdict, run: StepRun, shown: Shown): string {
   const { value, uncertainty = 0, reference, over, limit } = verdict;
   if (value === undefined) return '';
   const dimension = verdictDimension(verdict);
-  const unit = unitFor(shown, value, dimension);
+  const unit = verdictUnit(verdict, value, run, shown);
   let clause = print(shown, value, dimension, uncertainty, unit);
   const regime = over === undefined ? bandOf(shown, reference.id, value) : undefined;
   if (regime !== undefined) clause += ` (${regime})`;

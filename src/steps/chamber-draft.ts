@@ -40,4 +40,3 @@ export function flowReference({ flow_reference }: Chamber): FlowReference {
     pressure: fixedOf(flow_reference?.pressure)?.measure.value ?? STANDARD_REFERENCE.pressure,
   };
 }
-

@@ -1,9 +1,10 @@
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import type { Dimension } from '../units/dimensions.ts';
 import type { Place } from '../shelf/place.ts';
-import { dimensionOf, nearestAddress } from './addresses.ts';
+import { dimensionOf } from './addresses.ts';
 import { STATED } from './accuracies.ts';
 import { referredScale, type ChamberDraft } from './chamber-draft.ts';
+import { unknownAddress } from './names.ts';
 
 /** Puts the limits of a chamber's setpoints at `chamber.limits.ADDRESS.at_least` and `.at_most`. */
 export function putLimits(draft: ChamberDraft): void {

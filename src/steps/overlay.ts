@@ -1,9 +1,8 @@
-import type { Pointer, RecipeDocument } from '../documents/document.ts';
+import type { Pointer } from '../documents/document.ts';
 import type { Throughout } from '../documents/generated/types.ts';
-import type { Library } from '../substances/library.ts';
 import type { Fault } from '../shelf/fault.ts';
 import type { Place } from '../shelf/place.ts';
-import type { ChamberFacts } from './chamber.ts';
+import { placeIn, type Ground } from './ground.ts';
 import type { Layer } from './layer.ts';
 import { checkGas } from './names.ts';
 import { putFlows, putGenerators } from './overlay-feeds.ts';

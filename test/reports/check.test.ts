@@ -147,6 +147,12 @@ describe('folding', () => {
     expect(part('none').split('\n')[1]).toMatch(/^ 1 {2}fill {2}soak {2}10 s {2}5 mTorr {2}Ar 40 sccm +pass \d+$/);
   });
 
+  test('of many recipes tells findings without what was intended and what passes beside', () => {
+    const text = drawText(checkPart(judged(deposit('5 mTorr')), [], { ...OPTIONS, fold: 'recipes' }).blocks, PLAIN);
+    expect(text).toContain('From fast free path');
+    expect(text).not.toMatch(/Intended|more$/m);
+  });
+
   test('of steps keeps those with a finding', () => {
     const text = drawText(
       checkPart(judged(clean + deposit('5 mTorr')), [], { ...OPTIONS, fold: 'steps' }).blocks,

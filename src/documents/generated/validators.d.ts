@@ -2,7 +2,6 @@
 
 export interface SchemaError {
   readonly instancePath: string;
-  readonly schemaPath: string;
   readonly keyword: string;
   readonly params: Readonly<Record<string, unknown>>;
   /** The key that breaks the rule, where the rule is one for keys. */

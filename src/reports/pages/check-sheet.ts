@@ -4,8 +4,8 @@ import type { StepRun } from '../../quantities/run.ts';
 import { referenceName } from '../../quantities/reference.ts';
 import { printNumber } from '../../units/display.ts';
 import type { Sheet } from '../page.ts';
-import { verdictDimension, verdictMessage } from '../sentences.ts';
-import { inUnit, spreadInUnit, unitFor, type Shown } from '../shown.ts';
+import { verdictDimension, verdictMessage, verdictUnit } from '../sentences.ts';
+import { inUnit, spreadInUnit, type Shown } from '../shown.ts';
 
 /** One row a verdict, its numbers in cells of their own. */
 export function checkSheet({ run, steps }: Judgement, shown: Shown): Sheet {
@@ -45,7 +45,7 @@ const COLUMNS: readonly string[] = [
 function verdictCells(verdict: Verdict, run: StepRun, shown: Shown): readonly string[] {
   const { process, assumption, kind, level, waived, reference, over, value, uncertainty = 0, limit, place } = verdict;
   const dimension = verdictDimension(verdict);
-  const unit = value === undefined ? '' : unitFor(shown, value, dimension);
+  const unit = value === undefined ? '' : verdictUnit(verdict, value, run, shown);
   const cell = (si: number | undefined): string =>
     si === undefined ? '' : printNumber(inUnit(shown, si, unit, dimension));
   return [

@@ -27,7 +27,8 @@ export function stepBlock({ run, verdicts }: JudgedStep, telling: Telling): Step
   const findings = findingsOf(run, verdicts, telling);
   const passes = verdicts.filter(({ kind }) => kind === 'pass').length;
   const anything = findings.length > 0;
-  if (anything && passes > 0 && !telling.brief) findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
+  if (anything && passes > 0 && !telling.brief)
+    findings.push({ word: 'pass', lead: `${passes} more`, sentences: [], where: [] });
   return {
     kind: 'step',
     number,
@@ -71,7 +72,7 @@ function finding(verdict: Verdict, run: StepRun, { file, shown, told, brief }: T
   const sentences: (Told | undefined)[] = [
     first(instance === undefined ? undefined : sentence(`worst ${instanceClause(instance, run, shown)}`)),
     first(groundsSentence(verdict, run, shown)),
-    first(perhapsSentence(verdict, shown)),
+    first(perhapsSentence(verdict, run, shown)),
     ...(brief || told.has(verdict.name) ? [] : standingSentences(verdict, run, shown)),
   ];
   told.add(verdict.name);

@@ -33,7 +33,7 @@ function recipeBlocks(judgement: Judgement, shown: Shown, { fold }: CheckOptions
   const notes = judgement.notes.map((note) => ({ kind: 'note' as const, text: noteText(note, judgement).text }));
   if (told.length === 0 && notes.length === 0 && fold === 'recipes') return [];
   const head = recipeHead(judgement, fold, told.length + notes.length > 0);
-  const steps = { kind: 'steps' as const, steps: withCycles(told, judgement, shown) };
+  const steps = { kind: 'steps' as const, steps: withCycles(told, judgement, { shown, fold }) };
   return [head, ...(told.length === 0 ? [] : [steps]), ...notes, ...(fold === 'none' ? cautionBlock(judgement) : [])];
 }
 
@@ -52,7 +52,7 @@ function recipeHead({ run, steps }: Judgement, fold: Fold, anything: boolean): R
 function withCycles(
   steps: readonly JudgedStep[],
   { run }: Judgement,
-  shown: Shown,
+  { shown, fold }: { readonly shown: Shown; readonly fold: Fold },
 ): readonly (StepBlock | CycleBlock)[] {
   const open = new Set<string>();
   const telling = { file: run.recipe.file, shown, told: new Set<string>(), brief: fold === 'recipes' };

@@ -5,7 +5,7 @@ import type { StepRun } from '../../quantities/run.ts';
 import type { Gas } from '../../substances/gas.ts';
 import { printNumber } from '../../units/display.ts';
 import type { Block, Page, Sheet } from '../page.ts';
-import { dimensionOfNumber, filled } from '../sentences.ts';
+import { dimensionOfNumber, filled } from '../number.ts';
 import { print, type Shown } from '../shown.ts';
 import { capital, listed, numberWords, sentence } from '../words.ts';
 import { hazardClauses, practice } from '../cautions.ts';

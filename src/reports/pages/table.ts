@@ -3,8 +3,8 @@ import { referenceName, type Reference } from '../../quantities/reference.ts';
 import type { Run, StepRun } from '../../quantities/run.ts';
 import { printNumber } from '../../units/display.ts';
 import type { Block, Page, Sheet } from '../page.ts';
-import { dimensionOfNumber } from '../sentences.ts';
-import { bandOf, inUnit, print, shownFor, spreadInUnit, unitFor, type AskedUnits, type Shown } from '../shown.ts';
+import { dimensionOfNumber, unitOfNumber } from '../number.ts';
+import { bandOf, inUnit, print, shownFor, spreadInUnit, type AskedUnits, type Shown } from '../shown.ts';
 import { listed } from '../words.ts';
 import { recipeHeadOf } from './recipe-head.ts';
 
@@ -92,7 +92,8 @@ function cellOf(step: StepRun, reference: Reference, shown: Shown): Cell {
   if (reading.kind === 'missing') return { text: 'open', band: '' };
   if (reading.kind === 'inapplicable') return { text: '', band: '' };
   const expanded = shown.coverage * step.uncertainty(reference);
-  const text = print(shown, reading.value, dimensionOfNumber(reference), expanded);
+  const unit = unitOfNumber(shown, step, reference, reading.value);
+  const text = print(shown, reading.value, dimensionOfNumber(reference), expanded, unit);
   const whose = reading.of === undefined ? '' : ` (${reading.of})`;
   return { text: text + whose, band: bandOf(shown, reference.id, reading.value) ?? '' };
 }
@@ -147,7 +148,7 @@ export function numberCells(step: StepRun, reference: Reference, shown: Shown): 
   if (reading.kind === 'missing') return ['', '', '', '', '', `needs ${listed(reading.needs)}`];
   if (reading.kind === 'inapplicable') return ['', '', '', '', '', reading.because];
   const dimension = dimensionOfNumber(reference);
-  const unit = unitFor(shown, reading.value, dimension);
+  const unit = unitOfNumber(shown, step, reference, reading.value);
   return [
     printNumber(inUnit(shown, reading.value, unit, dimension)),
     printNumber(spreadInUnit(shown, shown.coverage * step.uncertainty(reference), unit, dimension)),

@@ -3,7 +3,7 @@ import { referenceName } from '../../quantities/reference.ts';
 import { allQuantities } from '../../quantities/catalogue.ts';
 import type { StepRun } from '../../quantities/run.ts';
 import { DIMENSIONS } from '../../units/dimensions.ts';
-import { dimensionOfNumber } from '../sentences.ts';
+import { dimensionOfNumber } from '../number.ts';
 import { bandOf, type Shown } from '../shown.ts';
 
 export interface ReferenceRecord {
