@@ -25,7 +25,7 @@ export async function validatorsModule(schemas: Schemas): Promise<string> {
   ajv.opts.dynamicRef = false;
   for (const [file, node] of schemas) ajv.addSchema(structural(schemas, { file, node }));
   const ids = Object.fromEntries(SORTS.map((sort) => [sort, textOf(schemas.get(`${sort}.json`)?.$id)]));
-  const code = await bundled(leaner(standalone.default(ajv, ids)));
+  const code = await bundled(standalone.default(ajv, ids));
   if (code.includes('require(')) throw new Error('a require is left in the validators');
   return `${HEAD}${code}`;
 }
@@ -89,28 +89,6 @@ function isSpan(schemas: Schemas, { file, node }: Located): boolean {
 }
 
 const SPAN_KEYS: ReadonlySet<string> = new Set(['from', 'to', 'over', 'usually', 'at_least', 'at_most']);
-
-/**
- * The same code at two thirds of its length, which a start of the program has to read: errors are made and kept by one
- * function, without the path in the schema that no message needs, and functions are told only where in the content they are.
- */
-function leaner(code: string): string {
-  const made = code.replaceAll(KEPT_ERROR, (_all, _name, where: string | undefined, keyword: string, parameters: string) => {
-    return `vErrors = kept(vErrors, ${where ?? 'instancePath'}, ${keyword}, {params:${parameters}});errors++;`;
-  });
-  if (made.length > 0.9 * code.length) throw new Error('the validators keep their errors in another way than before');
-  return `${made.replaceAll(/,parentData:[^,{}]+,parentDataProperty:[^,{}]+,rootData/g, '')}${KEEP}`;
-}
-
-const KEPT_ERROR =
-  /const (err\d+) = \{instancePath(?::([^,]+))?,schemaPath:"[^"]*",keyword:("\w+"),params:(.+?)\};if\(vErrors === null\)\{vErrors = \[\1\];\}\s*else \{vErrors\.push\(\1\);\}errors\+\+;/g;
-
-const KEEP = `
-function kept(errors, instancePath, keyword, more) {
-  const error = { instancePath, keyword, ...more };
-  return errors === null ? [error] : (errors.push(error), errors);
-}
-`;
 
 async function bundled(code: string): Promise<string> {
   const { outputFiles } = await build({

@@ -45,7 +45,7 @@ export function moleculesPerFormula(scope: Scope): number | Missing | Inapplicab
 }
 
 function carriers(element: string, scope: Scope): readonly string[] {
-  return scope.gases.filter((gas) => (scope.gas(gas)?.formula.get(element) ?? 0) > 0);
+  return scope.fedGases.filter((gas) => (scope.gas(gas)?.formula.get(element) ?? 0) > 0);
 }
 
 function etchBalance(film: ReadonlyMap<string, number>, product: ReadonlyMap<string, number>): Balance | undefined {

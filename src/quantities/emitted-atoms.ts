@@ -54,7 +54,7 @@ export const emissionEnergyOf = quantity<EmissionArguments>({
     emittedOr(reference, scope, (emitted) => {
       if (emitted.role === 'melt') return { id: 'melt-energy', of: reference.of ?? 'melt' };
       const stated = scope.emitterAddress(emitted, 'energy');
-      if (scope.has(stated)) return stated;
+      if (scope.states(stated)) return stated;
       const voltage = scope.emitterAddress(emitted, 'voltage');
       return [
         `atoms.${emitted.atom}.sublimation_enthalpy`,
@@ -218,7 +218,7 @@ export const emittedPath = quantity<[]>({
   from: (reference, scope) =>
     emittedOr(reference, scope, (emitted) => {
       const of = reference.of ?? emitted.role;
-      const cold = emitted.role === 'melt' && !scope.has(scope.emitterAddress(emitted, 'temperature'));
+      const cold = emitted.role === 'melt' && !scope.states(scope.emitterAddress(emitted, 'temperature'));
       return { id: cold ? 'thermal-atom-path' : 'fast-free-path', of } as const;
     }),
   value: () => NaN,

@@ -14,9 +14,20 @@ export const setpoint = quantity<[]>({
   statement: 'A setpoint itself, as in setpoint:pressure.',
   source: 'the recipe',
   subjects: (scope) => scope.addresses('').filter((address) => !address.startsWith('chamber.')),
-  from: ({ of = '' }, scope) => (scope.has(of) || scope.isUnknown(of) ? of : inapplicable(`the step sets no ${of}`)),
+  from: ({ of = '' }, scope) => {
+    const address = ownAddress(of, scope);
+    return scope.states(address) ? address : inapplicable(`the step sets no ${of}`);
+  },
   value: () => NaN,
 });
+
+/** `targets.throw` is that of the target that runs. */
+function ownAddress(address: string, scope: Scope): string {
+  const [family, key = '', more] = address.split('.');
+  if (more !== undefined || (family !== 'targets' && family !== 'melts')) return address;
+  const emitted = scope.emitted(family === 'targets' ? 'target' : 'melt');
+  return emitted === undefined ? address : scope.emitterAddress(emitted, key);
+}
 
 export const lineShare = quantity<[flow: number, fullScale: number]>({
   id: 'line-share',
@@ -58,13 +69,18 @@ export const gaugeFooting = quantity<[...GaugeArguments, floors: readonly number
   source: 'definition',
   nominal: true,
   from: (_, scope) => {
-    const { gauges } = scope.setup;
-    const floors = gauges.map((gauge) => `chamber.gauges.${gauge}.usable_from`);
-    if (floors.length === 0 || floors.some((floor) => !scope.has(floor))) return missing('chamber.gauges.usable_from');
-    return ['pressure', fullScales(scope), floors];
+    const floors = scope.setup.gauges.map((gauge) => `chamber.gauges.${gauge}.usable_from`);
+    if (!floors.some((floor) => scope.has(floor))) return missing('chamber.gauges.usable_from');
+    return ['pressure', fullScales(scope), floors.map((floor) => (scope.has(floor) ? floor : NO_FLOOR))];
   },
-  value: (pressure, scales, floors) => pressure / (floors[gaugeFor(pressure, scales).index] ?? NaN),
+  value: (pressure, scales, floors) => {
+    const floor = floors[gaugeFor(pressure, scales).index] ?? NO_FLOOR;
+    return floor > NO_FLOOR ? pressure / floor : inapplicable('the gauge that reads the pressure states no lowest');
+  },
 });
+
+/** Of a gauge that states none. */
+const NO_FLOOR = 0;
 
 function fullScales(scope: Scope): readonly string[] {
   return scope.setup.gauges.map((gauge) => `chamber.gauges.${gauge}.full_scale`);

@@ -1,81 +1,108 @@
 import type { Given } from '../steps/given.ts';
 import type { Choice, Law, Leaf, Node, Plan, Same } from './plan.ts';
 import { inapplicable, isAbsent, type Argument } from './quantity.ts';
-import type { Inapplicable, Known, Missing, Reading } from './reading.ts';
+import type { Inapplicable, Missing, Reading } from './reading.ts';
 
-/** Where readings are kept, by the slots of a plan. */
+/*
+ * Numbers are worked out on demand and kept by the slots of the plan. Nothing is made on the way that nobody asked for: a check
+ * in bulk works out some thousand numbers for every recipe.
+ */
+
+/** Where the numbers of a run are kept, by slot. */
 export interface Values {
   readonly plan: Plan;
+  readonly givens: ReadonlyMap<string, Given>;
   /** The run that this one comes from, which has every number that the changes do not reach. */
   readonly origin: Values | undefined;
   reaches(node: Node): boolean;
-  readonly givens: ReadonlyMap<string, Given>;
-  readonly readings: (Reading | undefined)[];
+  /** Whether a number was worked out; then it is in `numbers`, or `absent` says why there is none. */
+  readonly settled: (boolean | undefined)[];
+  readonly numbers: number[];
+  readonly absent: (Missing | Inapplicable | undefined)[];
   /** Whether any given that a number is read from is uncertain. */
   readonly uncertain: boolean[];
-  /** Slopes of a law's value to each of its own inputs, once they were worked out. */
+  /** Of the worst of several: which it was. */
+  readonly chosen: number[];
+  /** Slopes of a law's value to each of its own inputs, as far as they were worked out. */
   readonly partials: (number[] | undefined)[];
 }
 
-/** The reading of a node; whatever it needs is read first. */
-export function evaluate(values: Values, node: Node): Reading {
-  const kept = values.readings[node.slot];
-  if (kept !== undefined) return kept;
-  const { origin } = values;
-  const shared = origin !== undefined && !values.reaches(node);
-  const reading = shared ? evaluate(origin, node) : read(values, node);
-  values.readings[node.slot] = reading;
-  if (shared) values.uncertain[node.slot] = origin.uncertain[node.slot] ?? false;
-  return reading;
+/** The reading of a node. */
+export function readingOf(values: Values, node: Node): Reading {
+  const absent = settle(values, node);
+  if (absent !== undefined) return absent;
+  const value = values.numbers[node.slot] ?? NaN;
+  const of = node.kind === 'choice' ? node.subjects[values.chosen[node.slot] ?? -1] : undefined;
+  return of === undefined ? { kind: 'known', value } : { kind: 'known', value, of };
 }
 
-/** The arguments of a law whose inputs are all known. */
-export function lawAt(values: Values, node: Law): Argument[] {
-  const args: Argument[] = [];
+/** Works out a node and whatever it needs; the answer says why there is no number, where there is none. */
+export function settle(values: Values, node: Node): Missing | Inapplicable | undefined {
+  const { slot } = node;
+  if (values.settled[slot] === true) return values.absent[slot];
+  const absent = values.origin !== undefined && !values.reaches(node) ? share(values, values.origin, node) : work(values, node);
+  values.settled[slot] = true;
+  if (absent !== undefined) values.absent[slot] = absent;
+  return absent;
+}
+
+/** The arguments of a law whose inputs are all known; they hold until the law is asked for again. */
+export function argumentsOf(values: Values, { args, inputs }: Law): readonly Argument[] {
   let index = 0;
-  for (const count of node.shape) {
-    if (count === 'one') {
-      args.push(valueOf(values, node.inputs[index++]));
+  for (let position = 0; position < args.length; position++) {
+    const arg = args[position];
+    if (typeof arg !== 'object') {
+      args[position] = numberOf(values, inputs[index++]);
       continue;
     }
-    const list: number[] = [];
-    for (let i = 0; i < count; i++) list.push(valueOf(values, node.inputs[index++]));
-    args.push(list);
+    for (let i = 0; i < arg.length; i++) arg[i] = numberOf(values, inputs[index++]);
   }
   return args;
 }
 
-function read(values: Values, node: Node): Reading {
+function share(values: Values, origin: Values, node: Node): Missing | Inapplicable | undefined {
+  const absent = settle(origin, node);
+  keep(values, node, origin.numbers[node.slot] ?? NaN, origin.uncertain[node.slot] ?? false);
+  values.chosen[node.slot] = origin.chosen[node.slot] ?? -1;
+  return absent;
+}
+
+function work(values: Values, node: Node): Missing | Inapplicable | undefined {
   switch (node.kind) {
     case 'absent':
       return node.reading;
     case 'given':
-      return readGiven(values, node);
+      return workGiven(values, node);
     case 'constant':
-      return known(node.value);
+      return keep(values, node, node.value, false);
     case 'law':
-      return readLaw(values, node);
+      return workLaw(values, node);
     case 'same':
-      return readSame(values, node);
+      return workSame(values, node);
     case 'choice':
-      return readChoice(values, node);
+      return workChoice(values, node);
   }
 }
 
-function readGiven(values: Values, node: Leaf): Reading {
-  const given = values.givens.get(node.address) ?? node.fallback;
-  if (given === undefined) return { kind: 'missing', needs: [node.address] };
-  values.uncertain[node.slot] = given.uncertainty > 0;
-  return known(given.value);
+function keep(values: Values, { slot }: Node, value: number, uncertain: boolean): undefined {
+  values.numbers[slot] = value;
+  values.uncertain[slot] = uncertain;
 }
 
-function readLaw(values: Values, node: Law): Reading {
+function workGiven(values: Values, node: Leaf): Missing | undefined {
+  const given = values.givens.get(node.address) ?? node.fallback;
+  if (given === undefined) return { kind: 'missing', needs: [node.address] };
+  return keep(values, node, given.value, given.uncertainty > 0);
+}
+
+function workLaw(values: Values, node: Law): Missing | Inapplicable | undefined {
   const absent = absentInput(values, node.inputs);
   if (absent !== undefined) return absent;
-  values.uncertain[node.slot] = !node.quantity.nominal && node.inputs.some((input) => values.uncertain[input.slot]);
-  const answer = node.quantity.value(lawAt(values, node));
+  const { quantity } = node;
+  const answer = quantity.value(argumentsOf(values, node));
   if (isAbsent(answer)) return named(values, node, answer);
-  return Number.isFinite(answer) ? known(answer) : inapplicable(`${node.quantity.id} is undefined at these values`);
+  if (!Number.isFinite(answer)) return inapplicable(`${quantity.id} is undefined at these values`);
+  return keep(values, node, answer, quantity.nominal !== true && anyUncertain(values, node.inputs));
 }
 
 /** A law that finds something missing does not know by which address; its entry does. */
@@ -84,69 +111,63 @@ function named(values: Values, { quantity, reference }: Law, absent: Missing | I
   return { kind: 'missing', needs: quantity.needs?.(reference, values.plan.scope) ?? [] };
 }
 
-function readSame(values: Values, node: Same): Reading {
+function workSame(values: Values, node: Same): Missing | Inapplicable | undefined {
   const [input] = node.inputs;
   if (input === undefined) return inapplicable('it has no input');
-  const reading = evaluate(values, input);
-  values.uncertain[node.slot] = !node.quantity.nominal && (values.uncertain[input.slot] ?? false);
-  return reading;
+  const absent = settle(values, input);
+  if (absent !== undefined) return absent;
+  return keep(values, node, numberOf(values, input), node.quantity.nominal !== true && anyUncertain(values, node.inputs));
 }
 
-function readChoice(values: Values, node: Choice): Reading {
-  const readings = node.inputs.map((input) => evaluate(values, input));
-  const absent = gravestAbsence(readings);
-  const chosen = worstOf(readings, node.quantity.worst ?? 'largest');
-  if (chosen === undefined) return absent ?? inapplicable('none of them applies');
-  // One candidate that is missing could be the worst.
-  if (absent?.kind === 'missing') return absent;
-  const input = node.inputs[chosen.index];
-  if (input !== undefined) values.uncertain[node.slot] = values.uncertain[input.slot] ?? false;
-  return { ...chosen.reading, of: node.subjects[chosen.index] ?? '' };
-}
-
-/** Index and reading of the worst known candidate. */
-export function worstOf(
-  readings: readonly Reading[],
-  worst: 'largest' | 'smallest',
-): { index: number; reading: Known } | undefined {
-  let chosen: { index: number; reading: Known } | undefined;
-  for (const [index, reading] of readings.entries()) {
-    if (reading.kind !== 'known') continue;
-    const beats = worst === 'largest' ? reading.value > (chosen?.reading.value ?? -Infinity) : reading.value < (chosen?.reading.value ?? Infinity);
-    if (beats) chosen = { index, reading };
+function workChoice(values: Values, node: Choice): Missing | Inapplicable | undefined {
+  const largest = (node.quantity.worst ?? 'largest') === 'largest';
+  let chosen = -1;
+  let worst = NaN;
+  const absences: (Missing | Inapplicable)[] = [];
+  for (const [index, input] of node.inputs.entries()) {
+    const absent = settle(values, input);
+    if (absent !== undefined) {
+      absences.push(absent);
+      continue;
+    }
+    const value = numberOf(values, input);
+    if (chosen !== -1 && (largest ? value <= worst : value >= worst)) continue;
+    chosen = index;
+    worst = value;
   }
-  return chosen;
+  // A candidate that is missing could be the worst; one that does not apply could not.
+  const needs = needsOf(absences);
+  if (needs.length > 0) return { kind: 'missing', needs };
+  const input = node.inputs[chosen];
+  if (input === undefined) return absences[0] ?? inapplicable('none of them applies');
+  values.chosen[node.slot] = chosen;
+  return keep(values, node, worst, values.uncertain[input.slot] ?? false);
 }
 
 /** The first input that does not apply, else all that is missing, else nothing. */
 function absentInput(values: Values, inputs: readonly Node[]): Missing | Inapplicable | undefined {
-  let needs: Set<string> | undefined;
-  let notApplying: Inapplicable | undefined;
+  let absences: (Missing | Inapplicable)[] | undefined;
   for (const input of inputs) {
-    const reading = evaluate(values, input);
-    if (reading.kind === 'inapplicable') notApplying ??= reading;
-    if (reading.kind === 'missing') {
-      needs ??= new Set();
-      for (const need of reading.needs) needs.add(need);
-    }
+    const absent = settle(values, input);
+    if (absent === undefined) continue;
+    absences ??= [];
+    absences.push(absent);
   }
-  return notApplying ?? (needs === undefined ? undefined : { kind: 'missing', needs: [...needs].sort() });
+  if (absences === undefined) return undefined;
+  return absences.find(({ kind }) => kind === 'inapplicable') ?? { kind: 'missing', needs: needsOf(absences) };
 }
 
-function gravestAbsence(readings: readonly Reading[]): Missing | Inapplicable | undefined {
-  const needs = new Set<string>();
-  for (const reading of readings) if (reading.kind === 'missing') for (const need of reading.needs) needs.add(need);
-  if (needs.size > 0) return { kind: 'missing', needs: [...needs].sort() };
-  return readings.find((reading) => reading.kind === 'inapplicable');
+/** All that is missing, each once. */
+function needsOf(absences: readonly (Missing | Inapplicable)[]): readonly string[] {
+  const needs = absences.flatMap((absent) => (absent.kind === 'missing' ? absent.needs : []));
+  return [...new Set(needs)].sort();
 }
 
-function valueOf(values: Values, node: Node | undefined): number {
-  const reading = node === undefined ? undefined : values.readings[node.slot];
-  return reading?.kind === 'known' ? reading.value : NaN;
+function anyUncertain(values: Values, inputs: readonly Node[]): boolean {
+  for (const { slot } of inputs) if (values.uncertain[slot] === true) return true;
+  return false;
 }
 
-const NO_REMARKS: readonly string[] = [];
-
-function known(value: number): Known {
-  return { kind: 'known', value, remarks: NO_REMARKS };
+export function numberOf(values: Values, node: Node | undefined): number {
+  return node === undefined ? NaN : (values.numbers[node.slot] ?? NaN);
 }

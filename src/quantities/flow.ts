@@ -22,7 +22,7 @@ export const volume = quantity<[diameter: number, height: number]>({
   dimension: 'volume',
   statement: 'Gas volume of the chamber: stated, or that of a cylinder.',
   source: 'definition',
-  from: (_, scope) => (scope.has('body.volume') ? 'body.volume' : cylinder(scope)),
+  from: (_, scope) => (scope.states('body.volume') ? 'body.volume' : cylinder(scope)),
   value: (diameter, height) => (Math.PI * diameter ** 2 * height) / 4,
 });
 
@@ -32,7 +32,7 @@ export const wallArea = quantity<[diameter: number, height: number]>({
   dimension: 'area',
   statement: 'Inner surface of the chamber: stated, or that of a cylinder.',
   source: 'definition',
-  from: (_, scope) => (scope.has('body.wall_area') ? 'body.wall_area' : cylinder(scope)),
+  from: (_, scope) => (scope.states('body.wall_area') ? 'body.wall_area' : cylinder(scope)),
   value: (diameter, height) => Math.PI * diameter * (height + diameter / 2),
 });
 
@@ -82,7 +82,7 @@ export const pumpTemperature = quantity<[wall: number]>({
   dimension: 'temperature',
   statement: 'Temperature of the gas at the pump: stated, or that of the wall but at most 60 degC.',
   source: 'gas cools on its way to the pump (common practice)',
-  from: (_, scope) => (scope.has('chamber.pump.temperature') ? 'chamber.pump.temperature' : ['temperatures.wall']),
+  from: (_, scope) => (scope.states('chamber.pump.temperature') ? 'chamber.pump.temperature' : ['temperatures.wall']),
   value: (wall) => Math.min(wall, WARMEST_PUMP),
 });
 
@@ -120,7 +120,8 @@ export const pumpSpeed = quantity<PumpArguments>({
 });
 
 function pumpSpeedIngredients(scope: Scope): Recipe<PumpArguments> | Ingredient | Missing | Inapplicable {
-  const { pumpSpeed: kind, pumpRows, gases } = scope.setup;
+  const { pumpSpeed: kind, pumpRows } = scope.setup;
+  const gases = scope.fedGases;
   if (kind === 'none') return inapplicable('the chamber has no pump');
   if (kind === 'one') return 'chamber.pump.speed';
   if (kind === 'by-gas') {

@@ -18,7 +18,7 @@ export const gasPressure = quantity<[]>({
 function pressureOf(scope: Scope): Ingredient | Missing | Inapplicable {
   if (scope.isUnknown('pressure')) return missing('pressure');
   if (scope.has('pressure')) return 'pressure';
-  if (scope.has('fill_to')) return 'fill_to';
+  if (scope.states('fill_to')) return 'fill_to';
   if (scope.setup.throttle === 'closed') return inapplicable('the pressure rises while the throttle is closed');
   if (scope.fed) return scope.setup.throttle === 'open' ? { id: 'open-pressure' } : missing('pressure');
   return scope.has('chamber.pump.base_pressure') ? 'chamber.pump.base_pressure' : missing('pressure');
@@ -40,6 +40,8 @@ function temperatureOf(scope: Scope): Ingredient | Missing {
   if (scope.has('temperatures.gas')) return 'temperatures.gas';
   if (!scope.has('temperatures.wall')) return missing('temperatures.gas', 'temperatures.wall');
   if (setup.flow === 'axial' || setup.target !== undefined || setup.melt !== undefined) return 'temperatures.wall';
+  // A wafer that may be hot leaves open what gas it warms.
+  if (scope.isUnknown('temperatures.wafer')) return missing('temperatures.gas', 'temperatures.wafer');
   if (scope.has('temperatures.wafer') && !scope.powered) return { id: 'between-temperature' };
   return scope.powered ? { id: 'plasma-gas-temperature' } : 'temperatures.wall';
 }
@@ -135,11 +137,12 @@ export const flowRatio = quantity<[dividend: number, divisor: number]>({
   dimension: 'number',
   statement: 'Flow of one gas over that of another, as in flow-ratio:O2/Ar.',
   source: 'definition',
-  subjects: (scope) => scope.gases.flatMap((a) => scope.gases.filter((b) => a !== b).map((b) => `${a}/${b}`)),
+  subjects: (scope) => scope.fedGases.flatMap((a) => scope.fedGases.filter((b) => a !== b).map((b) => `${a}/${b}`)),
   from: ({ of = '' }, scope) => {
     const [a = '', b = ''] = of.split('/');
-    const absent = [a, b].filter((gas) => !scope.setup.gases.includes(gas));
-    if (absent.length > 0) return inapplicable(`the step has no flow of ${absent.join(' or ')}`);
+    const absent = [a, b].filter((gas) => !scope.fedGases.includes(gas));
+    // A gas that does not flow beside one that does has the ratio zero.
+    if (absent.includes(b) || scope.gas(a) === undefined) return inapplicable(`the step has no flow of ${absent.join(' or ')}`);
     return [{ id: 'flow-rate', of: a }, { id: 'flow-rate', of: b }];
   },
   value: (dividend, divisor) => (divisor > 0 ? dividend / divisor : inapplicable('the gas it is divided by does not flow')),

@@ -27,7 +27,7 @@ export function lengthsOf(scope: Scope): readonly string[] {
 
 function lengthIngredient(length: string, scope: Scope): [readonly string[]] | Ingredient | Missing | Inapplicable {
   const stated = `lengths.${length}`;
-  if (scope.has(stated)) return stated;
+  if (scope.states(stated)) return stated;
   switch (length) {
     case 'chamber':
       return chamberLengths(scope);

@@ -34,8 +34,8 @@ export interface Law extends Common {
   readonly kind: 'law';
   readonly quantity: Quantity;
   readonly reference: Reference;
-  /** Lengths of the list arguments, or 'one' for a plain number, in the order of the arguments. */
-  readonly shape: readonly (number | 'one')[];
+  /** Room for the law's arguments, filled anew for each step: a plain number, or a list as long as it will be. */
+  readonly args: (number | number[])[];
 }
 
 /** A number that in this scope simply is another one, or a given. */
@@ -105,7 +105,7 @@ export class Plan {
     const known = this.#byName.get(name);
     if (known !== undefined) return known;
     const inputs = [this.number(reference), this.number(over)];
-    const node = this.#add({ kind: 'law', name, inputs, quantity: RATIO, reference, shape: ['one', 'one'] });
+    const node = this.#add({ kind: 'law', name, inputs, quantity: RATIO, reference, args: [NaN, NaN] });
     this.#byName.set(name, node);
     return node;
   }
@@ -142,8 +142,8 @@ export class Plan {
       return this.#add({ kind: 'same', name, inputs: [this.#ingredient(recipe)], quantity, reference });
     }
     const inputs = recipe.flat().map((ingredient) => this.#ingredient(ingredient));
-    const shape = recipe.map((part) => (isList(part) ? part.length : 'one'));
-    return this.#add({ kind: 'law', name, inputs, quantity, reference, shape });
+    const args = recipe.map((part) => (isList(part) ? part.map(() => NaN) : NaN));
+    return this.#add({ kind: 'law', name, inputs, quantity, reference, args });
   }
 
   /** The subjects that a reference stands for where it stands for several: `worst`, or a role of an alloy. */

@@ -9,7 +9,6 @@ export interface Known {
   readonly value: number;
   /** Whose number it is, where the reference named a role or the worst of several. */
   readonly of?: string;
-  readonly remarks: readonly string[];
 }
 
 export interface Missing {

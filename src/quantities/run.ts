@@ -1,14 +1,14 @@
-import type { Given } from '../steps/given.ts';
+import { isDefault, type Given } from '../steps/given.ts';
 import { Givens, shapeOf } from '../steps/givens.ts';
 import type { Site } from '../steps/site.ts';
 import type { Recipe, Step } from '../steps/step.ts';
 import type { Library } from '../substances/library.ts';
-import { evaluate, lawAt, type Values } from './evaluate.ts';
+import { argumentsOf, readingOf, settle, type Values } from './evaluate.ts';
 import { Plan, type Node } from './plan.ts';
-import type { Reading, Slope } from './reading.ts';
+import type { Inapplicable, Missing, Reading, Slope } from './reading.ts';
 import type { Reference } from './reference.ts';
 import { Scope } from './scope.ts';
-import { slopesOf, standardUncertainty } from './slopes.ts';
+import { contributionsTo, slopesOf, standardUncertainty } from './slopes.ts';
 
 /** Another value for a given: what `with` moves. */
 export interface Change {
@@ -37,8 +37,11 @@ export class StepRun implements Values {
   readonly plan: Plan;
   readonly givens: ReadonlyMap<string, Given>;
   readonly origin: StepRun | undefined;
-  readonly readings: (Reading | undefined)[] = [];
+  readonly settled: (boolean | undefined)[] = [];
+  readonly numbers: number[] = [];
+  readonly absent: (Missing | Inapplicable | undefined)[] = [];
   readonly uncertain: boolean[] = [];
+  readonly chosen: number[] = [];
   readonly partials: (number[] | undefined)[] = [];
   readonly #changed: ReadonlySet<string>;
   readonly #reached: (boolean | undefined)[] = [];
@@ -52,7 +55,7 @@ export class StepRun implements Values {
   }
 
   read(reference: Reference, over?: Reference): Reading {
-    return evaluate(this, this.plan.node(reference, over));
+    return readingOf(this, this.plan.node(reference, over));
   }
 
   /** Standard uncertainty of a known number; zero where it is judged at its setpoint. */
@@ -63,6 +66,19 @@ export class StepRun implements Values {
   /** How every given moves the number, strongest contribution first. */
   slopes(reference: Reference, over?: Reference): readonly Slope[] {
     return slopesOf(this, this.plan.node(reference, over));
+  }
+
+  /** How every uncertain given moves the number, strongest contribution first. */
+  contributions(reference: Reference, over?: Reference): readonly Slope[] {
+    return contributionsTo(this, this.plan.node(reference, over));
+  }
+
+  /** The defaults that a number is read from, whether they are uncertain or not. */
+  defaults(reference: Reference, over?: Reference): readonly Given[] {
+    return reachedFrom(this.plan.node(reference, over)).flatMap((node) => {
+      const given = node.kind === 'given' ? givenAt(this, node.address, node.fallback) : undefined;
+      return given !== undefined && isDefault(given.origin) ? [given] : [];
+    });
   }
 
   /** All that was read on the way to a number, each once: the number itself first, every line before those it is read from. */
@@ -170,7 +186,7 @@ function lineOf(run: StepRun, node: Node): Line {
   const given = node.kind === 'given' ? givenAt(run, node.address, node.fallback) : undefined;
   return {
     node,
-    reading: evaluate(run, node),
+    reading: readingOf(run, node),
     uncertainty: standardUncertainty(run, node),
     ...(given === undefined ? {} : { given }),
     remarks: remarksOf(run, node),
@@ -178,6 +194,6 @@ function lineOf(run: StepRun, node: Node): Line {
 }
 
 function remarksOf(run: StepRun, node: Node): readonly string[] {
-  if (node.kind !== 'law' || evaluate(run, node).kind !== 'known') return [];
-  return node.quantity.remarks(node.reference, run.plan.scope, lawAt(run, node));
+  if (node.kind !== 'law' || settle(run, node) !== undefined) return [];
+  return node.quantity.remarks(node.reference, run.plan.scope, argumentsOf(run, node));
 }

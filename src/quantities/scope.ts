@@ -31,6 +31,11 @@ export class Scope {
     return this.#step.unknown.has(address);
   }
 
+  /** Whether a document speaks of it: with a value, or as unknown. Then no rule and no default stands in for it. */
+  states(address: string): boolean {
+    return this.has(address) || this.isUnknown(address);
+  }
+
   /** Addresses of the givens that start so. */
   addresses(prefix: string): readonly string[] {
     return [...this.#step.givens.keys()].filter((address) => address.startsWith(prefix));
@@ -49,6 +54,12 @@ export class Scope {
   get gases(): readonly string[] {
     if (this.setup.gases.length > 0) return this.setup.gases;
     return this.setup.residual.length > 0 ? this.setup.residual : ['H2O'];
+  }
+
+  /** Gases that the lines bring, whatever the stated composition makes of them. */
+  get fedGases(): readonly string[] {
+    const { lines, gases, composition } = this.setup;
+    return composition ? [...new Set(lines.flatMap(({ brings }) => brings.map(({ gas }) => gas)))] : gases;
   }
 
   get powered(): boolean {

@@ -1,7 +1,6 @@
 import type { Given } from '../steps/given.ts';
-import { evaluate, lawAt, type Values } from './evaluate.ts';
-import type { Choice, Law, Node } from './plan.ts';
-import type { Argument } from './quantity.ts';
+import { argumentsOf, numberOf, settle, type Values } from './evaluate.ts';
+import type { Law, Node } from './plan.ts';
 import type { Slope } from './reading.ts';
 
 /*
@@ -12,7 +11,7 @@ import type { Slope } from './reading.ts';
 
 /** Standard uncertainty of a number: root of the sum of squares of what each given contributes (GUM 5.1.2). */
 export function standardUncertainty(values: Values, node: Node): number {
-  if (evaluate(values, node).kind !== 'known' || !values.uncertain[node.slot]) return 0;
+  if (settle(values, node) !== undefined || values.uncertain[node.slot] !== true) return 0;
   let sum = 0;
   chain(values, node, true, (given, slope) => {
     sum += (slope * given.uncertainty) ** 2;
@@ -22,9 +21,18 @@ export function standardUncertainty(values: Values, node: Node): number {
 
 /** Slope of a number to every given it is read from, strongest contribution first, then by address. */
 export function slopesOf(values: Values, node: Node): readonly Slope[] {
-  if (evaluate(values, node).kind !== 'known') return [];
+  return strongestFirst(values, node, false);
+}
+
+/** The same for the uncertain givens alone. */
+export function contributionsTo(values: Values, node: Node): readonly Slope[] {
+  return values.uncertain[node.slot] === true ? strongestFirst(values, node, true) : [];
+}
+
+function strongestFirst(values: Values, node: Node, onlyUncertain: boolean): readonly Slope[] {
+  if (settle(values, node) !== undefined) return [];
   const slopes: Slope[] = [];
-  chain(values, node, false, (given, slope, address) => {
+  chain(values, node, onlyUncertain, (given, slope, address) => {
     slopes.push({ address, slope, contribution: Math.abs(slope) * given.uncertainty });
   });
   return slopes.sort((a, b) => b.contribution - a.contribution || (a.address < b.address ? -1 : 1));
@@ -51,8 +59,6 @@ function chain(
     if (node.kind === 'given') {
       const given = values.givens.get(node.address) ?? node.fallback;
       if (given !== undefined) visit(given, slope, node.address);
-    } else if (node.kind === 'same') {
-      for (const { slot: input } of node.inputs) slopeTo[input] = (slopeTo[input] ?? 0) + slope;
     } else {
       pass(values, node, slope, onlyUncertain);
     }
@@ -61,41 +67,37 @@ function chain(
 
 /** Hands a slope on from a node to its inputs. */
 function pass(values: Values, node: Node, slope: number, onlyUncertain: boolean): void {
+  if (node.kind === 'same') return add(node.inputs[0], slope);
+  // The worst of several moves with the one that was chosen.
+  if (node.kind === 'choice') return add(node.inputs[values.chosen[node.slot] ?? -1], slope);
+  if (node.kind !== 'law') return;
   const partials = partialsOf(values, node, onlyUncertain);
-  for (let index = 0; index < node.inputs.length; index++) {
-    const input = node.inputs[index];
-    if (input === undefined || (onlyUncertain && !values.uncertain[input.slot])) continue;
-    slopeTo[input.slot] = (slopeTo[input.slot] ?? 0) + slope * (partials[index] ?? 0);
+  for (const [index, input] of node.inputs.entries()) {
+    if (!onlyUncertain || values.uncertain[input.slot] === true) add(input, slope * (partials[index] ?? 0));
   }
 }
 
-/** Slopes of a node's value to its own inputs, worked out as far as they are wanted and kept. NaN marks those not wanted so far. */
-function partialsOf(values: Values, node: Node, onlyUncertain: boolean): readonly number[] {
+function add(node: Node | undefined, slope: number): void {
+  if (node !== undefined) slopeTo[node.slot] = (slopeTo[node.slot] ?? 0) + slope;
+}
+
+/** Slopes of a law's value to its own inputs, worked out as far as they are wanted and kept. NaN marks those not wanted so far. */
+function partialsOf(values: Values, node: Law, onlyUncertain: boolean): readonly number[] {
   if (values.origin !== undefined && !values.reaches(node)) return partialsOf(values.origin, node, onlyUncertain);
-  if (node.kind === 'choice') return chosenSlopes(values, node);
-  if (node.kind !== 'law') return [];
   let partials = values.partials[node.slot];
   if (partials === undefined) {
     partials = node.inputs.map(() => NaN);
     values.partials[node.slot] = partials;
   }
-  const args = lawAt(values, node);
-  let index = 0;
-  for (const [position, arg] of args.entries()) {
-    const count = typeof arg === 'number' ? 1 : arg.length;
-    for (let i = 0; i < count; i++, index++) {
-      const input = node.inputs[index];
-      const wanted = input !== undefined && (!onlyUncertain || values.uncertain[input.slot]);
-      if (wanted && Number.isNaN(partials[index])) partials[index] = partial(values, node, args, position, i);
-    }
+  let filled = false;
+  for (const [index, input] of node.inputs.entries()) {
+    const wanted = !onlyUncertain || values.uncertain[input.slot] === true;
+    if (!wanted || !Number.isNaN(partials[index])) continue;
+    if (!filled) argumentsOf(values, node);
+    filled = true;
+    partials[index] = partial(node, index, numberOf(values, input), numberOf(values, node));
   }
   return partials;
-}
-
-/** The worst of several moves with the one that was chosen. */
-function chosenSlopes(values: Values, node: Choice): readonly number[] {
-  const reading = evaluate(values, node);
-  return node.subjects.map((subject) => (reading.kind === 'known' && subject === reading.of ? 1 : 0));
 }
 
 const RELATIVE_MOVE = 1e-7;
@@ -104,30 +106,41 @@ const MOVE_FROM_ZERO = 1e-9;
 const STEEP = 30;
 
 /**
- * Slope of a law to one of its arguments: how much its value changes over a small move upward. Where it has no value above, or
- * stands at a jump (a table goes on to its next row), the move downward counts, and of two the flatter: a jump is no slope.
+ * Slope of a law to one of its inputs: how much its value changes over a small move upward. Where it has no value above, or stands
+ * at a jump (a table goes on to its next row), the move downward counts, and of two the flatter: a jump is no slope.
  */
-function partial(values: Values, node: Law, args: readonly Argument[], position: number, index: number): number {
-  const centre = evaluate(values, node);
-  if (centre.kind !== 'known') return 0;
-  const at = valueAt(args, position, index);
+function partial(node: Law, index: number, at: number, centre: number): number {
   const move = Math.abs(at) * RELATIVE_MOVE || MOVE_FROM_ZERO;
-  const up = (moved(node, args, position, index, at + move) - centre.value) / move;
-  if (Math.abs(up * at) <= STEEP * Math.abs(centre.value)) return up;
-  const down = (centre.value - moved(node, args, position, index, at - move)) / move;
+  const up = (moved(node, index, at + move, at) - centre) / move;
+  if (Math.abs(up * at) <= STEEP * Math.abs(centre)) return up;
+  const down = (centre - moved(node, index, at - move, at)) / move;
   if (!Number.isFinite(up)) return Number.isFinite(down) ? down : 0;
   return Math.abs(down) < Math.abs(up) ? down : up;
 }
 
-function valueAt(args: readonly Argument[], position: number, index: number): number {
-  const arg = args[position];
-  return (typeof arg === 'object' ? arg[index] : arg) ?? NaN;
+/** The value of a law with one input replaced for the moment; NaN where it has none. */
+function moved({ args, quantity }: Law, index: number, value: number, back: number): number {
+  put(args, index, value);
+  const answer = quantity.value(args);
+  put(args, index, back);
+  return typeof answer === 'number' ? answer : NaN;
 }
 
-/** The value of a law with one number among its arguments replaced; NaN where it has none. */
-function moved({ quantity }: Law, args: readonly Argument[], position: number, index: number, value: number): number {
-  const arg = args[position];
-  const replaced = typeof arg === 'object' ? arg.with(index, value) : value;
-  const answer = quantity.value(args.with(position, replaced));
-  return typeof answer === 'number' ? answer : NaN;
+/** Puts a number at its place among the arguments, counting through lists. */
+function put(args: (number | number[])[], index: number, value: number): void {
+  let left = index;
+  for (const [position, arg] of args.entries()) {
+    if (typeof arg !== 'object') {
+      if (left === 0) {
+        args[position] = value;
+        return;
+      }
+      left -= 1;
+    } else if (left < arg.length) {
+      arg[left] = value;
+      return;
+    } else {
+      left -= arg.length;
+    }
+  }
 }

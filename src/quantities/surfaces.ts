@@ -42,7 +42,7 @@ export const monolayerTimeOf = quantity<[sites: number, sticking: readonly numbe
   from: (reference, scope) => {
     const gas = gasOf(reference, scope);
     if (gas === undefined) return missing('reactant.gas');
-    const own = gas === scope.setup.reactant && scope.has('reactant.sticking');
+    const own = gas === scope.setup.reactant && scope.states('reactant.sticking');
     return ['reactant.site_density', own ? ['reactant.sticking'] : [], { id: 'impingement', of: gas }];
   },
   value: (sites, [sticking = 1], flux) => monolayerTime(sites, sticking, flux),
@@ -89,11 +89,11 @@ export const activeArea = quantity<
     'wafer.count',
     'wafer.coated_faces',
     'surface.open_area',
-    scope.has('chamber.walls.deposited_area') ? ['chamber.walls.deposited_area'] : [],
+    scope.states('chamber.walls.deposited_area') ? ['chamber.walls.deposited_area'] : [],
   ],
   value: (wafer, count, faces, open, [deposited = 0]) => wafer * count * faces * open + deposited,
   remarks: (_, scope) =>
-    scope.has('chamber.walls.deposited_area')
+    scope.states('chamber.walls.deposited_area')
       ? []
       : ['what the walls take up is not counted, since chamber.walls.deposited_area is not given: the true utilisation is higher'],
 });
@@ -117,7 +117,7 @@ function utilisationIngredients({ of }: Reference, scope: Scope): UtilisationRec
   if ('kind' in balance) return balance;
   if (of === undefined) return { id: 'utilisation', of: 'worst' };
   const atoms = balance.atomsPerFormula.get(of) ?? 0;
-  const carriers = scope.gases.filter((gas) => (scope.gas(gas)?.formula.get(of) ?? 0) > 0);
+  const carriers = scope.fedGases.filter((gas) => (scope.gas(gas)?.formula.get(of) ?? 0) > 0);
   if (atoms === 0 || carriers.length === 0) return inapplicable(`the feed brings no ${of} that the film takes up`);
   return [
     { id: 'film-flux' },
@@ -156,7 +156,7 @@ export const surfaceRate = quantity<[a: number, b: number, perFormula: readonly 
   source: 'Motz & Wise, J. Chem. Phys. 32, 1893 (1960); else k_s = ν J/n_i by the element balance',
   from: (_, scope) => {
     if (scope.setup.reactant === undefined) return missing('reactant.gas');
-    if (scope.has('reactant.sticking')) return ['reactant.sticking', { id: 'mean-speed', of: 'reactant' }, []];
+    if (scope.states('reactant.sticking')) return ['reactant.sticking', { id: 'mean-speed', of: 'reactant' }, []];
     const molecules = moleculesPerFormula(scope);
     if (typeof molecules !== 'number') return molecules;
     return [{ id: 'film-flux' }, { id: 'reactant-density', of: 'reactant' }, [molecules]];

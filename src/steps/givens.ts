@@ -66,6 +66,13 @@ export class Givens implements ReadonlyMap<string, Given> {
     for (const [address, given] of this.entries()) visit(given, address, this);
   }
 
+  /** Those that change over the step or are set as a range. */
+  spanned(): readonly Given[] {
+    const spanned: Given[] = spannedOf(this.#below).filter(({ address }) => this.get(address)?.span !== undefined && !this.#own.has(address));
+    for (const given of this.#own.values()) if (given.span !== undefined) spanned.push(given);
+    return spanned;
+  }
+
   /** Which addresses there are, as one text: givens of one shape have the same. */
   shape(): string {
     let shape = shapeOf(this.#below);
@@ -89,6 +96,19 @@ export class Givens implements ReadonlyMap<string, Given> {
 }
 
 const NONE: ReadonlyMap<string, Given> = new Map();
+
+const SPANNED = new WeakMap<ReadonlyMap<string, Given>, readonly Given[]>();
+
+/** Givens that change over a step or are set as a range. */
+export function spannedOf(givens: ReadonlyMap<string, Given>): readonly Given[] {
+  if (givens instanceof Givens) return givens.spanned();
+  let spanned = SPANNED.get(givens);
+  if (spanned === undefined) {
+    spanned = [...givens.values()].filter(({ span }) => span !== undefined);
+    SPANNED.set(givens, spanned);
+  }
+  return spanned;
+}
 
 /** Layers that many steps stand on are asked for their shape again and again. */
 const SHAPES = new WeakMap<ReadonlyMap<string, Given>, string>();

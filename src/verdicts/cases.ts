@@ -1,5 +1,6 @@
 import type { Change, StepRun } from '../quantities/run.ts';
 import type { Given } from '../steps/given.ts';
+import { spannedOf } from '../steps/givens.ts';
 import type { Instance } from './verdict.ts';
 
 /** One of the cases in which a step is judged: as it usually runs, at an instant of a ramp, at a limit of a range. */
@@ -13,7 +14,7 @@ const INSTANTS: readonly number[] = Array.from({ length: 10 }, (_, index) => ind
 
 /** Every case in which a step is judged; the first is as it usually runs. */
 export function casesOf(run: StepRun): readonly Case[] {
-  const spans = [...run.givens.values()].filter(({ span }) => span !== undefined);
+  const spans = spannedOf(run.givens);
   if (spans.length === 0) return [{ run }];
   return [...rampCases(run, spans), ...rangeCases(run, spans)];
 }

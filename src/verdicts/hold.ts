@@ -61,7 +61,7 @@ function sided(side: Limit['side'], grades: Grades, level: Level): readonly Grad
 const ROUNDING = 1e-9;
 
 /** By how much a value lies beyond a limit; negative on its good side. */
-function beyondBy(value: number, { side, value: limit }: Limit): number {
+export function beyondBy(value: number, { side, value: limit }: Limit): number {
   const beyond = side === 'at_most' ? value - limit : limit - value;
   return Math.abs(beyond) <= ROUNDING * Math.abs(limit) ? 0 : beyond;
 }

@@ -23,7 +23,7 @@ export function judgeAssumption(assumption: Assumption, cases: readonly Case[], 
     }
   }
   if (worst !== undefined) return verdictOf(assumption, worst);
-  return blank(assumption, 'notApplicable', cases[0], { because: 'the step has nothing that it speaks of' });
+  return { ...blank(assumption, 'notApplicable', usual), because: 'the step has nothing that it speaks of' };
 }
 
 /** How one number of one case stands, before it is told in full. */
@@ -72,19 +72,44 @@ function referencesOf(reference: Reference, { plan }: StepRun): readonly Referen
 
 function verdictOf(assumption: Assumption, finding: Finding): Verdict {
   const { reading, standing, kind, of } = finding;
+  const verdict = blank(assumption, kind, of);
   const subject = subjectOf(assumption, finding);
-  if (reading.kind === 'inapplicable') return blank(assumption, kind, of, { because: reading.because, ...subject });
-  if (reading.kind === 'missing') {
-    const absence = kind === 'open' ? { needs: reading.needs } : { because: `not given: ${reading.needs.join(', ')}` };
-    return blank(assumption, kind, of, { ...absence, ...subject });
-  }
-  const told = { value: reading.value, uncertainty: finding.uncertainty, ...standing, ...subject };
-  return blank(assumption, kind, of, kind === 'pass' ? told : { ...told, ...groundsOf(assumption, finding) });
+  if (subject !== undefined) verdict.subject = subject;
+  if (standing !== undefined) Object.assign(verdict, standing);
+  if (reading.kind === 'known') {
+    verdict.value = reading.value;
+    verdict.uncertainty = finding.uncertainty;
+    if (kind !== 'pass') Object.assign(verdict, groundsOf(assumption, finding));
+  } else if (reading.kind === 'inapplicable') verdict.because = reading.because;
+  else if (kind === 'open') verdict.needs = reading.needs;
+  else verdict.because = `not given: ${reading.needs.join(', ')}`;
+  return verdict;
 }
 
-/** A verdict of a kind with what is told of it. */
-function blank(assumption: Assumption, kind: Kind, of: Case | undefined, told: Partial<Verdict>): Verdict {
-  const { process, name, statement, source, reference, over, bound, limits, cure } = assumption;
+type Writable<T> = { -readonly [K in keyof T]: T[K] };
+
+/** A verdict of a kind before anything is told of its number. */
+function blank(assumption: Assumption, kind: Kind, of: Case | undefined): Writable<Verdict> {
+  const place = of === undefined ? assumption.place : placeOf(kind, assumption.cure, of.run);
+  const verdict: Writable<Verdict> = { ...templateOf(assumption), kind, place };
+  if (of?.instance !== undefined) verdict.instance = of.instance;
+  return verdict;
+}
+
+/** What every verdict on an assumption has. */
+const TEMPLATES = new WeakMap<Assumption, Verdict>();
+
+function templateOf(assumption: Assumption): Verdict {
+  let template = TEMPLATES.get(assumption);
+  if (template === undefined) {
+    template = newTemplate(assumption);
+    TEMPLATES.set(assumption, template);
+  }
+  return template;
+}
+
+function newTemplate({ process, name, over, limits, ...rest }: Assumption): Verdict {
+  const { statement, source, reference, bound, cure, place } = rest;
   return {
     name: `${process}/${name}`,
     process,
@@ -93,19 +118,15 @@ function blank(assumption: Assumption, kind: Kind, of: Case | undefined, told: P
     source,
     reference,
     ...(over === undefined ? {} : { over }),
-    kind,
+    kind: 'notApplicable',
     level: limits[0]?.level ?? 'note',
     bound,
+    remarks: [],
+    assumed: [],
     cure,
-    ...(of?.instance === undefined ? {} : { instance: of.instance }),
-    remarks: NOTHING,
-    assumed: NOTHING,
-    place: of === undefined ? assumption.place : placeOf(kind, cure, of.run),
-    ...told,
+    place,
   };
 }
-
-const NOTHING: readonly never[] = [];
 
 /** A finding stands at the first setpoint that could cure it and that the recipe states, else at the step. */
 function placeOf(kind: Kind, cure: readonly string[], { step }: StepRun): Place {
@@ -126,10 +147,10 @@ function firstBelow(givens: ReadonlyMap<string, Given>, address: string): Given 
 }
 
 /** The gas or atom that a role, or the worst of several, stands for; of an alloy the atom. */
-function subjectOf({ reference: named }: Assumption, { reference, reading }: Finding): Pick<Verdict, 'subject'> {
+function subjectOf({ reference: named }: Assumption, { reference, reading }: Finding): string | undefined {
   const chosen = reading.kind === 'known' ? reading.of : undefined;
   const subject = reference === named ? chosen : reference.of;
-  return subject === undefined ? {} : { subject: subject.split('/').at(-1) ?? subject };
+  return subject?.split('/').at(-1);
 }
 
 /** What a verdict that does not pass rests on; a review that mostly rests on assumed values has the grade note. */
@@ -154,12 +175,15 @@ interface Share {
 
 /** The defaults that a number is read from. */
 function assumedIn(run: StepRun, reference: Reference, over: Reference | undefined): readonly Share[] {
-  const slopes = run.slopes(reference, over);
-  const variance = slopes.reduce((sum, { contribution }) => sum + contribution ** 2, 0);
-  return slopes.flatMap(({ address, slope, contribution }) => {
-    const given = run.given(address);
-    if (given === undefined || slope === 0 || !isDefault(given.origin)) return [];
-    return [{ given, share: variance > 0 ? contribution ** 2 / variance : 0 }];
+  const contributions = new Map<string, number>();
+  let variance = 0;
+  for (const { address, contribution } of run.contributions(reference, over)) {
+    contributions.set(address, contribution ** 2);
+    variance += contribution ** 2;
+  }
+  return run.defaults(reference, over).map((given) => {
+    const part = contributions.get(given.address) ?? 0;
+    return { given, share: part > 0 ? part / variance : 0 };
   });
 }
 

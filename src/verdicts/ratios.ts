@@ -24,13 +24,24 @@ export function ratioFaults({ ratios }: Site): readonly Fault[] {
 
 function judgeRatio(ratio: RatioSpec, run: StepRun, cases: readonly Case[], coverage: number): Verdict {
   const assumption = assumptionOf(ratio, run);
-  const verdict = judgeAssumption(assumption, cases, coverage);
-  const beyond = verdict.kind === 'notApplicable' && flows(ratio.of, run) && !flows(ratio.to, run);
-  if (!beyond) return verdict;
-  // The gas flows without the one it is held against: the ratio has no number, and is above every bound.
+  // Where the gas flows without the one it is held against, the ratio has no number and is above every bound.
+  const beyond = cases.find((one) => flows(ratio.of, one.run) === true && flows(ratio.to, one.run) === false);
+  if (beyond === undefined) return judgeAssumption(assumption, cases, coverage);
+  const most = assumption.limits.find(({ side }) => side === 'at_most');
+  if (most === undefined) return aboveEvery(judgeAssumption(assumption, cases, coverage), ratio);
+  const { because: _, ...verdict } = judgeAssumption(assumption, [beyond], coverage);
+  return { ...verdict, kind: 'fail', level: most.level, remarks: [alone(ratio)] };
+}
+
+/** Without an upper bound, being above every bound is no finding; others that the ratio has elsewhere stay. */
+function aboveEvery(verdict: Verdict, ratio: RatioSpec): Verdict {
+  if (verdict.kind !== 'notApplicable') return verdict;
   const { because: _, ...rest } = verdict;
-  const kind = assumption.bound.at_most === undefined ? 'pass' : 'fail';
-  return { ...rest, kind, level: assumption.limits[0]?.level ?? 'note', remarks: [`${ratio.of} flows without ${ratio.to}`] };
+  return { ...rest, kind: 'pass', remarks: [alone(ratio)] };
+}
+
+function alone({ of, to }: RatioSpec): string {
+  return `${of} flows without ${to}`;
 }
 
 function assumptionOf({ name, of, to, statement, source, place, ...stated }: RatioSpec, run: StepRun): Assumption {
@@ -43,7 +54,7 @@ function assumptionOf({ name, of, to, statement, source, place, ...stated }: Rat
     reference: { id: 'flow-ratio', of: `${of}/${to}` },
     bound,
     limits: limitsOf(bound),
-    whenGiven: true,
+    whenGiven: false,
     nominal: false,
     cure: run.step.setup.lines
       .filter(({ brings }) => brings.some(({ gas }) => gas === of || gas === to))
@@ -57,7 +68,9 @@ function kept(limits: Pick<RatioSpec, 'atLeast' | 'atMost'>): Bound {
   return boundIn('number', limits, []);
 }
 
-function flows(gas: string, run: StepRun): boolean {
-  const reading = run.step.setup.gases.includes(gas) ? run.read({ id: 'flow-rate', of: gas }) : undefined;
-  return reading?.kind === 'known' && reading.value > 0;
+/** Whether a gas flows in a case; undefined where nobody knows. */
+function flows(gas: string, run: StepRun): boolean | undefined {
+  if (!run.plan.scope.fedGases.includes(gas)) return false;
+  const reading = run.read({ id: 'flow-rate', of: gas });
+  return reading.kind === 'known' ? reading.value > 0 : undefined;
 }

@@ -3,6 +3,7 @@ import type { StepRun } from '../quantities/run.ts';
 import type { Fault } from '../shelf/fault.ts';
 import { dimensionOf } from '../steps/addresses.ts';
 import type { LateValue, ProcessSpec, UsualRange } from '../steps/process.ts';
+import type { Given } from '../steps/given.ts';
 import type { Step } from '../steps/step.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
 import type { Assumption } from './assumption.ts';
@@ -33,9 +34,22 @@ function limitAddresses(addresses: readonly string[]): readonly string[] {
   return [...new Set(addresses.map((address) => address.slice(LIMITS.length, address.lastIndexOf('.'))))];
 }
 
-function limitOf(setpoint: string, { givens, place }: Step): Assumption {
-  const least = givens.get(`${LIMITS}${setpoint}.at_least`)?.value;
-  const most = givens.get(`${LIMITS}${setpoint}.at_most`)?.value;
+/** The limit of a setpoint as an assumption; made once for each limit of a chamber, since its every step asks for it. */
+function limitOf(setpoint: string, step: Step): Assumption {
+  const least = step.givens.get(`${LIMITS}${setpoint}.at_least`);
+  const most = step.givens.get(`${LIMITS}${setpoint}.at_most`);
+  const key = least ?? most;
+  let limit = key === undefined ? undefined : MADE.get(key);
+  if (limit === undefined) {
+    limit = newLimit(setpoint, least?.value, most?.value, step);
+    if (key !== undefined) MADE.set(key, limit);
+  }
+  return limit;
+}
+
+const MADE = new WeakMap<Given, Assumption>();
+
+function newLimit(setpoint: string, least: number | undefined, most: number | undefined, { place }: Step): Assumption {
   return about(setpoint, {
     process: 'chamber-fit',
     name: `${setpoint}-limits`,

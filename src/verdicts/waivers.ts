@@ -2,6 +2,7 @@ import { dimensionOfNumber } from '../quantities/catalogue.ts';
 import type { Fault } from '../shelf/fault.ts';
 import type { Step, Waiver } from '../steps/step.ts';
 import { isUnitFault, readMeasure } from '../units/read.ts';
+import { beyondBy } from './hold.ts';
 import type { Note, Verdict } from './verdict.ts';
 
 /** Verdicts of a step with its waivers applied, and what is to be said of the waivers. */
@@ -19,40 +20,53 @@ export function applyWaivers(step: Step, verdicts: readonly Verdict[], today: st
   const notes: Note[] = [];
   const faults: Fault[] = [];
   const applied = verdicts.map((verdict) => {
-    const waiver = step.waivers.find((one) => isFinding(verdict) && names(one, verdict));
-    if (waiver === undefined) return verdict;
-    used.push(waiver);
-    const holdsTo = readHoldsTo(waiver, verdict, faults);
-    const over = waiver.until < today ? 'waiver-expired' : outgrown(verdict, holdsTo) ? 'waiver-outgrown' : undefined;
-    if (over === undefined) return { ...verdict, waived: grantOf(waiver, holdsTo) };
-    notes.push({ kind: over, step: step.path, waiver });
+    if (!isFinding(verdict)) return verdict;
+    const standings = step.waivers.filter((one) => meets(one, verdict)).map((one) => standingOf(one, verdict, today));
+    used.push(...standings.map(({ waiver }) => waiver));
+    const holding = standings.find(({ why }) => why === undefined);
+    if (holding !== undefined) return { ...verdict, waived: grantOf(holding) };
+    for (const { waiver, why } of standings) {
+      if (typeof why === 'string') notes.push({ kind: why, step: step.path, waiver });
+      else if (why !== undefined) faults.push(why);
+    }
     return verdict;
   });
   return { verdicts: applied, used, notes, faults };
 }
 
-/** The value up to which a waiver holds, in the dimension of the number that is judged. */
-function readHoldsTo(waiver: Waiver, { reference, over }: Verdict, faults: Fault[]): number | undefined {
-  if (waiver.holdsTo === undefined) return undefined;
-  const measure = readMeasure(waiver.holdsTo, dimensionOfNumber(reference, over));
-  if (!isUnitFault(measure)) return measure.value;
-  faults.push({ place: waiver.place, found: `holds_to: ${measure.found}`, right: measure.right });
-  return undefined;
+/** How a waiver stands to a finding that it names. */
+interface Standing {
+  readonly waiver: Waiver;
+  /** Value up to which it holds. */
+  readonly holdsTo?: number;
+  /** Why it does not hold: a note, or that its value can't be read. */
+  readonly why?: 'waiver-expired' | 'waiver-outgrown' | Fault;
+}
+
+function standingOf(waiver: Waiver, verdict: Verdict, today: string): Standing {
+  if (waiver.until < today) return { waiver, why: 'waiver-expired' };
+  if (waiver.holdsTo === undefined) return { waiver };
+  const measure = readMeasure(waiver.holdsTo, dimensionOfNumber(verdict.reference, verdict.over));
+  if (isUnitFault(measure)) {
+    return { waiver, why: { place: waiver.place, found: `holds_to: ${measure.found}`, right: measure.right } };
+  }
+  const holdsTo = measure.value;
+  return outgrown(verdict, holdsTo) ? { waiver, holdsTo, why: 'waiver-outgrown' } : { waiver, holdsTo };
 }
 
 function isFinding({ kind }: Verdict): boolean {
   return kind === 'fail' || kind === 'review' || kind === 'open';
 }
 
-function names({ assumption }: Waiver, verdict: Verdict): boolean {
-  return assumption === verdict.assumption || assumption === verdict.name;
+/** A waiver granted up to a value says nothing of a number that nobody knows. */
+function meets({ assumption, holdsTo }: Waiver, { name, assumption: own, kind }: Verdict): boolean {
+  return (assumption === own || assumption === name) && (holdsTo === undefined || kind !== 'open');
 }
 
-function outgrown({ value, limit }: Verdict, holdsTo: number | undefined): boolean {
-  if (holdsTo === undefined || value === undefined || limit === undefined) return false;
-  return limit.side === 'at_most' ? value > holdsTo : value < holdsTo;
+function outgrown({ value, limit }: Verdict, holdsTo: number): boolean {
+  return value !== undefined && limit !== undefined && beyondBy(value, { side: limit.side, value: holdsTo }) > 0;
 }
 
-function grantOf({ reason, approvedBy, until }: Waiver, holdsTo: number | undefined): NonNullable<Verdict['waived']> {
+function grantOf({ waiver: { reason, approvedBy, until }, holdsTo }: Standing): NonNullable<Verdict['waived']> {
   return { reason, approved_by: approvedBy, until, ...(holdsTo === undefined ? {} : { holds_to: holdsTo }) };
 }

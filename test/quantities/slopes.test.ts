@@ -65,7 +65,9 @@ describe.each([
   test('a run with a value moved shares every number that it does not reach', () => {
     for (const reference of numbers) run.read(reference);
     const moved = run.with({ address: 'time', value: 1 });
-    expect(moved.read({ id: 'mean-free-path' })).toBe(run.read({ id: 'mean-free-path' }));
+    expect(moved.reaches(run.plan.number({ id: 'mean-free-path' }))).toBe(false);
+    expect(moved.reaches(run.plan.number({ id: 'turnovers' }))).toBe(true);
+    expect(moved.read({ id: 'mean-free-path' })).toEqual(run.read({ id: 'mean-free-path' }));
     expect(moved.read({ id: 'turnovers' })).not.toEqual(run.read({ id: 'turnovers' }));
     expect(run.with().read({ id: 'turnovers' })).toEqual(run.read({ id: 'turnovers' }));
   });

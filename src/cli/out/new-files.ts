@@ -21,15 +21,26 @@ export function writeNew(folder: string, files: ReadonlyMap<string, string>): Fa
 }
 
 function writeOne(path: string, text: string, undo: (() => void)[]): void {
-  const first = mkdirSync(dirname(path), { recursive: true });
-  if (first !== undefined) undo.push(() => { removeEmpty(dirname(path), first); });
+  makeFolder(dirname(path), undo);
   const descriptor = openSync(path, 'wx');
-  undo.push(() => { unlinkSync(path); });
+  undo.push(() => {
+    unlinkSync(path);
+  });
   try {
     writeAll(descriptor, text);
   } finally {
     closeSync(descriptor);
   }
+}
+
+/** Makes a folder and those above it that are not there. (Node's own way to do so never ends where the system makes none.) */
+function makeFolder(folder: string, undo: (() => void)[]): void {
+  if (existsSync(folder)) return;
+  if (dirname(folder) !== folder) makeFolder(dirname(folder), undo);
+  mkdirSync(folder);
+  undo.push(() => {
+    rmdirSync(folder);
+  });
 }
 
 function undone(undo: readonly (() => void)[], fault: Fault): Fault {
@@ -41,12 +52,4 @@ function undone(undo: readonly (() => void)[], fault: Fault): Fault {
     }
   }
   return fault;
-}
-
-/** Removes a folder and those above it up to the first that was made, as long as they are empty. */
-function removeEmpty(folder: string, first: string): void {
-  for (let path = folder; ; path = dirname(path)) {
-    rmdirSync(path);
-    if (path === first || dirname(path) === path) return;
-  }
 }
