@@ -1,6 +1,8 @@
 import { COLOUR_CHOICES, isColourChoice } from './colour.ts';
 import { readValue } from './read-value.ts';
 import { ENDINGS, FORMATS, formatOf, isFormat } from './formats.ts';
+import { siteProblem } from './sites.ts';
+import { diskShelf } from '../shelf/disk.ts';
 import { unknownWord } from './problem.ts';
 import { DIMENSION_NAMES, isDimension } from '../units/dimensions.ts';
 import { spellingsOf, unitSpelled } from '../units/lookup.ts';
@@ -42,7 +44,7 @@ function optionsFrom(given: Given, complain: Complain): Options {
     blockAt: readWord('--block-at', last('block-at') ?? 'error', BLOCK_AT, isBlockAt, complain) ?? 'error',
     unproven: given.has('unproven'),
     trace: wantsTrace(given),
-    ...optional('site', last('site')),
+    ...optional('site', readSite(last('site'), complain)),
     ...optional('at', last('at')),
     ...optional('jobs', readJobs(last('jobs'), complain)),
     ...optional('today', readDay(last('today'), complain)),
@@ -105,6 +107,12 @@ function itemsOf(list: string): readonly string[] {
     .split(',')
     .map((item) => item.trim())
     .filter((item) => item !== '');
+}
+
+function readSite(path: string | undefined, complain: Complain): string | undefined {
+  const problem = path === undefined ? undefined : siteProblem(diskShelf(), path);
+  if (problem !== undefined) complain(problem);
+  return path;
 }
 
 function readJobs(text: string | undefined, complain: Complain): number | undefined {

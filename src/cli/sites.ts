@@ -1,9 +1,10 @@
 import { findSite } from '../shelf/find-site.ts';
-import { folderOf } from '../shelf/paths.ts';
+import { anchored, folderOf } from '../shelf/paths.ts';
 import { openSite } from '../steps/site.ts';
 import { processFaults } from '../verdicts/judge.ts';
 import type { Shelf } from '../shelf/shelf.ts';
 import type { Site } from '../steps/site.ts';
+import type { Problem } from './problem.ts';
 import type { Outcome } from '../shelf/fault.ts';
 
 /** The sites that one run meets; each is opened once, and its faults are told the first time it is met. */
@@ -39,3 +40,11 @@ function bareKey(shelf: Shelf, near: string): string {
   return shelf.kind(near) === 'folder' ? near : folderOf(near);
 }
 
+
+/** What is wrong with the site that a command line chooses: it must be a site's document or the folder it stands in. */
+export function siteProblem(shelf: Shelf, chosen: string): Problem | undefined {
+  const file = findSite(shelf, chosen);
+  const path = anchored(shelf, chosen);
+  if (file !== undefined && (file === path || folderOf(file) === path)) return undefined;
+  return { found: `--site ${chosen} is no site`, right: "the path of a 'regimen.yaml' or of its folder" };
+}

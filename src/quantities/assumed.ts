@@ -42,14 +42,14 @@ const ASSUMED: Readonly<Record<string, Assumption>> = {
     spread: 0.4,
     dimension: 'number',
     unit: '',
-    because: 'ln of the emission energy against the log-mean of the sputter spectrum (Thompson 1968)',
+    because: 'an emission energy anywhere in the sputter spectrum; standard uncertainty of its logarithm 0.4 (Thompson 1968)',
   },
   'accuracy.fast-path': {
     value: 1,
     spread: 0.2,
     dimension: 'number',
     unit: '',
-    because: 'accuracy of the cross-sections of fast atoms between thermal and keV energies',
+    because: 'cross-sections of fast atoms are known to 20 % (standard uncertainty)',
   },
   'accuracy.left-out': {
     value: 0,

@@ -73,7 +73,7 @@ export const meanFreePathOf = quantity<PathArguments>({
   symbol: 'λ',
   dimension: 'length',
   statement: 'Path between collisions: of one gas in the mixture; of the mixture the path flown by all molecules over the collisions they suffer.',
-  source: 'Jeans; Chapman & Cowling 1970: hard spheres of the diameter that reproduces the viscosity',
+  source: '1/Σ_j n_j π d_ij² sqrt(1 + m_i/m_j), Jeans; Chapman & Cowling 1970; hard spheres of the diameter that reproduces the viscosity',
   lengths: () => ['feature'],
   subjects: gasesOf,
   whole: true,

@@ -159,7 +159,7 @@ export const fastPath = quantity<[...FastArguments, accuracy: number]>({
   symbol: 'λ_fast',
   dimension: 'length',
   statement: 'Mean free path of an atom at the energy at which it leaves target or melt.',
-  source: 'Chapman & Cowling 1970; cross-sections Neufeld et al. 1972 to 0.1 eV, Ziegler, Biersack & Littmark 1985 beyond',
+  source: '1/Σ_j n_j Q_j g(s_j), Chapman & Cowling 1970; cross-sections Neufeld et al. 1972 to 0.1 eV, Ziegler, Biersack & Littmark 1985 beyond',
   from: (reference, scope) =>
     emittedOr(reference, scope, (emitted) => [...fastIngredients(reference, scope, emitted), 'accuracy.fast-path'] as const),
   value: (...values) => {
@@ -175,7 +175,7 @@ export const energyLoss = quantity<FastArguments>({
   symbol: 'ξ',
   dimension: 'number',
   statement: 'Mean loss of ln E in a collision with the gas.',
-  source: 'hard spheres, gas at rest; Westwood, J. Vac. Sci. Technol. 15, 1 (1978)',
+  source: '1 + α ln α/(1 - α), α = ((m - M)/(m + M))², hard spheres, gas at rest; Westwood, J. Vac. Sci. Technol. 15, 1 (1978)',
   from: (reference, scope) => emittedOr(reference, scope, (emitted) => fastIngredients(reference, scope, emitted)),
   value: mixtureEnergyDecrement,
 });
@@ -188,7 +188,7 @@ export const thermalPath = quantity<
   symbol: 'λ_th',
   dimension: 'length',
   statement: 'Mean free path of an atom of target or melt once it is as warm as the gas.',
-  source: 'Chapman & Cowling 1970 with σ² Ω(1,1)* of the pair',
+  source: '1/Σ_j n_j Q_j sqrt(1 + m/M_j), Q = π σ² Ω(1,1)* of the pair, Chapman & Cowling 1970',
   from: (reference, scope) =>
     emittedOr(reference, scope, ({ atom }) => {
       const pairs = scope.gases.map((gas) => `atoms.${atom}.pairs.${pairFor(atom, gas, scope)}`);
@@ -290,7 +290,7 @@ export const thermalisation = quantity<[decrement: number, ...FastArguments, acc
   symbol: 'L_th',
   dimension: 'length',
   statement: 'Path that an emitted atom flies until it is as slow as the gas; a path flown, not a distance from the target.',
-  source: 'sum of the free paths over the collisions to thermalise; Westwood, J. Vac. Sci. Technol. 15, 1 (1978)',
+  source: 'Σ_k λ(E_0 e^(-k ξ)) over the collisions to thermalise; Westwood, J. Vac. Sci. Technol. 15, 1 (1978)',
   from: (reference, scope) =>
     emittedOr(reference, scope, (emitted) => [
       { id: 'energy-decrement', of: reference.of ?? emitted.role },
@@ -328,7 +328,7 @@ export const thermalisationRatioOf = quantity<[distance: number, way: number]>({
   symbol: 'throw/L_th',
   dimension: 'number',
   statement: 'Throw over thermalisation distance; a third of the arriving atoms are thermal at 0.5, two thirds at 1, nearly all at 3.',
-  source: 'definition; shares by own Monte Carlo for mass ratios of 0.7 to 16',
+  source: 'throw/L_th; shares by own Monte Carlo for mass ratios of 0.7 to 16',
   from: (reference, scope) =>
     emittedOr(reference, scope, (emitted) => [
       scope.emitterAddress(emitted, 'throw'),

@@ -163,7 +163,7 @@ export const plenumPressureOf = quantity<PlenumArguments>({
   symbol: 'p_up',
   dimension: 'pressure',
   statement: 'Pressure before the holes of an inlet.',
-  source: 'Knudsen 1909 for each hole, not below the choked value',
+  source: 'F k T/N = C(p̄) (p_up - p), C of a hole by Knudsen 1909 with its entrance, not below the choked value',
   subjects: ({ setup }) => setup.inlets,
   from: ({ of = '' }, scope) => {
     const inlet = `chamber.inlets.${of}`;
@@ -194,7 +194,7 @@ export const plenumExcess = quantity<[plenum: number, pressure: number]>({
   symbol: '(p_up - p)/p',
   dimension: 'number',
   statement: 'Excess of the plenum’s pressure over the chamber’s: an inlet feeds evenly where it is well above 0.1.',
-  source: 'common practice',
+  source: '(p_up - p)/p; common practice',
   subjects: ({ setup }) => setup.inlets,
   worst: 'smallest',
   from: ({ of = '' }) => [{ id: 'plenum-pressure', of }, { id: 'gas-pressure' }],
@@ -206,7 +206,7 @@ export const saturationPressure = quantity<[temperature: number, a: number, b: n
   symbol: 'p_vap',
   dimension: 'pressure',
   statement: 'Vapour pressure of a condensable gas at the wall.',
-  source: 'Antoine equation with the published constants of the gas',
+  source: 'log10(p/Pa) = a - b/(T + c), Antoine 1888, with the published constants of the gas',
   subjects: condensable,
   from: (reference, scope) => {
     const gas = gasOf(reference, scope) ?? '';

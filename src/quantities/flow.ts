@@ -71,7 +71,7 @@ export const turnoversOf = quantity<[time: number, residence: number]>({
   symbol: 't/τ',
   dimension: 'number',
   statement: 'How often the gas of the chamber is replaced during the step.',
-  source: 'definition',
+  source: 't/τ',
   from: () => ['time', { id: 'residence-time' }],
   value: turnovers,
 });
@@ -97,7 +97,7 @@ export const pumpingSpeedOf = quantity<[flow: number, temperature: number, press
   from: (_, scope) => {
     if (!scope.fed) return inapplicable('no gas flows');
     if (scope.setup.pumpSpeed === 'none') return inapplicable('the chamber has no pump');
-    if (!scope.has('pressure')) return scope.isUnknown('pressure') ? missing('pressure') : inapplicable('no pressure is held');
+    if (!scope.states('pressure')) return inapplicable('no pressure is held');
     return [{ id: 'flow-rate' }, { id: 'pump-temperature' }, { id: 'gas-pressure' }];
   },
   value: (flow, temperature, pressure) => (flow > 0 ? pumpingSpeed(flow, temperature, pressure) : inapplicable('no gas flows')),
@@ -173,7 +173,7 @@ export const flowArea = quantity<[diameter: number, wafer: number, gap: readonly
   symbol: 'A',
   dimension: 'area',
   statement: 'Area normal to the flow: of a tube less the wafers’ disc; of radial flow the rim of the wafer times the gap.',
-  source: 'geometry of the chamber’s body.flow',
+  source: 'π (D² - d²)/4, or π d × gap, by the chamber’s body.flow',
   from: (_, scope) => {
     switch (scope.setup.flow) {
       case 'axial':

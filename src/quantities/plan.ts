@@ -67,6 +67,7 @@ export class Plan {
   readonly #byName = new Map<string, Node>();
   /** The same, for those who ask with one reference again and again. */
   readonly #byReference = new WeakMap<Reference, Node>();
+  readonly #ratios = new WeakMap<Reference, { readonly over: Reference; readonly node: Node }>();
   readonly #open = new Set<string>();
 
   constructor(scope: Scope) {
@@ -101,9 +102,15 @@ export class Plan {
 
   /** The node of one number over another. */
   ratio(reference: Reference, over: Reference): Node {
+    const kept = this.#ratios.get(reference);
+    if (kept?.over === over) return kept.node;
     const name = `${referenceName(reference)} over ${referenceName(over)}`;
-    const known = this.#byName.get(name);
-    if (known !== undefined) return known;
+    const node = this.#byName.get(name) ?? this.#newRatio(reference, over, name);
+    this.#ratios.set(reference, { over, node });
+    return node;
+  }
+
+  #newRatio(reference: Reference, over: Reference, name: string): Node {
     const inputs = [this.number(reference), this.number(over)];
     const node = this.#add({ kind: 'law', name, inputs, quantity: RATIO, reference, args: [NaN, NaN] });
     this.#byName.set(name, node);

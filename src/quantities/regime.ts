@@ -17,7 +17,7 @@ export const knudsenOf = quantity<[path: number, length: number]>({
   symbol: 'Kn',
   dimension: 'number',
   statement: 'Mean free path over a length of the chamber, step or feature.',
-  source: 'Schaaf & Chambré 1961; path by the hard-sphere diameter that reproduces the viscosity',
+  source: 'λ/L, bands Schaaf & Chambré 1961; path by the hard-sphere diameter that reproduces the viscosity',
   lengths: lengthsOf,
   subjects: (scope) => [...scope.gases, ...scope.emittedSubjects('target'), ...scope.emittedSubjects('melt')],
   whole: true,
@@ -92,7 +92,7 @@ export const collisionsResidence = quantity<[residence: number, speeds: readonly
   symbol: 'z τ',
   dimension: 'number',
   statement: 'Collisions of a molecule, of the mixture or of one gas, during its stay in the chamber.',
-  source: 'z τ',
+  source: 'τ Σ x_i v_i/λ',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {

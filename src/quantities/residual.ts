@@ -87,12 +87,11 @@ export const impurityRatioOf = quantity<ImpurityArguments>({
   symbol: 'N_imp/N_film',
   dimension: 'number',
   statement: 'Reactive atoms (O, N, C) that arrive from the residual gas over the atoms of the film; every one sticking, an upper bound, loose for noble metals.',
-  source: 'Hertz-Knudsen flux over the growth rate (thin-film texts)',
+  source: 'Σ Γ_i a_i/(J a_film), Γ by Hertz-Knudsen; Ohring, Materials Science of Thin Films, 2nd ed. 2002, ch. 3',
   from: (_, scope) => {
     const { surface } = scope.setup;
-    if (surface === undefined) return missing('surface.grows', 'surface.rate');
-    const film = scope.library.film(surface.film)?.formula;
-    if (film === undefined) return missing(`films.${surface.film}.formula`);
+    const film = surface === undefined ? undefined : scope.library.film(surface.film)?.formula;
+    if (surface !== undefined && film === undefined) return missing(`films.${surface.film}.formula`);
     const residual = residualShares(scope);
     return [
       { id: 'residual-pressure' },
@@ -101,7 +100,8 @@ export const impurityRatioOf = quantity<ImpurityArguments>({
       residual.map(({ gas }) => reactiveAtoms(gas, scope)),
       'temperatures.wall',
       { id: 'film-flux' },
-      [...film.values()].reduce((sum, count) => sum + count, 0),
+      // Without a film its flux is missing, and is told together with all else.
+      [...(film?.values() ?? [])].reduce((sum, count) => sum + count, 0),
     ];
   },
   value: (pressure, fractions, masses, atoms, temperature, flux, filmAtoms) => {

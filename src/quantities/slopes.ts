@@ -72,8 +72,11 @@ function pass(values: Values, node: Node, slope: number, onlyUncertain: boolean)
   if (node.kind === 'choice') return add(node.inputs[values.chosen[node.slot] ?? -1], slope);
   if (node.kind !== 'law') return;
   const partials = partialsOf(values, node, onlyUncertain);
-  for (const [index, input] of node.inputs.entries()) {
-    if (!onlyUncertain || values.uncertain[input.slot] === true) add(input, slope * (partials[index] ?? 0));
+  const { inputs } = node;
+  for (let index = 0; index < inputs.length; index++) {
+    const input = inputs[index];
+    if (input === undefined || (onlyUncertain && values.uncertain[input.slot] !== true)) continue;
+    slopeTo[input.slot] = (slopeTo[input.slot] ?? 0) + slope * (partials[index] ?? 0);
   }
 }
 
@@ -90,8 +93,9 @@ function partialsOf(values: Values, node: Law, onlyUncertain: boolean): readonly
     values.partials[node.slot] = partials;
   }
   let filled = false;
-  for (const [index, input] of node.inputs.entries()) {
-    const wanted = !onlyUncertain || values.uncertain[input.slot] === true;
+  for (let index = 0; index < partials.length; index++) {
+    const input = node.inputs[index];
+    const wanted = input !== undefined && (!onlyUncertain || values.uncertain[input.slot] === true);
     if (!wanted || !Number.isNaN(partials[index])) continue;
     if (!filled) argumentsOf(values, node);
     filled = true;
@@ -129,18 +133,17 @@ function moved({ args, quantity }: Law, index: number, value: number, back: numb
 /** Puts a number at its place among the arguments, counting through lists. */
 function put(args: (number | number[])[], index: number, value: number): void {
   let left = index;
-  for (const [position, arg] of args.entries()) {
-    if (typeof arg !== 'object') {
-      if (left === 0) {
-        args[position] = value;
+  for (let position = 0; position < args.length; position++) {
+    const arg = args[position];
+    if (typeof arg === 'object') {
+      if (left < arg.length) {
+        arg[left] = value;
         return;
       }
-      left -= 1;
-    } else if (left < arg.length) {
-      arg[left] = value;
-      return;
-    } else {
       left -= arg.length;
+    } else if (left-- === 0) {
+      args[position] = value;
+      return;
     }
   }
 }

@@ -19,7 +19,7 @@ export const viscosityOf = quantity<[mass: number, temperature: number, diameter
   symbol: 'μ_i',
   dimension: 'viscosity',
   statement: 'Viscosity of one gas.',
-  source: 'Chapman & Enskog, first order',
+  source: 'μ = (5/16) sqrt(π m k T)/(π d²), Chapman & Enskog, first order',
   subjects: gasesOf,
   from: (reference, scope) => {
     const gas = gasOf(reference, scope);
@@ -36,7 +36,7 @@ export const mixtureViscosityOf = quantity<
   symbol: 'μ',
   dimension: 'viscosity',
   statement: 'Viscosity, of the mixture or of one of its gases.',
-  source: 'Chapman & Enskog, first order; mixtures Wilke, J. Chem. Phys. 18, 517 (1950)',
+  source: 'Σ x_i μ_i/Σ_j x_j φ_ij, Wilke, J. Chem. Phys. 18, 517 (1950); of one gas its gas-viscosity',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {
@@ -59,7 +59,7 @@ export const pairDiffusivity = quantity<
   symbol: 'D_ij',
   dimension: 'diffusivity',
   statement: 'Diffusivity of a pair of gases.',
-  source: 'Chapman & Enskog, first order',
+  source: 'D = (3/16) sqrt(2π (k T)³/m_r)/(p Q), Chapman & Enskog, first order',
   subjects: (scope) => collisionPartners(scope).flatMap((a, i, all) => all.slice(i).map((b) => pairName(a, b))),
   from: ({ of = '' }) => {
     const [a = '', b = ''] = of.split('/');
@@ -81,7 +81,7 @@ export const diffusivityOf = quantity<
   symbol: 'D',
   dimension: 'diffusivity',
   statement: 'Diffusivity of a gas in the mixture, or of a pair, as in diffusivity:SiH4/N2; of a pure gas its self-diffusion.',
-  source: 'Chapman & Enskog; mixtures Wilke 1950 and Fairbanks & Wilke 1950, for a trace Blanc 1908',
+  source: '(1 - x_i)/Σ_j x_j/D_ij, Wilke 1950 and Fairbanks & Wilke 1950; for a trace Blanc 1908',
   subjects: gasesOf,
   from: (reference, scope) => {
     const gas = gasOf(reference, scope);
@@ -122,7 +122,7 @@ export const gasConductivity = quantity<[mass: number, viscosity: number, heatCa
   symbol: 'κ_i',
   dimension: 'thermal-conductivity',
   statement: 'Thermal conductivity of one gas.',
-  source: 'modified Eucken, Poling, Prausnitz & O’Connell 2001 ch. 10; monatomic gases 15/4 (k/m) μ',
+  source: 'κ M/(μ C_v) = 1.32 + 1.77 R/C_v, modified Eucken, Poling, Prausnitz & O’Connell 2001 ch. 10',
   subjects: gasesOf,
   from: (reference, scope) => {
     const gas = gasOf(reference, scope);
@@ -145,7 +145,7 @@ export const thermalConductivityOf = quantity<
   symbol: 'κ',
   dimension: 'thermal-conductivity',
   statement: 'Thermal conductivity, of the mixture or of one of its gases.',
-  source: 'modified Eucken; mixtures Wassiljewa 1904 with the coefficients of Wilke 1950',
+  source: 'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas its gas-conductivity',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {

@@ -31,6 +31,7 @@ export class ResolvedStep implements Step {
   readonly waivers: readonly Waiver[];
   readonly #document: RecipeDocument;
   readonly #pointer: Pointer;
+  #place: Place | undefined;
 
   constructor({ step, path, number, pointer, document, layer, setup, waivers }: Parts) {
     this.path = path;
@@ -49,7 +50,8 @@ export class ResolvedStep implements Step {
   }
 
   get place(): Place {
-    return this.#document.place([...this.#pointer, 'name']);
+    this.#place ??= this.#document.place([...this.#pointer, 'name']);
+    return this.#place;
   }
 
   get processPlace(): Place {

@@ -1,4 +1,5 @@
-import type { Run, StepRun } from '../quantities/run.ts';
+import type { Plan } from '../quantities/plan.ts';
+import type { Run } from '../quantities/run.ts';
 import type { Hazard } from '../substances/gas.ts';
 import type { Caution, FuelWithOxidiser, GasHazard } from './verdict.ts';
 
@@ -6,41 +7,67 @@ import type { Caution, FuelWithOxidiser, GasHazard } from './verdict.ts';
 const HAZARDS: readonly Hazard[] = ['pyrophoric', 'toxic', 'flammable', 'corrosive', 'oxidising'];
 const FUELS: readonly Hazard[] = ['pyrophoric', 'flammable'];
 
-/** What the gases of a recipe call for: one caution for each hazard, and one for each pair of fuels and oxidisers in one step. */
-export function cautionsOf(run: Run): readonly Caution[] {
-  return [...fuelsWithOxidisers(run), ...HAZARDS.flatMap((hazard) => gasHazard(run, hazard))];
-}
-
-function gasHazard(run: Run, hazard: Hazard): readonly GasHazard[] {
-  const gases = new Set<string>();
-  const steps: string[] = [];
-  for (const step of run.steps) {
-    const here = gasesWith(step, [hazard]);
-    if (here.length > 0) steps.push(step.step.path);
-    for (const gas of here) gases.add(gas);
+/** What the gases of a recipe call for: one caution for each hazard, and one for each set of fuels and oxidisers in one step. */
+export function cautionsOf({ steps }: Run): readonly Caution[] {
+  const hazards = new Map<Hazard, { gases: Set<string>; steps: string[] }>();
+  const meetings = new Map<string, FuelWithOxidiser & { steps: string[] }>();
+  for (const { step, plan } of steps) {
+    const present = presentOf(plan);
+    for (const [hazard, gases] of present.byHazard) note(hazards, hazard, gases, step.path);
+    if (present.fuels.length > 0 && present.oxidisers.length > 0) meet(meetings, present, step.path);
   }
-  return gases.size === 0 ? [] : [{ kind: 'hazard', hazard, gases: [...gases].sort(), steps }];
+  return [...meetings.values(), ...HAZARDS.flatMap((hazard) => hazardCaution(hazard, hazards.get(hazard)))];
 }
 
-function fuelsWithOxidisers(run: Run): readonly FuelWithOxidiser[] {
-  const found = new Map<string, { fuels: readonly string[]; oxidisers: readonly string[]; steps: string[] }>();
-  for (const step of run.steps) {
-    const [fuels, oxidisers] = [gasesWith(step, FUELS), gasesWith(step, ['oxidising'])];
-    if (fuels.length === 0 || oxidisers.length === 0) continue;
-    const key = `${fuels.join()} ${oxidisers.join()}`;
-    const known = found.get(key);
-    if (known === undefined) found.set(key, { fuels, oxidisers, steps: [step.step.path] });
-    else known.steps.push(step.step.path);
+/** Gases that a step feeds, by hazard; steps of one plan feed the same. */
+interface Present {
+  readonly byHazard: ReadonlyMap<Hazard, readonly string[]>;
+  readonly fuels: readonly string[];
+  readonly oxidisers: readonly string[];
+}
+
+const PRESENT = new WeakMap<Plan, Present>();
+
+function presentOf(plan: Plan): Present {
+  let present = PRESENT.get(plan);
+  if (present === undefined) {
+    present = newPresent(plan);
+    PRESENT.set(plan, present);
   }
-  return [...found.values()].map((one) => ({ kind: 'fuel-with-oxidiser', ...one }));
+  return present;
 }
 
-/** Gases that flow in a step and have one of the hazards. */
-function gasesWith(run: StepRun, hazards: readonly Hazard[]): readonly string[] {
-  const { scope } = run.plan;
-  const flowing = run.step.setup.lines.flatMap(({ name, brings }) => {
-    const flow = run.givens.get(`flows.${name}`)?.value ?? NaN;
-    return flow === 0 ? [] : brings.map(({ gas }) => gas);
-  });
-  return [...new Set(flowing)].filter((gas) => scope.gas(gas)?.hazards.some((hazard) => hazards.includes(hazard))).sort();
+function newPresent({ scope }: Plan): Present {
+  const fed = [...new Set(scope.setup.lines.flatMap(({ brings }) => brings.map(({ gas }) => gas)))].sort();
+  const having = (hazards: readonly Hazard[]) =>
+    fed.filter((gas) => scope.gas(gas)?.hazards.some((hazard) => hazards.includes(hazard)));
+  const byHazard = HAZARDS.map((hazard) => [hazard, having([hazard])] as const).filter(([, gases]) => gases.length > 0);
+  return { byHazard: new Map(byHazard), fuels: having(FUELS), oxidisers: having(['oxidising']) };
+}
+
+function note(
+  hazards: Map<Hazard, { gases: Set<string>; steps: string[] }>,
+  hazard: Hazard,
+  gases: readonly string[],
+  path: string,
+): void {
+  let known = hazards.get(hazard);
+  if (known === undefined) hazards.set(hazard, (known = { gases: new Set(), steps: [] }));
+  for (const gas of gases) known.gases.add(gas);
+  known.steps.push(path);
+}
+
+function meet(meetings: Map<string, FuelWithOxidiser & { steps: string[] }>, present: Present, path: string): void {
+  const { fuels, oxidisers } = present;
+  const key = `${fuels.join()} ${oxidisers.join()}`;
+  const known = meetings.get(key);
+  if (known === undefined) meetings.set(key, { kind: 'fuel-with-oxidiser', fuels, oxidisers, steps: [path] });
+  else known.steps.push(path);
+}
+
+function hazardCaution(
+  hazard: Hazard,
+  found: { gases: ReadonlySet<string>; steps: readonly string[] } | undefined,
+): readonly GasHazard[] {
+  return found === undefined ? [] : [{ kind: 'hazard', hazard, gases: [...found.gases].sort(), steps: found.steps }];
 }

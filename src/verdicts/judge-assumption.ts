@@ -7,7 +7,7 @@ import { isDefault, type Given } from '../steps/given.ts';
 import type { Assumption } from './assumption.ts';
 import type { Case } from './cases.ts';
 import { hold, isGraver, type Standing } from './hold.ts';
-import type { Assumed, Kind, Level, Verdict } from './verdict.ts';
+import type { Assumed, Instance, Kind, Level, Verdict } from './verdict.ts';
 
 /** The verdict on one assumption of a step: the worst over all cases and subjects. */
 export function judgeAssumption(assumption: Assumption, cases: readonly Case[], coverage: number): Verdict {
@@ -23,7 +23,7 @@ export function judgeAssumption(assumption: Assumption, cases: readonly Case[], 
     }
   }
   if (worst !== undefined) return verdictOf(assumption, worst);
-  return { ...blank(assumption, 'notApplicable', usual), because: 'the step has nothing that it speaks of' };
+  return { ...templateOf(assumption), because: 'the step has nothing that it speaks of' };
 }
 
 /** How one number of one case stands, before it is told in full. */
@@ -71,30 +71,62 @@ function referencesOf(reference: Reference, { plan }: StepRun): readonly Referen
 }
 
 function verdictOf(assumption: Assumption, finding: Finding): Verdict {
-  const { reading, standing, kind, of } = finding;
-  const verdict = blank(assumption, kind, of);
-  const subject = subjectOf(assumption, finding);
-  if (subject !== undefined) verdict.subject = subject;
-  if (standing !== undefined) Object.assign(verdict, standing);
+  const { kind, level, reading, standing, uncertainty, of } = finding;
+  const place = placeOf(kind, assumption.cure, of.run);
+  const template = templateOf(assumption);
+  if (reading.kind === 'known' && kind === 'pass') {
+    const verdict = passed(template, place, reading.value, uncertainty, standing);
+    const subject = subjectOf(assumption, finding);
+    return subject === NOTHING && of.instance === undefined ? verdict : { ...verdict, ...instanceOf(of), ...subject };
+  }
+  const common = { ...template, kind, level, place, ...instanceOf(of), ...subjectOf(assumption, finding) };
+  if (reading.kind === 'inapplicable') return { ...common, because: reading.because };
   if (reading.kind === 'known') {
-    verdict.value = reading.value;
-    verdict.uncertainty = finding.uncertainty;
-    if (kind !== 'pass') Object.assign(verdict, groundsOf(assumption, finding));
-  } else if (reading.kind === 'inapplicable') verdict.because = reading.because;
-  else if (kind === 'open') verdict.needs = reading.needs;
-  else verdict.because = `not given: ${reading.needs.join(', ')}`;
-  return verdict;
+    return { ...common, value: reading.value, uncertainty, ...standing, ...groundsOf(assumption, finding) };
+  }
+  if (kind === 'open') return { ...common, needs: reading.needs };
+  return { ...common, because: `not given: ${reading.needs.join(', ')}` };
+}
+
+/** Most verdicts pass, and of those there is little to tell: key by key, since a check in bulk makes a hundred of them for every recipe. */
+function passed(
+  { name, process, assumption, statement, source, reference, level, bound, remarks, assumed, cure, over }: Verdict,
+  place: Place,
+  value: number,
+  uncertainty: number,
+  standing: Standing | undefined,
+): Verdict {
+  const told: Writable<Verdict> = {
+    name,
+    process,
+    assumption,
+    statement,
+    source,
+    reference,
+    kind: 'pass',
+    level,
+    value,
+    uncertainty,
+    bound,
+    remarks,
+    assumed,
+    cure,
+    place,
+  };
+  if (over !== undefined) told.over = over;
+  if (standing?.limit !== undefined) told.limit = standing.limit;
+  if (standing?.margin !== undefined) told.margin = standing.margin;
+  return told;
 }
 
 type Writable<T> = { -readonly [K in keyof T]: T[K] };
 
-/** A verdict of a kind before anything is told of its number. */
-function blank(assumption: Assumption, kind: Kind, of: Case | undefined): Writable<Verdict> {
-  const place = of === undefined ? assumption.place : placeOf(kind, assumption.cure, of.run);
-  const verdict: Writable<Verdict> = { ...templateOf(assumption), kind, place };
-  if (of?.instance !== undefined) verdict.instance = of.instance;
-  return verdict;
+function instanceOf({ instance }: Case): { instance?: Instance } {
+  return instance === undefined ? NOTHING : { instance };
 }
+
+const NOTHING = {};
+
 
 /** What every verdict on an assumption has. */
 const TEMPLATES = new WeakMap<Assumption, Verdict>();
@@ -147,10 +179,10 @@ function firstBelow(givens: ReadonlyMap<string, Given>, address: string): Given 
 }
 
 /** The gas or atom that a role, or the worst of several, stands for; of an alloy the atom. */
-function subjectOf({ reference: named }: Assumption, { reference, reading }: Finding): string | undefined {
+function subjectOf({ reference: named }: Assumption, { reference, reading }: Finding): { subject?: string } {
   const chosen = reading.kind === 'known' ? reading.of : undefined;
-  const subject = reference === named ? chosen : reference.of;
-  return subject?.split('/').at(-1);
+  const subject = (reference === named ? chosen : reference.of)?.split('/').at(-1);
+  return subject === undefined ? NOTHING : { subject };
 }
 
 /** What a verdict that does not pass rests on; a review that mostly rests on assumed values has the grade note. */

@@ -22,7 +22,7 @@ gas_lines:
   O2: { full_scale: 200 sccm, accuracy: 1 % of full scale }
   SiH4: { full_scale: 200 sccm, accuracy: 1 % of full scale }
 temperatures: { wall: 60 degC }
-targets: { ti: { material: Ti, throw: 270 mm, generator: source } }
+targets: { ti: { material: Ti, throw: 90 mm, generator: source } }
 `;
 
 /** Text of one recipe of twelve steps; its number sets its setpoints. */
@@ -71,7 +71,7 @@ function stepText(step: number, pressure: (base: number) => string, flow: (base:
     targets: { ti: { voltage: 410 V } }
     surface:
       grows: TiN
-      rate: 40 nm/min
+      rate: 90 nm/min
 `;
     default:
       return `${head}    process: purge

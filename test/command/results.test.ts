@@ -6,12 +6,18 @@ import { BROKEN, clearFolders, DEMO, FAILING, folderWith, regimen, siteWith, SOU
 
 afterAll(clearFolders);
 
-const schema = (name: string): object => {
-  const value: unknown = JSON.parse(readFileSync(`schemas/${name}.json`, 'utf8'));
-  if (typeof value !== 'object' || value === null) throw new Error(`${name} is no schema`);
-  return value;
-};
+/** The schemas of results, with what they share. */
 const ajv = new Ajv2020({ strict: false, allErrors: true });
+for (const name of ['common', 'check', 'gas']) {
+  const schema: unknown = JSON.parse(readFileSync(`schemas/${name}.json`, 'utf8'));
+  if (typeof schema === 'object' && schema !== null) ajv.addSchema(schema);
+}
+
+/** What a schema finds wrong with a text. */
+function wrongIn(text: string, name: string): unknown {
+  const validate = ajv.getSchema(`https://regimen.invalid/schemas/${name}.json`);
+  return validate?.(JSON.parse(text)) === true ? [] : (validate?.errors ?? 'no such schema');
+}
 
 describe('JSON', () => {
   test.each([
@@ -19,17 +25,11 @@ describe('JSON', () => {
     ['with faults', ['check', siteWith({ 'a.yaml': BROKEN, 'b.yaml': FAILING })]],
     ['without a recipe', ['check', folderWith({})]],
   ])('of check %s meets schemas/check.json', (_, args) => {
-    const result: unknown = JSON.parse(regimen([...args, '--format', 'json']).out);
-    const validate = ajv.compile(schema('check'));
-    ajv.removeSchema();
-    expect(validate(result), JSON.stringify(validate.errors)).toBe(true);
+    expect(wrongIn(regimen([...args, '--format', 'json']).out, 'check')).toEqual([]);
   });
 
   test('of gas meets schemas/gas.json', () => {
-    const result: unknown = JSON.parse(regimen(['gas', 'Ar=4', 'CF4=1', 'H2O', '--format', 'json']).out);
-    const validate = ajv.compile(schema('gas'));
-    ajv.removeSchema();
-    expect(validate(result), JSON.stringify(validate.errors)).toBe(true);
+    expect(wrongIn(regimen(['gas', 'Ar=4', 'CF4=1', 'H2O', '--format', 'json']).out, 'gas')).toEqual([]);
   });
 
   test('names files relative to the site, whatever folder the command runs in', () => {
@@ -74,14 +74,17 @@ function records(text: string): string[][] {
 describe('the same input gives the same bytes', () => {
   const many = folderWith({});
   cpSync(DEMO, many, { recursive: true });
-  for (let copy = 0; copy < 20; copy += 1) cpSync(join(DEMO, 'recipes'), join(many, `recipes/copy-${copy}`), { recursive: true });
+  for (const family of ['sputter', 'etch', 'furnace']) {
+    for (let copy = 0; copy < 8; copy += 1) {
+      cpSync(join(DEMO, 'recipes', family), join(many, `recipes/${family}-${copy}`), { recursive: true });
+    }
+  }
 
-  test.each(['text', 'markdown', 'csv', 'json'])('as %s, however many recipes are worked on at a time', (format) => {
-    const [one, two, five] = [1, 2, 5].map((jobs) => regimen(['check', many, '--format', format, '--jobs', String(jobs)]));
-    expect(one?.code).toBe(1);
-    expect(one?.err).toBe('');
+  test.each(['text', 'json'])('as %s, however many recipes are worked on at a time', (format) => {
+    const [one, two, three] = [1, 2, 3].map((jobs) => regimen(['check', many, '--format', format, '--jobs', String(jobs)]));
+    expect(one).toMatchObject({ code: 1, err: '' });
     expect(two).toEqual(one);
-    expect(five).toEqual(one);
+    expect(three).toEqual(one);
   });
 
   test('in whatever order and however often the paths are named', () => {

@@ -59,7 +59,7 @@ export function clearFolders(): void {
 /** A recipe on the starter's chamber that checks clean. */
 export const SOUND = STARTER_RECIPE;
 /** One whose settling is far too short, which is graded error. */
-export const FAILING = SOUND.replace('name: titanium-seed', 'name: hasty').replace('time: 10 s', 'time: 0.1 s');
+export const FAILING = SOUND.replace('name: titanium-seed', 'name: hasty').replace('time: 10 s', 'time: 0.05 s +/- 1 %');
 /** One with a misspelt unit in line and column. */
 export const BROKEN = SOUND.replace('name: titanium-seed', 'name: misspelt').replace('time: 10 s', 'time: 10 sec.');
 
