@@ -7,9 +7,15 @@ import type { Problem } from './problem.ts';
 /** The number that a name of the command line spells, or what is wrong with it. */
 export function checkedReference(name: string): Checked {
   const reference = parseReference(name);
-  if (reference === undefined) return { problem: { found: `'${name}' is no name of a number`, right: 'write id[.length][:subject]: knudsen.gap' } };
+  if (reference === undefined)
+    return {
+      problem: { found: `'${name}' is no name of a number`, right: 'write id[.length][:subject]: knudsen.gap' },
+    };
   if (quantityNamed(reference.id) !== undefined) return { reference };
-  const meant = nearest(reference.id, allQuantities().map(({ id }) => id));
+  const meant = nearest(
+    reference.id,
+    allQuantities().map(({ id }) => id),
+  );
   const right = meant === undefined ? 'regimen list quantities tells all names' : `did you mean ${meant}?`;
   return { problem: { found: `no number is named '${reference.id}'`, right } };
 }

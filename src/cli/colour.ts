@@ -20,8 +20,8 @@ export interface Surroundings {
 export function colourLevel(choice: ColourChoice, { isTerminal, depth, env }: Surroundings): ColourLevel {
   if (choice === 'never') return 0;
   if (choice === 'always') return depth >= 8 ? levelOfDepth(depth) : 1;
-  if (isSet(env['NO_COLOR'])) return 0;
-  const forced = env['FORCE_COLOR'];
+  if (isSet(env.NO_COLOR)) return 0;
+  const forced = env.FORCE_COLOR;
   if (forced !== undefined) return levelForced(forced);
   return isTerminal ? levelOfDepth(depth) : 0;
 }

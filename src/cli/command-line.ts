@@ -48,7 +48,9 @@ function askedBy({ command, args, given }: Taken): Asked {
 function problemAsked(problem: Problem, words: readonly string[]): Asked {
   const command = COMMANDS.find(({ name }) => words.includes(name));
   const about = command === undefined ? {} : { command };
-  return words.includes('--help') || words.includes('-h') ? { kind: 'help', ...about } : { kind: 'problem', ...about, problem };
+  return words.includes('--help') || words.includes('-h')
+    ? { kind: 'help', ...about }
+    : { kind: 'problem', ...about, problem };
 }
 
 function argumentProblem({ needs, most, takes, name }: Command, args: readonly string[]): Problem | undefined {

@@ -19,7 +19,8 @@ export interface Command {
   readonly examples: readonly string[];
 }
 
-const PATHS = 'PATH is a recipe, a folder of them or - for standard input; without one, the recipes of the site are taken.';
+const PATHS =
+  'PATH is a recipe, a folder of them or - for standard input; without one, the recipes of the site are taken.';
 const OUTPUT = ['out', 'format', 'units'] as const;
 
 export const COMMANDS: readonly Command[] = [
@@ -35,7 +36,11 @@ export const COMMANDS: readonly Command[] = [
       'Ends with 0 where nothing blocks, 1 where a verdict does (see --block-at), 2 where the job could not be done in full.',
     ],
     options: [...OUTPUT, 'block-at', 'unproven', 'site', 'at', 'jobs', 'today'],
-    examples: ['regimen check', 'regimen check recipes/etch --block-at warning', 'regimen check --out report.md --out report.json'],
+    examples: [
+      'regimen check',
+      'regimen check recipes/etch --block-at warning',
+      'regimen check --out report.md --out report.json',
+    ],
   },
   {
     name: 'table',
@@ -76,7 +81,9 @@ export const COMMANDS: readonly Command[] = [
     needs: ['WHAT'],
     most: 1,
     summary: 'list what there is: quantities, processes, gases, films or units',
-    says: ['WHAT is quantities, processes, gases, films or units; what the site of the working folder adds is listed too.'],
+    says: [
+      'WHAT is quantities, processes, gases, films or units; what the site of the working folder adds is listed too.',
+    ],
     options: ['out', 'format', 'site'],
     examples: ['regimen list processes', 'regimen list gases'],
   },
@@ -86,7 +93,9 @@ export const COMMANDS: readonly Command[] = [
     needs: ['FOLDER'],
     most: 1,
     summary: 'write a small commented site to begin from',
-    says: ['Writes a site document, a chamber and a recipe that checks clean into FOLDER. Nothing that is there is overwritten.'],
+    says: [
+      'Writes a site document, a chamber and a recipe that checks clean into FOLDER. Nothing that is there is overwritten.',
+    ],
     options: [],
     examples: ['regimen start my-line'],
   },

@@ -51,9 +51,18 @@ function stepAsked({ steps }: Judgement, asked: string): JudgedStep | { readonly
   const alike = named.length > 0 ? named : steps.filter(({ run }) => run.step.name === asked);
   const [only, second] = alike;
   if (only !== undefined && second === undefined) return only;
-  if (only !== undefined) return { problem: { found: `several steps are named '${asked}'`, right: `one of ${pathsOf(alike)}` } };
-  const meant = nearest(asked, steps.map(({ run }) => run.step.path));
-  return { problem: { found: `no step is named '${asked}'`, right: meant === undefined ? `one of ${pathsOf(steps)}` : `did you mean ${meant}?` } };
+  if (only !== undefined)
+    return { problem: { found: `several steps are named '${asked}'`, right: `one of ${pathsOf(alike)}` } };
+  const meant = nearest(
+    asked,
+    steps.map(({ run }) => run.step.path),
+  );
+  return {
+    problem: {
+      found: `no step is named '${asked}'`,
+      right: meant === undefined ? `one of ${pathsOf(steps)}` : `did you mean ${meant}?`,
+    },
+  };
 }
 
 function pathsOf(steps: readonly JudgedStep[]): string {
@@ -66,6 +75,9 @@ function derivedAsked({ verdicts }: JudgedStep, what: string): Derived | { reado
   if (verdict !== undefined) return { verdict };
   const { reference, problem } = checkedReference(what);
   if (problem === undefined) return { reference };
-  const meant = nearest(what, verdicts.flatMap(({ name, assumption }) => [assumption, name]));
+  const meant = nearest(
+    what,
+    verdicts.flatMap(({ name, assumption }) => [assumption, name]),
+  );
   return { problem: meant === undefined ? problem : { found: problem.found, right: `did you mean ${meant}?` } };
 }

@@ -1,12 +1,17 @@
+import { check } from './check.ts';
+import { derive } from './derive.ts';
+import { gas } from './gas.ts';
+import { list } from './list.ts';
+import { start } from './start.ts';
+import { table } from './table.ts';
+import type { Run } from './call.ts';
+import type { CommandName } from './commands.ts';
+
 /*
- * What all commands do, in one module: the first line of any command loads it, and `--help` and `--version` do not.
- * They share nearly all they need, so that loading them one by one would only mean more files to find.
+ * What all commands do, in one module: any of them loads it, `--help` and `--version` do not. The commands share nearly
+ * all that they need, so that loading them one by one would only mean more files to find.
  */
 
-export { check } from './check.ts';
-export { derive } from './derive.ts';
-export { gas } from './gas.ts';
-export { list } from './list.ts';
 export { readOptions } from './read-options.ts';
-export { start } from './start.ts';
-export { table } from './table.ts';
+
+export const RUNS: Readonly<Record<CommandName, Run>> = { check, table, derive, gas, list, start };

@@ -49,7 +49,8 @@ function askedGases(args: readonly string[], library: Library): Asked {
   for (const arg of args) {
     const { name, part, problem } = readGas(arg, library);
     if (problem !== undefined) return { problem };
-    if (parts.has(name)) return { problem: { found: `${name} stands twice`, right: 'name each gas of a mixture once' } };
+    if (parts.has(name))
+      return { problem: { found: `${name} stands twice`, right: 'name each gas of a mixture once' } };
     if (part === undefined) single.push({ name, parts: new Map([[name, 1]]) });
     else parts.set(name, part);
   }

@@ -15,7 +15,10 @@ import type { Call, ExitCode } from './call.ts';
 /** Lists what there is, what the working folder's site adds included. */
 export function list({ args: [what = ''], options, out }: Call): ExitCode {
   const make = LISTS.get(what);
-  const problem = make === undefined ? unknownWord('list', what, [...LISTS.keys()]) : formatProblem(options, ['text', 'markdown', 'csv']);
+  const problem =
+    make === undefined
+      ? unknownWord('list', what, [...LISTS.keys()])
+      : formatProblem(options, ['text', 'markdown', 'csv']);
   if (make === undefined || problem !== undefined) return problem === undefined ? 2 : tellProblem(out, problem);
   const shelf = diskShelf();
   const { value: site, faults } = sitesOn(shelf, options.site).of('.');

@@ -29,10 +29,10 @@ async function answer(asked: Asked, out: Out): Promise<ExitCode> {
     case 'problem':
       return tellProblem(out, asked.problem);
     case 'run': {
-      const { readOptions, ...commands } = await import('./every-command.ts');
+      const { readOptions, RUNS } = await import('./every-command.ts');
       const { options, problem } = readOptions(asked.given);
       if (problem !== undefined) return tellProblem(out, problem);
-      return commands[asked.command.name]({ args: asked.args, options, out });
+      return RUNS[asked.command.name]({ args: asked.args, options, out });
     }
   }
 }

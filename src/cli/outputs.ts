@@ -16,7 +16,10 @@ export interface Outputs {
   finish(whole: boolean): readonly Fault[];
 }
 
-export function openOutputs(out: Out, { format, out: paths, color }: Pick<Options, 'format' | 'out' | 'color'>): Outputs {
+export function openOutputs(
+  out: Out,
+  { format, out: paths, color }: Pick<Options, 'format' | 'out' | 'color'>,
+): Outputs {
   const files: { readonly sink: OutFile; readonly style: Style }[] = [];
   const faults: Fault[] = [];
   for (const path of paths) {

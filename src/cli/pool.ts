@@ -8,7 +8,11 @@ const BATCH = 16;
 const AHEAD = 3;
 
 /** The parts of jobs in their order, made by several workers at once. No more is held than the workers have in hand. */
-export async function* onWorkers(jobs: Iterable<Job>, work: Work, count: number): AsyncGenerator<Part, void, undefined> {
+export async function* onWorkers(
+  jobs: Iterable<Job>,
+  work: Work,
+  count: number,
+): AsyncGenerator<Part, void, undefined> {
   const batches = batched(jobs);
   const workers: Hand[] = [];
   const pending: Promise<readonly Part[]>[] = [];
@@ -31,6 +35,12 @@ export async function* onWorkers(jobs: Iterable<Job>, work: Work, count: number)
   }
 }
 
+/** What a worker is sent for. */
+export interface Errand {
+  readonly work: Work;
+  readonly batch: readonly Job[];
+}
+
 /** A worker and what it has been given. */
 interface Hand {
   readonly waiting: readonly unknown[];
@@ -45,20 +55,23 @@ interface Waiting {
 
 /** A worker answers in the order in which it is asked. */
 function hire(work: Work): Hand {
-  const worker = new Worker(new URL('./worker.js', import.meta.url), { workerData: work });
+  const worker = new Worker(new URL('./worker.js', import.meta.url));
   const waiting: Waiting[] = [];
   const failAll = (error: unknown): void => {
     for (const { reject } of waiting.splice(0)) reject(error);
   };
   worker.on('message', (parts: readonly Part[]) => waiting.shift()?.resolve(parts));
   worker.on('error', failAll);
-  worker.on('exit', (code) => { failAll(new Error(`a worker ended with ${code}`)); });
+  worker.on('exit', (code) => {
+    failAll(new Error(`a worker ended with ${code}`));
+  });
   return {
     waiting,
     make(batch) {
       return new Promise((resolve, reject) => {
         waiting.push({ resolve, reject });
-        worker.postMessage(batch);
+        const errand: Errand = { work, batch };
+        worker.postMessage(errand);
       });
     },
     dismiss: () => worker.terminate(),

@@ -9,5 +9,8 @@ export interface Problem {
 /** The problem of a word that is none of those allowed. */
 export function unknownWord(what: string, word: string, allowed: readonly string[]): Problem {
   const meant = nearest(word, allowed);
-  return { found: `${what} '${word}' is unknown`, right: meant === undefined ? `one of ${allowed.join(', ')}` : `did you mean ${meant}?` };
+  return {
+    found: `${what} '${word}' is unknown`,
+    right: meant === undefined ? `one of ${allowed.join(', ')}` : `did you mean ${meant}?`,
+  };
 }

@@ -80,7 +80,8 @@ function readWord<W extends string>(
 function readOut(paths: readonly string[], complain: Complain): readonly string[] {
   for (const [index, path] of paths.entries()) {
     if (paths.indexOf(path) !== index) complain({ found: `--out ${path} stands twice`, right: 'name each file once' });
-    else if (formatOf(path) === undefined) complain({ found: `the ending of --out ${path} names no format`, right: ENDS });
+    else if (formatOf(path) === undefined)
+      complain({ found: `the ending of --out ${path} names no format`, right: ENDS });
   }
   return paths;
 }
@@ -118,7 +119,8 @@ function readSite(path: string | undefined, complain: Complain): string | undefi
 function readJobs(text: string | undefined, complain: Complain): number | undefined {
   if (text === undefined) return undefined;
   const jobs = /^[0-9]{1,3}$/.test(text) ? Number(text) : 0;
-  if (jobs < 1 || jobs > MOST_JOBS) complain({ found: `--jobs ${text}`, right: `a whole number from 1 to ${MOST_JOBS}` });
+  if (jobs < 1 || jobs > MOST_JOBS)
+    complain({ found: `--jobs ${text}`, right: `a whole number from 1 to ${MOST_JOBS}` });
   return jobs;
 }
 

@@ -49,7 +49,12 @@ interface Candidate {
   readonly named: boolean;
 }
 
-function* candidatesOf(shelf: Shelf, sites: Sites, paths: readonly string[], faults: ToldFault[]): Generator<Candidate> {
+function* candidatesOf(
+  shelf: Shelf,
+  sites: Sites,
+  paths: readonly string[],
+  faults: ToldFault[],
+): Generator<Candidate> {
   const siteOf = (path: string): Site | undefined => {
     const { value, faults: wrong } = sites.of(path);
     const folder = value?.folder ?? folderOf(path);
@@ -61,7 +66,8 @@ function* candidatesOf(shelf: Shelf, sites: Sites, paths: readonly string[], fau
     const site = siteOf(path);
     const kind = shelf.kind(path);
     if (site === undefined) continue;
-    if (kind === 'folder' || kind === 'linked-folder') yield* inFolder(shelf, path, boundsOf(shelf, site, siteOf), site, faults);
+    if (kind === 'folder' || kind === 'linked-folder')
+      yield* inFolder(shelf, path, boundsOf(shelf, site, siteOf), site, faults);
     else yield { path, named: true };
   }
 }
@@ -75,7 +81,13 @@ function* ownRecipes(shelf: Shelf, siteOf: SiteOf, faults: ToldFault[]): Generat
   const { nested, ...bounds } = boundsOf(shelf, site, siteOf);
   const only = site.recipes.length === 0 ? {} : { only: site.recipes, nested: () => undefined };
   const here = shelf.real('.') ?? '.';
-  yield* inFolder(shelf, relative(here, site.folder), { ...bounds, ...(nested === undefined ? {} : { nested }), ...only }, site, faults);
+  yield* inFolder(
+    shelf,
+    relative(here, site.folder),
+    { ...bounds, ...(nested === undefined ? {} : { nested }), ...only },
+    site,
+    faults,
+  );
 }
 
 function boundsOf(shelf: Shelf, site: Site, siteOf: SiteOf): Bounds {
@@ -89,7 +101,13 @@ function boundsOf(shelf: Shelf, site: Site, siteOf: SiteOf): Bounds {
   };
 }
 
-function* inFolder(shelf: Shelf, folder: string, bounds: Bounds, site: Site, faults: ToldFault[]): Generator<Candidate> {
+function* inFolder(
+  shelf: Shelf,
+  folder: string,
+  bounds: Bounds,
+  site: Site,
+  faults: ToldFault[],
+): Generator<Candidate> {
   for (const { value: path, faults: wrong } of walk(shelf, folder, bounds)) {
     faults.push(...wrong.map((fault) => toldPathFault(shelf, site.folder, fault)));
     if (path !== undefined) yield { path, named: false };
@@ -103,6 +121,7 @@ function* readCandidate(shelf: Shelf, sites: Sites, { path, named }: Candidate):
   for (const fault of faults) yield { kind: 'fault', fault: toldFault(folder, fault) };
   if (source === undefined) return;
   const sort = sortOf(source.text);
-  if (named || sort === 'recipe' || sort === 'unclear') yield { kind: 'recipe', job: { file, path, text: source.text } };
+  if (named || sort === 'recipe' || sort === 'unclear')
+    yield { kind: 'recipe', job: { file, path, text: source.text } };
   else if (sort === undefined) yield { kind: 'passed-over' };
 }

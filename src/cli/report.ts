@@ -33,9 +33,15 @@ export function proseReport(sink: Sink, style: Style): Report {
   };
   return {
     tellsFaults: isProse(style.format),
-    part: ({ text }) => { write(text); },
-    faults: (_, fromHere) => { write(drawBlocks(faultBlocks(fromHere), style)); },
-    close: ({ blocks }) => { write(drawBlocks(blocks, style)); },
+    part: ({ text }) => {
+      write(text);
+    },
+    faults: (_, fromHere) => {
+      write(drawBlocks(faultBlocks(fromHere), style));
+    },
+    close: ({ blocks }) => {
+      write(drawBlocks(blocks, style));
+    },
   };
 }
 

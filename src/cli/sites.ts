@@ -5,7 +5,7 @@ import { processFaults } from '../verdicts/judge.ts';
 import type { Shelf } from '../shelf/shelf.ts';
 import type { Site } from '../steps/site.ts';
 import type { Problem } from './problem.ts';
-import type { Outcome } from '../shelf/fault.ts';
+import type { Fault, Outcome } from '../shelf/fault.ts';
 
 /** The sites that one run meets; each is opened once, and its faults are told the first time it is met. */
 export interface Sites {
@@ -29,17 +29,21 @@ export function sitesOn(shelf: Shelf, chosen?: string): Sites {
       const { value, faults } = openSite(shelf, file ?? near);
       if (value === undefined) return { faults };
       open.set(key, value);
-      return { value, faults: [...faults, ...processFaults(value)] };
+      return { value, faults: [...faults, ...ownProcessFaults(value)] };
     },
     met: () => [...open.values()],
   };
+}
+
+/** The built-in processes are known to be sound, and looking through them takes time that a single recipe would feel. */
+function ownProcessFaults(site: Site): readonly Fault[] {
+  return site.document?.content.processes === undefined ? [] : processFaults(site);
 }
 
 /** Without a site document each folder stands for itself. */
 function bareKey(shelf: Shelf, near: string): string {
   return shelf.kind(near) === 'folder' ? near : folderOf(near);
 }
-
 
 /** What is wrong with the site that a command line chooses: it must be a site's document or the folder it stands in. */
 export function siteProblem(shelf: Shelf, chosen: string): Problem | undefined {

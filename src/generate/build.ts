@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process';
 import { chmodSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { build } from 'esbuild';
+import { build as bundleWith } from 'esbuild';
 import type { Metafile, Plugin } from 'esbuild';
 
 /*
@@ -32,7 +32,7 @@ await main(process.argv.slice(2));
 
 async function buildAll(): Promise<void> {
   rmSync(DIST, { recursive: true, force: true });
-  const types = process.env.FAST ? undefined : writeTypes();
+  const types = writeTypes();
   writeLicences(await bundle());
   writeFileSync(join(DIST, 'regimen.js'), COMMAND);
   chmodSync(join(DIST, 'regimen.js'), 0o755);
@@ -40,7 +40,7 @@ async function buildAll(): Promise<void> {
 }
 
 async function bundle(): Promise<Metafile> {
-  const { metafile } = await build({
+  const { metafile } = await bundleWith({
     entryPoints: ENTRIES,
     outdir: DIST,
     chunkNames: 'part-[hash]',
@@ -63,9 +63,11 @@ async function bundle(): Promise<Metafile> {
 /** Modules of Node that a bundled package asks for by `require`, which an ES module does not have, are imported instead. */
 const requiredBuiltIns: Plugin = {
   name: 'required-built-ins',
-  setup({ onResolve, onLoad }) {
-    onResolve({ filter: /^node:/ }, ({ path, kind }) => (kind === 'require-call' ? { path, namespace: 'required' } : undefined));
-    onLoad({ filter: /./, namespace: 'required' }, ({ path }) => ({
+  setup(build) {
+    build.onResolve({ filter: /^node:/ }, ({ path, kind }) =>
+      kind === 'require-call' ? { path, namespace: 'required' } : undefined,
+    );
+    build.onLoad({ filter: /./, namespace: 'required' }, ({ path }) => ({
       contents: path === 'node:process' ? 'module.exports = globalThis.process;' : `export * from '${path}';`,
     }));
   },

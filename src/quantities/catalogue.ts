@@ -7,6 +7,7 @@ import * as lengths from './lengths.ts';
 import * as regime from './regime.ts';
 import * as residual from './residual.ts';
 import * as surfaces from './surfaces.ts';
+import * as thermalisation from './thermalisation.ts';
 import * as transport from './transport.ts';
 import { dimensionOf } from '../steps/addresses.ts';
 import type { Dimension } from '../units/dimensions.ts';
@@ -14,7 +15,19 @@ import type { Quantity } from './quantity.ts';
 import type { Reference } from './reference.ts';
 
 /** The topics of the catalogue, in the order in which lists print them. */
-const TOPICS = { gas, collisions, transport, lengths, flow, regime, surfaces, residual, emittedAtoms, equipment };
+const TOPICS = {
+  gas,
+  collisions,
+  transport,
+  lengths,
+  flow,
+  regime,
+  surfaces,
+  residual,
+  emittedAtoms,
+  thermalisation,
+  equipment,
+};
 
 const BY_ID: ReadonlyMap<string, Quantity> = new Map(
   Object.values(TOPICS)

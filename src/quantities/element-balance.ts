@@ -20,7 +20,10 @@ export function balanceOf(scope: Scope): Balance | Missing | Inapplicable {
   if (film === undefined) return missing(`films.${surface.film}.formula`);
   if (surface.mode === 'grows') return { atomsPerFormula: film };
   if (surface.product === undefined) return missing('surface.product');
-  return etchBalance(film, productFormula(surface.product, scope)) ?? inapplicable(`${surface.product} carries off nothing of the film`);
+  return (
+    etchBalance(film, productFormula(surface.product, scope)) ??
+    inapplicable(`${surface.product} carries off nothing of the film`)
+  );
 }
 
 /** The elements that the film takes up and a gas of the feed carries. */
@@ -53,7 +56,9 @@ function etchBalance(film: ReadonlyMap<string, number>, product: ReadonlyMap<str
     const inFilm = film.get(element);
     if (inFilm === undefined) continue;
     const products = inFilm / inProduct;
-    const taken = [...product].filter(([other]) => !film.has(other)).map(([other, atoms]) => [other, atoms * products] as const);
+    const taken = [...product]
+      .filter(([other]) => !film.has(other))
+      .map(([other, atoms]) => [other, atoms * products] as const);
     return { atomsPerFormula: new Map(taken) };
   }
   return undefined;

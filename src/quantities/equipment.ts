@@ -140,7 +140,11 @@ export const speedDrift = quantity<[now: number, flows: readonly number[], press
     return [{ id: 'pumping-speed' }, flows, 'chamber.pump.reference.pressure', { id: 'pump-temperature' }];
   },
   value: (now, flows, pressure, temperature) => {
-    const healthy = pumpingSpeed(flows.reduce((sum, flow) => sum + flow, 0), temperature, pressure);
+    const healthy = pumpingSpeed(
+      flows.reduce((sum, flow) => sum + flow, 0),
+      temperature,
+      pressure,
+    );
     return Math.abs(now / healthy - 1);
   },
 });

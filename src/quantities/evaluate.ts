@@ -25,6 +25,8 @@ export interface Values {
   readonly chosen: number[];
   /** Slopes of a law's value to each of its own inputs, as far as they were worked out. */
   readonly partials: (number[] | undefined)[];
+  /** Standard uncertainties that were asked for. */
+  readonly deviations: (number | undefined)[];
 }
 
 /** The reading of a node. */

@@ -37,7 +37,10 @@ export const wallArea = quantity<[diameter: number, height: number]>({
 });
 
 function cylinder(scope: Scope): [Ingredient, Ingredient] {
-  return ['body.diameter', scope.has('body.height') ? 'body.height' : scope.has('body.length') ? 'body.length' : 'body.height'];
+  return [
+    'body.diameter',
+    scope.has('body.height') ? 'body.height' : scope.has('body.length') ? 'body.length' : 'body.height',
+  ];
 }
 
 export const residenceTimeOf = quantity<[pressure: number, volume: number, temperature: number, flow: number]>({
@@ -100,10 +103,16 @@ export const pumpingSpeedOf = quantity<[flow: number, temperature: number, press
     if (!scope.states('pressure')) return inapplicable('no pressure is held');
     return [{ id: 'flow-rate' }, { id: 'pump-temperature' }, { id: 'gas-pressure' }];
   },
-  value: (flow, temperature, pressure) => (flow > 0 ? pumpingSpeed(flow, temperature, pressure) : inapplicable('no gas flows')),
+  value: (flow, temperature, pressure) =>
+    flow > 0 ? pumpingSpeed(flow, temperature, pressure) : inapplicable('no gas flows'),
 });
 
-type PumpArguments = [flows: readonly number[], pressure: readonly number[], limits: readonly number[], speeds: readonly number[]];
+type PumpArguments = [
+  flows: readonly number[],
+  pressure: readonly number[],
+  limits: readonly number[],
+  speeds: readonly number[],
+];
 
 export const pumpSpeed = quantity<PumpArguments>({
   id: 'pump-speed',
@@ -155,7 +164,8 @@ export const openPressure = quantity<[flow: number, temperature: number, speed: 
     if (kind === 'by-pressure' && !scope.has('pressure')) return missing('pressure');
     return [{ id: 'flow-rate' }, { id: 'pump-temperature' }, { id: 'pump-speed' }];
   },
-  value: (flow, temperature, speed) => (flow > 0 ? steadyPressure(flow, temperature, speed) : inapplicable('no gas flows')),
+  value: (flow, temperature, speed) =>
+    flow > 0 ? steadyPressure(flow, temperature, speed) : inapplicable('no gas flows'),
 });
 
 export const volumeFlow = quantity<[volume: number, residence: number]>({
@@ -172,7 +182,8 @@ export const flowArea = quantity<[diameter: number, wafer: number, gap: readonly
   id: 'flow-area',
   symbol: 'A',
   dimension: 'area',
-  statement: 'Area normal to the flow: of a tube less the wafers’ disc; of radial flow the rim of the wafer times the gap.',
+  statement:
+    'Area normal to the flow: of a tube less the wafers’ disc; of radial flow the rim of the wafer times the gap.',
   source: 'π (D² - d²)/4, or π d × gap, by the chamber’s body.flow',
   from: (_, scope) => {
     switch (scope.setup.flow) {
@@ -260,7 +271,8 @@ export const rayleighOf = quantity<RayleighArguments>({
   id: 'rayleigh',
   symbol: 'Ra',
   dimension: 'number',
-  statement: 'Rayleigh number of the gap between wafer and wall: buoyancy over what damps it. Onset at 1708 where the hot face lies below.',
+  statement:
+    'Rayleigh number of the gap between wafer and wall: buoyancy over what damps it. Onset at 1708 where the hot face lies below.',
   source: 'Ra = g ΔT L³ ρ² c_p/(T μ κ); onset Chandrasekhar 1961',
   from: (_, { gases }) => [
     'temperatures.wafer',

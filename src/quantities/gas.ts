@@ -9,7 +9,8 @@ export const gasPressure = quantity<[]>({
   id: 'gas-pressure',
   symbol: 'p',
   dimension: 'pressure',
-  statement: 'Pressure of the gas: the setpoint, the fill pressure, what the open pump leaves, or the base pressure where nothing flows.',
+  statement:
+    'Pressure of the gas: the setpoint, the fill pressure, what the open pump leaves, or the base pressure where nothing flows.',
   source: 'definition',
   from: (_, scope) => pressureOf(scope),
   value: () => NaN,
@@ -29,7 +30,8 @@ export const gasTemperature = quantity<[]>({
   symbol: 'T_gas',
   dimension: 'temperature',
   statement: 'Temperature of the gas: given, or by the rule for a chamber of its kind.',
-  source: 'rule: hot-wall tube, sputter and evaporation the wall; plasma the wall plus 0 to 300 K; heated wafer the middle (common practice)',
+  source:
+    'rule: hot-wall tube, sputter and evaporation the wall; plasma the wall plus 0 to 300 K; heated wafer the middle (common practice)',
   from: (_, scope) => temperatureOf(scope),
   value: () => NaN,
 });
@@ -65,7 +67,8 @@ export const plasmaGasTemperature = quantity<
   id: 'plasma-gas-temperature',
   symbol: 'T_pl',
   dimension: 'temperature',
-  statement: 'Temperature of the gas of a plasma: the wall and what the plasma adds, or the middle to a wafer that is more than 100 K hotter.',
+  statement:
+    'Temperature of the gas of a plasma: the wall and what the plasma adds, or the middle to a wafer that is more than 100 K hotter.',
   source: 'wall plus 0 to 300 K; cold wall and heated wafer: the middle of both (common practice)',
   from: (_, scope) => [
     'temperatures.wall',
@@ -106,7 +109,8 @@ export const moleFraction = quantity<[flow: number, total: number]>({
   id: 'mole-fraction',
   symbol: 'x',
   dimension: 'fraction',
-  statement: 'Share of a gas among the molecules: of the stated composition, else of the feed, else of the residual gas.',
+  statement:
+    'Share of a gas among the molecules: of the stated composition, else of the feed, else of the residual gas.',
   source: 'definition; a well-mixed chamber without reactions has the composition of its feed',
   subjects: gasesOf,
   from: (reference, scope) => {
@@ -127,7 +131,10 @@ export const partialPressure = quantity<[fraction: number, pressure: number]>({
   statement: 'Share of a gas in the pressure.',
   source: "Dalton's law",
   subjects: gasesOf,
-  from: (reference, scope) => [{ id: 'mole-fraction', of: gasOf(reference, scope) ?? 'reactant' }, { id: 'gas-pressure' }],
+  from: (reference, scope) => [
+    { id: 'mole-fraction', of: gasOf(reference, scope) ?? 'reactant' },
+    { id: 'gas-pressure' },
+  ],
   value: (fraction, pressure) => fraction * pressure,
 });
 
@@ -142,10 +149,15 @@ export const flowRatio = quantity<[dividend: number, divisor: number]>({
     const [a = '', b = ''] = of.split('/');
     const absent = [a, b].filter((gas) => !scope.fedGases.includes(gas));
     // A gas that does not flow beside one that does has the ratio zero.
-    if (absent.includes(b) || scope.gas(a) === undefined) return inapplicable(`the step has no flow of ${absent.join(' or ')}`);
-    return [{ id: 'flow-rate', of: a }, { id: 'flow-rate', of: b }];
+    if (absent.includes(b) || scope.gas(a) === undefined)
+      return inapplicable(`the step has no flow of ${absent.join(' or ')}`);
+    return [
+      { id: 'flow-rate', of: a },
+      { id: 'flow-rate', of: b },
+    ];
   },
-  value: (dividend, divisor) => (divisor > 0 ? dividend / divisor : inapplicable('the gas it is divided by does not flow')),
+  value: (dividend, divisor) =>
+    divisor > 0 ? dividend / divisor : inapplicable('the gas it is divided by does not flow'),
 });
 
 export const numberDensityOf = quantity<[pressure: number, temperature: number]>({

@@ -8,7 +8,8 @@ export const lengthOf = quantity<[lengths: readonly number[]]>({
   id: 'length',
   symbol: 'L',
   dimension: 'length',
-  statement: 'A length of the chamber, step or feature, as in length.gap; of the chamber the smallest of its diameter and height.',
+  statement:
+    'A length of the chamber, step or feature, as in length.gap; of the chamber the smallest of its diameter and height.',
   source: 'definition',
   lengths: lengthsOf,
   from: ({ length = '' }, scope) => lengthIngredient(length, scope),

@@ -1,10 +1,4 @@
-import {
-  collisionsStraight,
-  collisionsWalk,
-  diffusionTime,
-  knudsen,
-  wallCollisions,
-} from '../physics/regime.ts';
+import { collisionsStraight, collisionsWalk, diffusionTime, knudsen, wallCollisions } from '../physics/regime.ts';
 import { lengthsOf } from './lengths.ts';
 import { missing, quantity } from './quantity.ts';
 import type { Reference } from './reference.ts';
@@ -40,7 +34,8 @@ function pathOver({ of, length = '' }: Reference, scope: Scope): Reference {
 function emittedSubject(of: string | undefined, length: string, scope: Scope): string | undefined {
   if (of !== undefined) return scope.emitted(of) === undefined ? undefined : of;
   if (length !== 'throw') return undefined;
-  return scope.emittedSubjects('target')[0] ?? scope.emittedSubjects('melt')[0];
+  // Of an alloy the atom with the shortest path.
+  return (['target', 'melt'] as const).find((role) => scope.emitted(role) !== undefined);
 }
 
 function lengthFor({ length = 'chamber' }: Reference): Reference {
@@ -87,7 +82,9 @@ export const collisionsWalkOf = quantity<[frequency: number, length: number, dif
   value: collisionsWalk,
 });
 
-export const collisionsResidence = quantity<[residence: number, speeds: readonly number[], fractions: readonly number[], path: number]>({
+export const collisionsResidence = quantity<
+  [residence: number, speeds: readonly number[], fractions: readonly number[], path: number]
+>({
   id: 'collisions-residence',
   symbol: 'z τ',
   dimension: 'number',

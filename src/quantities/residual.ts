@@ -26,7 +26,9 @@ function basePump(scope: Scope): Ingredient | Inapplicable {
     case 'by-pressure':
       return 'chamber.pump.speed.0.is';
     case 'by-gas':
-      return scope.has('chamber.pump.speed.N2') ? 'chamber.pump.speed.N2' : (scope.addresses('chamber.pump.speed.')[0] ?? 'chamber.pump.speed.N2');
+      return scope.has('chamber.pump.speed.N2')
+        ? 'chamber.pump.speed.N2'
+        : (scope.addresses('chamber.pump.speed.')[0] ?? 'chamber.pump.speed.N2');
   }
 }
 
@@ -86,7 +88,8 @@ export const impurityRatioOf = quantity<ImpurityArguments>({
   id: 'impurity-ratio',
   symbol: 'N_imp/N_film',
   dimension: 'number',
-  statement: 'Reactive atoms (O, N, C) that arrive from the residual gas over the atoms of the film; every one sticking, an upper bound, loose for noble metals.',
+  statement:
+    'Reactive atoms (O, N, C) that arrive from the residual gas over the atoms of the film; every one sticking, an upper bound, loose for noble metals.',
   source: 'Σ Γ_i a_i/(J a_film), Γ by Hertz-Knudsen; Ohring, Materials Science of Thin Films, 2nd ed. 2002, ch. 3',
   from: (_, scope) => {
     const { surface } = scope.setup;
@@ -122,4 +125,3 @@ function reactiveAtoms(gas: string, scope: Scope): number {
   if (found === undefined || found.inert) return 0;
   return ['O', 'N', 'C'].reduce((sum, element) => sum + (found.formula.get(element) ?? 0), 0);
 }
-

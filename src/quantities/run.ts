@@ -43,15 +43,15 @@ export class StepRun implements Values {
   readonly uncertain: boolean[] = [];
   readonly chosen: number[] = [];
   readonly partials: (number[] | undefined)[] = [];
-  readonly #changed: ReadonlySet<string>;
+  readonly deviations: (number | undefined)[] = [];
   readonly #reached: (boolean | undefined)[] = [];
 
-  constructor(step: Step, plan: Plan, moved?: Moved) {
+  /** `origin` is another run of the plan: numbers that no given tells apart are taken from it. */
+  constructor(step: Step, plan: Plan, origin?: StepRun, givens: ReadonlyMap<string, Given> = step.givens) {
     this.step = step;
     this.plan = plan;
-    this.givens = moved?.givens ?? step.givens;
-    this.origin = moved?.origin;
-    this.#changed = moved?.changed ?? NOTHING;
+    this.givens = givens;
+    this.origin = origin;
   }
 
   read(reference: Reference, over?: Reference): Reading {
@@ -105,29 +105,24 @@ export class StepRun implements Values {
       const given = this.given(address);
       if (given !== undefined) givens.set({ ...given, value });
     }
-    const changed = new Set(changes.map(({ address }) => address));
-    return new StepRun(this.step, this.plan, { givens, changed, origin: this });
+    return new StepRun(this.step, this.plan, this, givens);
   }
 
-  /** Whether what this run changed of the one it comes from reaches a number. */
+  /** Whether any given that a number is read from differs from that of the run it comes from. */
   reaches(node: Node): boolean {
     const known = this.#reached[node.slot];
     if (known !== undefined) return known;
-    const reached =
-      node.kind === 'given' ? this.#changed.has(node.address) : node.inputs.some((input) => this.reaches(input));
+    const reached = node.kind === 'given' ? this.#differs(node.address) : node.inputs.some((input) => this.reaches(input));
     this.#reached[node.slot] = reached;
     return reached;
   }
-}
 
-/** What a run changed of the one it comes from. */
-interface Moved {
-  readonly givens: ReadonlyMap<string, Given>;
-  readonly changed: ReadonlySet<string>;
-  readonly origin: StepRun;
+  #differs(address: string): boolean {
+    const own = this.givens.get(address);
+    const other = this.origin?.givens.get(address);
+    return own !== other && (own?.value !== other?.value || own?.uncertainty !== other?.uncertainty);
+  }
 }
-
-const NOTHING: ReadonlySet<string> = new Set();
 
 /** A recipe on its chamber and site, whose steps can be read. */
 export interface Run {
@@ -136,9 +131,19 @@ export interface Run {
   readonly steps: readonly StepRun[];
 }
 
-/** A resolved recipe as a run. Plans of the setups met so far are kept, so that steps alike work out only once what is read from what. */
+/**
+ * A resolved recipe as a run. Plans of the setups met so far are kept, so that steps alike work out only once what is read from
+ * what; within the recipe they share their numbers too, as far as their givens agree.
+ */
 export function runOf(site: Site, recipe: Recipe): Run {
-  return { site, recipe, steps: recipe.steps.map((step) => new StepRun(step, planOf(step, site.library))) };
+  const first = new Map<Plan, StepRun>();
+  const steps = recipe.steps.map((step) => {
+    const plan = planOf(step, site.library);
+    const run = new StepRun(step, plan, first.get(plan));
+    if (run.origin === undefined) first.set(plan, run);
+    return run;
+  });
+  return { site, recipe, steps };
 }
 
 const PLANS = new WeakMap<Library, Map<string, Plan>>();

@@ -12,6 +12,16 @@ import type { Slope } from './reading.ts';
 /** Standard uncertainty of a number: root of the sum of squares of what each given contributes (GUM 5.1.2). */
 export function standardUncertainty(values: Values, node: Node): number {
   if (settle(values, node) !== undefined || values.uncertain[node.slot] !== true) return 0;
+  const kept = values.deviations[node.slot];
+  if (kept !== undefined) return kept;
+  const { origin } = values;
+  const shared = origin !== undefined && !values.reaches(node);
+  const deviation = shared ? standardUncertainty(origin, node) : combined(values, node);
+  values.deviations[node.slot] = deviation;
+  return deviation;
+}
+
+function combined(values: Values, node: Node): number {
   let sum = 0;
   chain(values, node, true, (given, slope) => {
     sum += (slope * given.uncertainty) ** 2;
@@ -67,6 +77,8 @@ function chain(
 
 /** Hands a slope on from a node to its inputs. */
 function pass(values: Values, node: Node, slope: number, onlyUncertain: boolean): void {
+  // What a run shares with the one it comes from, inputs and all, was worked out there.
+  if (values.origin !== undefined && !values.reaches(node)) return pass(values.origin, node, slope, onlyUncertain);
   if (node.kind === 'same') return add(node.inputs[0], slope);
   // The worst of several moves with the one that was chosen.
   if (node.kind === 'choice') return add(node.inputs[values.chosen[node.slot] ?? -1], slope);
@@ -86,7 +98,6 @@ function add(node: Node | undefined, slope: number): void {
 
 /** Slopes of a law's value to its own inputs, worked out as far as they are wanted and kept. NaN marks those not wanted so far. */
 function partialsOf(values: Values, node: Law, onlyUncertain: boolean): readonly number[] {
-  if (values.origin !== undefined && !values.reaches(node)) return partialsOf(values.origin, node, onlyUncertain);
   let partials = values.partials[node.slot];
   if (partials === undefined) {
     partials = node.inputs.map(() => NaN);

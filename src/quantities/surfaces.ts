@@ -36,7 +36,8 @@ export const monolayerTimeOf = quantity<[sites: number, sticking: readonly numbe
   id: 'monolayer-time',
   symbol: 't_mono',
   dimension: 'time',
-  statement: 'Time in which a gas covers every site of a surface, each molecule sticking unless the step says how many do.',
+  statement:
+    'Time in which a gas covers every site of a surface, each molecule sticking unless the step says how many do.',
   source: 'N_s/(s Γ)',
   subjects: gasesOf,
   from: (reference, scope) => {
@@ -82,7 +83,8 @@ export const activeArea = quantity<
   id: 'active-area',
   symbol: 'A_s',
   dimension: 'area',
-  statement: 'Area on which film grows or is etched: coated faces of all wafers, their open share, and the wall that is coated too.',
+  statement:
+    'Area on which film grows or is etched: coated faces of all wafers, their open share, and the wall that is coated too.',
   source: 'definition',
   from: (_, scope) => [
     { id: 'wafer-area' },
@@ -95,14 +97,19 @@ export const activeArea = quantity<
   remarks: (_, scope) =>
     scope.states('chamber.walls.deposited_area')
       ? []
-      : ['what the walls take up is not counted, since chamber.walls.deposited_area is not given: the true utilisation is higher'],
+      : [
+          'what the walls take up is not counted, since chamber.walls.deposited_area is not given: the true utilisation is higher',
+        ],
 });
 
-export const utilisationOf = quantity<[flux: number, area: number, atoms: number, flows: readonly number[], counts: readonly number[]]>({
+export const utilisationOf = quantity<
+  [flux: number, area: number, atoms: number, flows: readonly number[], counts: readonly number[]]
+>({
   id: 'utilisation',
   symbol: 'U',
   dimension: 'fraction',
-  statement: 'What the surface takes up of an element over what the feed brings; without a subject, of the element of which it takes most.',
+  statement:
+    'What the surface takes up of an element over what the feed brings; without a subject, of the element of which it takes most.',
   source: 'element balance, J A n_X/Σ F_i n_X',
   subjects: limitingElements,
   from: (reference, scope) => utilisationIngredients(reference, scope),
@@ -112,7 +119,10 @@ export const utilisationOf = quantity<[flux: number, area: number, atoms: number
   },
 });
 
-function utilisationIngredients({ of }: Reference, scope: Scope): UtilisationRecipe | Ingredient | Missing | Inapplicable {
+function utilisationIngredients(
+  { of }: Reference,
+  scope: Scope,
+): UtilisationRecipe | Ingredient | Missing | Inapplicable {
   const balance = balanceOf(scope);
   if ('kind' in balance) return balance;
   if (of === undefined) return { id: 'utilisation', of: 'worst' };
@@ -152,7 +162,8 @@ export const surfaceRate = quantity<[a: number, b: number, perFormula: readonly 
   id: 'surface-rate',
   symbol: 'k_s',
   dimension: 'velocity',
-  statement: 'First-order rate of the surface: from the sticking coefficient where one is given, else from the measured rate.',
+  statement:
+    'First-order rate of the surface: from the sticking coefficient where one is given, else from the measured rate.',
   source: 'Motz & Wise, J. Chem. Phys. 32, 1893 (1960); else k_s = ν J/n_i by the element balance',
   from: (_, scope) => {
     if (scope.setup.reactant === undefined) return missing('reactant.gas');

@@ -28,20 +28,20 @@ function judgeRatio(ratio: RatioSpec, run: StepRun, cases: readonly Case[], cove
   const beyond = cases.find((one) => flows(ratio.of, one.run) === true && flows(ratio.to, one.run) === false);
   if (beyond === undefined) return judgeAssumption(assumption, cases, coverage);
   const most = assumption.limits.find(({ side }) => side === 'at_most');
-  if (most === undefined) return aboveEvery(judgeAssumption(assumption, cases, coverage), ratio);
-  const { because: _, ...verdict } = judgeAssumption(assumption, [beyond], coverage);
-  return { ...verdict, kind: 'fail', level: most.level, remarks: [alone(ratio)] };
+  if (most !== undefined) {
+    const verdict = aboveEvery(judgeAssumption(assumption, [beyond], coverage), ratio);
+    const { instance } = beyond;
+    return { ...verdict, kind: 'fail', level: most.level, ...(instance === undefined ? {} : { instance }) };
+  }
+  // Without an upper bound it is no finding; one that the ratio has elsewhere stays.
+  const verdict = judgeAssumption(assumption, cases, coverage);
+  return verdict.kind === 'notApplicable' ? aboveEvery(verdict, ratio) : verdict;
 }
 
-/** Without an upper bound, being above every bound is no finding; others that the ratio has elsewhere stay. */
-function aboveEvery(verdict: Verdict, ratio: RatioSpec): Verdict {
-  if (verdict.kind !== 'notApplicable') return verdict;
-  const { because: _, ...rest } = verdict;
-  return { ...rest, kind: 'pass', remarks: [alone(ratio)] };
-}
-
-function alone({ of, to }: RatioSpec): string {
-  return `${of} flows without ${to}`;
+/** In place of why the ratio has no number, which gas flows alone. */
+function aboveEvery(verdict: Verdict, { of, to }: RatioSpec): Verdict {
+  const { because, ...rest } = verdict;
+  return { ...rest, kind: 'pass', remarks: because === undefined ? rest.remarks : [`${of} flows without ${to}`] };
 }
 
 function assumptionOf({ name, of, to, statement, source, place, ...stated }: RatioSpec, run: StepRun): Assumption {

@@ -49,7 +49,7 @@ function stepText(step: number, pressure: (base: number) => string, flow: (base:
     case 0:
       return `${head}    process: settle
     time: 12 s
-    pressure: ${pressure(5)} mTorr
+    pressure: ${pressure(5 + step / 8)} mTorr
     flows:
       Ar: ${flow(120)} sccm
       N2: ${flow(60)} sccm
@@ -57,14 +57,14 @@ function stepText(step: number, pressure: (base: number) => string, flow: (base:
     case 1:
       return `${head}    process: soak
     time: 3 s
-    pressure: ${pressure(5)} mTorr
+    pressure: ${pressure(5 + step / 8)} mTorr
     flows: { Ar: ${flow(120)} sccm, N2: ${flow(60)} sccm }
     power: { source: 400 W }
 `;
     case 2:
       return `${head}    process: sputter
     time: { usually: 85 s, at_least: 70 s, at_most: 100 s }
-    pressure: ${pressure(5)} mTorr
+    pressure: ${pressure(5 + step / 8)} mTorr
     flows: { Ar: ${flow(120)} sccm, N2: ${flow(60)} sccm }
     power:
       source: 2.4 kW

@@ -6,7 +6,7 @@ import { clearFolders, DEMO, folderWith, regimen, siteWith, SOUND, write } from 
 afterAll(clearFolders);
 
 describe('standard input', () => {
-  test('is a recipe of the working folder\'s site', () => {
+  test("is a recipe of the working folder's site", () => {
     const { code, out } = regimen(['check', '-'], { cwd: siteWith({}), input: SOUND });
     expect(code).toBe(0);
     expect(out).toContain('titanium-seed');
@@ -16,7 +16,9 @@ describe('standard input', () => {
     const cwd = siteWith({});
     const broken = SOUND.replace('time: 10 s', 'time: soon');
     expect(regimen(['check', '-'], { cwd, input: broken }).out).toContain('standard input:22:11');
-    expect(regimen(['check', '-', '--at', 'recipes/new.yaml'], { cwd, input: broken }).out).toContain('recipes/new.yaml:22:11');
+    expect(regimen(['check', '-', '--at', 'recipes/new.yaml'], { cwd, input: broken }).out).toContain(
+      'recipes/new.yaml:22:11',
+    );
   });
 
   test('stands for the file of that name while it is not saved', () => {
@@ -28,11 +30,15 @@ describe('standard input', () => {
     const path = 'recipes/sputter/ti-liner-wide.yaml';
     const input = readFileSync(join(DEMO, path), 'utf8');
     const args = ['check', '--format', 'json'];
-    expect(regimen([...args, '-', '--at', path], { cwd: DEMO, input })).toEqual(regimen([...args, path], { cwd: DEMO }));
+    expect(regimen([...args, '-', '--at', path], { cwd: DEMO, input })).toEqual(
+      regimen([...args, path], { cwd: DEMO }),
+    );
   });
 
   test('that is empty is a fault', () => {
-    expect(regimen(['check', '-'], { cwd: siteWith({}), input: '' })).toMatchObject({ code: 2, out: expect.stringContaining('an empty file') });
+    const { code, out } = regimen(['check', '-'], { cwd: siteWith({}), input: '' });
+    expect(code).toBe(2);
+    expect(out).toContain('an empty file');
   });
 });
 
@@ -52,7 +58,9 @@ describe('paths', () => {
   test('links to folders are not followed, so that a circle of them ends', () => {
     const cwd = siteWith({ 'a.yaml': SOUND });
     symlinkSync('..', join(cwd, 'recipes/round'));
-    expect(regimen(['check', '.'], { cwd })).toMatchObject({ code: 0, out: expect.stringContaining('1 recipe, ') });
+    const { code, out } = regimen(['check', '.'], { cwd });
+    expect(code).toBe(0);
+    expect(out).toContain('1 recipe, ');
   });
 
   test('links that lead round in a circle or nowhere are faults where they are named', () => {
@@ -69,10 +77,12 @@ describe('paths', () => {
 
   test('a file that may not be read is a fault, and the others are still judged', () => {
     const cwd = siteWith({ 'a.yaml': SOUND, 'b.yaml': SOUND });
+    chmodSync(cwd, 0o755);
     chmodSync(join(cwd, 'recipes/b.yaml'), 0);
-    const { code, out } = regimen(['check'], { cwd });
-    expect(out).toContain('titanium-seed');
-    if (process.getuid?.() !== 0) expect({ code, out }).toMatchObject({ code: 2, out: expect.stringContaining('no permission') });
+    const { code, out } = regimen(['check'], { cwd, ...asNobody() });
+    expect(code).toBe(2);
+    expect(out).toContain('recipes/b.yaml:1:1\n         no permission to read it');
+    expect(out).toContain('1 recipe, 4 steps: 4 pass.');
   });
 
   test('a folder with the name of a recipe is walked, not read', () => {
@@ -109,6 +119,11 @@ describe('paths', () => {
   });
 });
 
+/** Whoever may read everything runs the command as somebody who may not. */
+function asNobody(): { readonly uid?: number } {
+  return process.getuid?.() === 0 ? { uid: 65_534 } : {};
+}
+
 describe('hostile documents end with 2, a message and no stack', () => {
   const bomb = `regimen: recipe 1\na: &a [x, x]\nb: &b [*a, *a]\nc: [*b, *b]\n`;
   const deep = `regimen: recipe 1\nsteps: ${'['.repeat(2000)}\n`;
@@ -139,7 +154,10 @@ describe('hostile documents end with 2, a message and no stack', () => {
   test('bytes that are not UTF-8', () => {
     const cwd = siteWith({});
     mkdirSync(join(cwd, 'recipes'));
-    writeFileSync(join(cwd, 'recipes/latin.yaml'), Buffer.from([...Buffer.from('regimen: recipe 1\nname: '), 0xe9, 0x0a]));
+    writeFileSync(
+      join(cwd, 'recipes/latin.yaml'),
+      Buffer.from([...Buffer.from('regimen: recipe 1\nname: '), 0xe9, 0x0a]),
+    );
     const { code, out, err } = regimen(['check', 'recipes/latin.yaml'], { cwd });
     expect({ code, err }).toEqual({ code: 2, err: '' });
     expect(out).toContain('recipes/latin.yaml:2:7');

@@ -28,12 +28,27 @@ describe('a reader who goes away', () => {
 describe('--out', () => {
   test('writes every file asked for, each in the format of its ending, the same as standard output would have', () => {
     const cwd = siteWith({ 'sound.yaml': SOUND });
-    const { code } = regimen(['check', '--out', 'a.md', '--out', 'a.csv', '--out', 'a.json', '--out', 'a.txt'], { cwd });
+    const { code } = regimen(['check', '--out', 'a.md', '--out', 'a.csv', '--out', 'a.json', '--out', 'a.txt'], {
+      cwd,
+    });
     expect(code).toBe(0);
-    for (const [ending, format] of [['md', 'markdown'], ['csv', 'csv'], ['json', 'json'], ['txt', 'text']] as const) {
+    for (const [ending, format] of [
+      ['md', 'markdown'],
+      ['csv', 'csv'],
+      ['json', 'json'],
+      ['txt', 'text'],
+    ] as const) {
       expect(readFileSync(join(cwd, `a.${ending}`), 'utf8')).toBe(regimen(['check', '--format', format], { cwd }).out);
     }
-    expect(readdirSync(cwd).sort()).toEqual(['a.csv', 'a.json', 'a.md', 'a.txt', 'chambers', 'recipes', 'regimen.yaml']);
+    expect(readdirSync(cwd).sort()).toEqual([
+      'a.csv',
+      'a.json',
+      'a.md',
+      'a.txt',
+      'chambers',
+      'recipes',
+      'regimen.yaml',
+    ]);
   });
 
   test('replaces a file that was there, and what a link leads to', () => {

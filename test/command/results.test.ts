@@ -53,10 +53,16 @@ describe('CSV', () => {
   });
 
   test('tells faults on standard error, since it has no room for them', () => {
-    const { code, out, err } = regimen(['check', '--format', 'csv'], { cwd: siteWith({ 'a.yaml': BROKEN, 'b.yaml': SOUND }) });
+    const { code, out, err } = regimen(['check', '--format', 'csv'], {
+      cwd: siteWith({ 'a.yaml': BROKEN, 'b.yaml': SOUND }),
+    });
     expect(code).toBe(2);
     expect(err).toMatch(/^regimen: recipes\/a\.yaml:22:11: /);
-    expect(records(out).slice(1).every(([file]) => file === 'recipes/b.yaml')).toBe(true);
+    expect(
+      records(out)
+        .slice(1)
+        .every(([file]) => file === 'recipes/b.yaml'),
+    ).toBe(true);
   });
 });
 
@@ -81,7 +87,9 @@ describe('the same input gives the same bytes', () => {
   }
 
   test.each(['text', 'json'])('as %s, however many recipes are worked on at a time', (format) => {
-    const [one, two, three] = [1, 2, 3].map((jobs) => regimen(['check', many, '--format', format, '--jobs', String(jobs)]));
+    const [one, two, three] = [1, 2, 3].map((jobs) =>
+      regimen(['check', many, '--format', format, '--jobs', String(jobs)]),
+    );
     expect(one).toMatchObject({ code: 1, err: '' });
     expect(two).toEqual(one);
     expect(three).toEqual(one);
@@ -90,7 +98,12 @@ describe('the same input gives the same bytes', () => {
   test('in whatever order and however often the paths are named', () => {
     const recipes = join(DEMO, 'recipes');
     const once = regimen(['check', join(recipes, 'etch'), join(recipes, 'sputter')]);
-    const again = regimen(['check', join(recipes, 'sputter'), join(recipes, 'etch'), join(recipes, 'etch/via-etch.yaml')]);
+    const again = regimen([
+      'check',
+      join(recipes, 'sputter'),
+      join(recipes, 'etch'),
+      join(recipes, 'etch/via-etch.yaml'),
+    ]);
     expect(again).toEqual(once);
   });
 });

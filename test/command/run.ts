@@ -21,20 +21,23 @@ export interface Setting {
   readonly cwd?: string;
   readonly input?: string;
   readonly env?: Readonly<Record<string, string>>;
+  readonly uid?: number;
 }
 
 /** Runs the built command as a user does. Colour variables of whoever runs the tests are taken away. */
-export function regimen(args: readonly string[], { cwd, input, env = {} }: Setting = {}): Ended {
-  const { NO_COLOR: _no, FORCE_COLOR: _force, ...plain } = process.env;
+export function regimen(args: readonly string[], { cwd, input, env = {}, uid }: Setting = {}): Ended {
   const { status, stdout, stderr } = spawnSync(process.execPath, [COMMAND, ...args], {
     cwd,
     input,
-    env: { ...plain, ...env },
+    env: { ...PLAIN, ...env },
+    ...(uid === undefined ? {} : { uid }),
     encoding: 'utf8',
     maxBuffer: 2 ** 28,
   });
   return { code: status, out: stdout, err: stderr };
 }
+
+const PLAIN = Object.fromEntries(Object.entries(process.env).filter(([name]) => !/^(NO|FORCE)_COLOR$/.test(name)));
 
 const made: string[] = [];
 
@@ -59,7 +62,10 @@ export function clearFolders(): void {
 /** A recipe on the starter's chamber that checks clean. */
 export const SOUND = STARTER_RECIPE;
 /** One whose settling is far too short, which is graded error. */
-export const FAILING = SOUND.replace('name: titanium-seed', 'name: hasty').replace('time: 10 s', 'time: 0.05 s +/- 1 %');
+export const FAILING = SOUND.replace('name: titanium-seed', 'name: hasty').replace(
+  'time: 10 s',
+  'time: 0.05 s +/- 1 %',
+);
 /** One with a misspelt unit in line and column. */
 export const BROKEN = SOUND.replace('name: titanium-seed', 'name: misspelt').replace('time: 10 s', 'time: 10 sec.');
 

@@ -31,7 +31,9 @@ test('start overwrites nothing and then leaves nothing behind', () => {
   const cwd = folderWith({ 'recipes/titanium-seed.yaml': 'mine\n' });
   const { code, out, err } = regimen(['start', '.'], { cwd });
   expect({ code, out }).toEqual({ code: 2, out: '' });
-  expect(err).toBe('regimen: recipes/titanium-seed.yaml: not written, a file of that name is there; choose another path\n');
+  expect(err).toBe(
+    'regimen: recipes/titanium-seed.yaml: not written, a file of that name is there; choose another path\n',
+  );
   expect(readdirSync(cwd)).toEqual(['recipes']);
   expect(readFileSync(join(cwd, 'recipes/titanium-seed.yaml'), 'utf8')).toBe('mine\n');
 });

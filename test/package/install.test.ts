@@ -33,10 +33,13 @@ describe('the installed package', () => {
   });
 
   test('holds the program, its types, the schemas and the licences, and no source', () => {
-    expect(readdirSync(installed).sort()).toEqual(expect.arrayContaining(['LICENSE', 'dist', 'package.json', 'schemas']));
+    expect(readdirSync(installed).sort()).toEqual(
+      expect.arrayContaining(['LICENSE', 'dist', 'package.json', 'schemas']),
+    );
     expect(readdirSync(installed)).not.toContain('src');
     const licences = readFileSync(join(installed, 'dist/licenses.txt'), 'utf8');
-    for (const name of ['commander', 'yaml', 'chalk']) expect(licences).toMatch(new RegExp(`^${name} \\d+\\.\\d+\\.\\d+ \\((MIT|ISC)\\)$`, 'm'));
+    for (const name of ['commander', 'yaml', 'chalk'])
+      expect(licences).toMatch(new RegExp(`^${name} \\d+\\.\\d+\\.\\d+ \\((MIT|ISC)\\)$`, 'm'));
   });
 
   test('has a command that can be executed', () => {
@@ -64,9 +67,22 @@ describe('the library', () => {
 
   test('has types that another project compiles against', () => {
     writeFileSync(join(home, 'use.ts'), TYPED);
-    const options = ['--strict', '--noEmit', '--target', 'es2023', '--module', 'nodenext', '--moduleResolution', 'nodenext', '--types', 'node'];
+    const options = [
+      '--strict',
+      '--noEmit',
+      '--target',
+      'es2023',
+      '--module',
+      'nodenext',
+      '--moduleResolution',
+      'nodenext',
+      '--types',
+      'node',
+    ];
     const roots = ['--typeRoots', resolve('node_modules/@types')];
-    expect(run(process.execPath, [resolve('node_modules/typescript/bin/tsc'), ...options, ...roots, 'use.ts'])).toBe('');
+    expect(run(process.execPath, [resolve('node_modules/typescript/bin/tsc'), ...options, ...roots, 'use.ts'])).toBe(
+      '',
+    );
   });
 });
 

@@ -8,6 +8,7 @@ import * as lengths from '../../src/quantities/lengths.ts';
 import * as regime from '../../src/quantities/regime.ts';
 import * as residual from '../../src/quantities/residual.ts';
 import * as surfaces from '../../src/quantities/surfaces.ts';
+import * as thermalisation from '../../src/quantities/thermalisation.ts';
 import * as transport from '../../src/quantities/transport.ts';
 import { assumedAddresses, assumedGiven } from '../../src/quantities/assumed.ts';
 import { allQuantities, quantityNamed } from '../../src/quantities/catalogue.ts';
@@ -15,7 +16,19 @@ import { parseReference } from '../../src/quantities/reference.ts';
 import { DIMENSIONS, isDimension } from '../../src/units/dimensions.ts';
 import { unitsOf } from '../../src/units/lookup.ts';
 
-const TOPICS = [gas, collisions, transport, lengths, flow, regime, surfaces, residual, emittedAtoms, equipment];
+const TOPICS = [
+  gas,
+  collisions,
+  transport,
+  lengths,
+  flow,
+  regime,
+  surfaces,
+  residual,
+  emittedAtoms,
+  thermalisation,
+  equipment,
+];
 
 describe('every number of the catalogue', () => {
   test('says what it is, by which law, with a symbol', () => {
@@ -36,8 +49,9 @@ describe('every number of the catalogue', () => {
   });
 
   test('has an id of its own, over all topics', () => {
-    const ids = TOPICS.flatMap((topic) => Object.values(topic)).flatMap((one) =>
-      typeof one === 'object' && 'id' in one && 'from' in one ? [one.id] : [],
+    const exported = TOPICS.flatMap((topic): readonly unknown[] => Object.values(topic));
+    const ids = exported.flatMap((one) =>
+      typeof one === 'object' && one !== null && 'id' in one && 'from' in one ? [one.id] : [],
     );
     expect(new Set(ids).size).toBe(ids.length);
     expect(ids.length).toBe(allQuantities().length);

@@ -3,7 +3,13 @@ import { expect, test } from 'vitest';
 import { parseReference, referenceName } from '../../src/quantities/reference.ts';
 
 test('a name of a number is read and spelled the same', () => {
-  for (const name of ['knudsen.gap', 'mean-free-path:SiH4', 'diffusivity:SiH4/N2', 'carry-over:O2@end', 'knudsen.throw:target']) {
+  for (const name of [
+    'knudsen.gap',
+    'mean-free-path:SiH4',
+    'diffusivity:SiH4/N2',
+    'carry-over:O2@end',
+    'knudsen.throw:target',
+  ]) {
     const reference = parseReference(name);
     expect(reference, name).toBeDefined();
     if (reference !== undefined) expect(referenceName(reference)).toBe(name);

@@ -40,7 +40,8 @@ export function stepOf(step: string, chamber = CHAMBER, head = ''): StepRun {
   if (site.value === undefined) throw new Error('the site can not be opened');
   const run = openRun(site.value, new Source('recipe.yaml', recipe));
   const [fault] = [...site.faults, ...run.faults];
-  if (fault !== undefined) throw new Error(`${fault.place.file}:${fault.place.line}:${fault.place.column} ${fault.found}: ${fault.right}`);
+  if (fault !== undefined)
+    throw new Error(`${fault.place.file}:${fault.place.line}:${fault.place.column} ${fault.found}: ${fault.right}`);
   const [first] = run.value?.steps ?? [];
   if (first === undefined) throw new Error('the recipe has no step');
   return first;

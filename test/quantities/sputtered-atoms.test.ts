@@ -105,7 +105,9 @@ describe('atoms slow down', () => {
   });
 
   test('an atom that leaves as slow as the gas has no way to slow down on', () => {
-    expect(sputter('Cu', { energy: '0.03 eV' }).read({ id: 'thermalisation-distance', of: 'target' }).kind).toBe('inapplicable');
+    expect(sputter('Cu', { energy: '0.03 eV' }).read({ id: 'thermalisation-distance', of: 'target' }).kind).toBe(
+      'inapplicable',
+    );
   });
 });
 
@@ -140,7 +142,9 @@ melts: { al: { material: Al, throw: 500 mm } }
 
   test('fly as thermal atoms where the melt’s temperature is not given, and are open where it is unknown', () => {
     const cold = evaporate({ throttle: 'open', flows: '{}' });
-    expect(cold.read({ id: 'emitted-free-path', of: 'melt' })).toEqual(cold.read({ id: 'thermal-atom-path', of: 'melt' }));
+    expect(cold.read({ id: 'emitted-free-path', of: 'melt' })).toEqual(
+      cold.read({ id: 'thermal-atom-path', of: 'melt' }),
+    );
     const unknown = evaporate({ throttle: 'open', flows: '{}', melts: '{ al: { temperature: unknown } }' });
     expect(unknown.read({ id: 'knudsen', length: 'throw', of: 'melt' })).toEqual({
       kind: 'missing',
@@ -151,12 +155,16 @@ melts: { al: { material: Al, throw: 500 mm } }
 
 test('a faster atom has a longer path and a longer way', () => {
   fc.assert(
-    fc.property(fc.double({ min: 0.5, max: 20, noNaN: true }), fc.constantFrom('Al', 'Ti', 'Cu', 'W'), (energy, material) => {
-      const [slow, fast] = [energy, energy * 1.5].map((one) => sputter(material, { energy: `${one.toFixed(6)} eV` }));
-      if (slow === undefined || fast === undefined) throw new Error('no run');
-      expect(ofTarget(fast, 'fast-free-path')).toBeGreaterThan(ofTarget(slow, 'fast-free-path'));
-      expect(ofTarget(fast, 'thermalisation-distance')).toBeGreaterThan(ofTarget(slow, 'thermalisation-distance'));
-    }),
+    fc.property(
+      fc.double({ min: 0.5, max: 20, noNaN: true }),
+      fc.constantFrom('Al', 'Ti', 'Cu', 'W'),
+      (energy, material) => {
+        const [slow, fast] = [energy, energy * 1.5].map((one) => sputter(material, { energy: `${one.toFixed(6)} eV` }));
+        if (slow === undefined || fast === undefined) throw new Error('no run');
+        expect(ofTarget(fast, 'fast-free-path')).toBeGreaterThan(ofTarget(slow, 'fast-free-path'));
+        expect(ofTarget(fast, 'thermalisation-distance')).toBeGreaterThan(ofTarget(slow, 'thermalisation-distance'));
+      },
+    ),
     { numRuns: 30 },
   );
 });

@@ -102,7 +102,10 @@ describe('mixtures', () => {
     const sum = (['He', 'Ar'] as const).reduce((total, partner) => {
       const pair = partner === 'Ar' ? 'Ar/He' : 'He/He';
       const [share, mass] = partner === 'Ar' ? [0.7, 39.95] : [0.3, 4.0026];
-      return total + share * density * Math.PI * value(mixed, `collision-diameter:${pair}`) ** 2 * Math.sqrt(1 + 4.0026 / mass);
+      return (
+        total +
+        share * density * Math.PI * value(mixed, `collision-diameter:${pair}`) ** 2 * Math.sqrt(1 + 4.0026 / mass)
+      );
     }, 0);
     expectNear(value(mixed, 'mean-free-path:He'), 1 / sum, 1e-5, 'λ of He');
   });
@@ -116,13 +119,16 @@ describe('free paths and arrivals', () => {
     ['Ar', 72.2e-9, 0.03],
     ['O2', 73.6e-9, 0.03],
     ['He', 200e-9, 0.046],
-  ])('%s at 25 degC and 100 kPa has the path of the CRC Handbook within twice the accuracy of the data', (gas, path, tolerance) => {
-    const one = run({ pressure: '100 kPa', flows: `{ ${gas}: 100 sccm }`, temperatures: '{ gas: 25 degC }' });
-    expectNear(value(one, 'mean-free-path'), path, tolerance, gas);
-    expectNear(value(one, `mean-free-path:${gas}`), value(one, 'mean-free-path'), 1e-12, 'mixture of one');
-    const stated = one.uncertainty({ id: 'mean-free-path' }) / value(one, 'mean-free-path');
-    expect(2 * stated).toBeGreaterThan(Math.abs(value(one, 'mean-free-path') / path - 1));
-  });
+  ])(
+    '%s at 25 degC and 100 kPa has the path of the CRC Handbook within twice the accuracy of the data',
+    (gas, path, tolerance) => {
+      const one = run({ pressure: '100 kPa', flows: `{ ${gas}: 100 sccm }`, temperatures: '{ gas: 25 degC }' });
+      expectNear(value(one, 'mean-free-path'), path, tolerance, gas);
+      expectNear(value(one, `mean-free-path:${gas}`), value(one, 'mean-free-path'), 1e-12, 'mixture of one');
+      const stated = one.uncertainty({ id: 'mean-free-path' }) / value(one, 'mean-free-path');
+      expect(2 * stated).toBeGreaterThan(Math.abs(value(one, 'mean-free-path') / path - 1));
+    },
+  );
 
   test('the path goes as 1/p down to high vacuum: N2 at 1e-6 Torr flies some 50 m', () => {
     const one = run({ pressure: '1e-6 Torr', flows: '{ N2: 1 sccm }', temperatures: '{ gas: 25 degC }' });
@@ -167,8 +173,8 @@ describe('leak, residual gas and inlet', () => {
     const plate = run({ pressure: '2.5 Torr', flows: '{ N2: 400 sccm }' });
     const [p, up] = [2.5 * TORR, value(plate, 'plenum-pressure:plate')];
     const mean = (p + up) / 2;
-    const viscous = (Math.PI * (5e-4) ** 4 * mean) / (128 * 17.6e-6 * 8e-3);
-    const molecular = ((5e-4) ** 3 / 8e-3 / 6) * Math.sqrt((2 * Math.PI * K * 293.15) / 4.6518e-26);
+    const viscous = (Math.PI * 5e-4 ** 4 * mean) / (128 * 17.6e-6 * 8e-3);
+    const molecular = (5e-4 ** 3 / 8e-3 / 6) * Math.sqrt((2 * Math.PI * K * 293.15) / 4.6518e-26);
     // Knudsen's factor before the molecular part lies between 0.81 and 1; the holes' ends, not counted here, add a few percent.
     const drop = (400 * SCCM * K * 293.15) / 520 / (viscous + 0.81 * molecular);
     expectNear(up - p, drop, 0.1, 'drop');

@@ -19,7 +19,17 @@ test('the built-in processes are all there', () => {
   expect(PROCESSES.map(({ name }) => name).sort()).toEqual(
     [
       ...['chamber-fit', 'evaporation', 'evaporation-reactive', 'idle', 'load', 'pecvd', 'pecvd-low-pressure', 'purge'],
-      ...['ramp', 'season', 'settle', 'soak', 'sputter', 'sputter-line-of-sight', 'sputter-thermalised', 'unassessed', 'vent'],
+      ...[
+        'ramp',
+        'season',
+        'settle',
+        'soak',
+        'sputter',
+        'sputter-line-of-sight',
+        'sputter-thermalised',
+        'unassessed',
+        'vent',
+      ],
     ].sort(),
   );
 });

@@ -2,11 +2,16 @@ import { describe, expect, test } from 'vitest';
 import { judged, PLOVER, step, type Trial } from './trial.ts';
 
 const CHAMBER: Trial = {
-  chamber: PLOVER.replace('  SiH4:', '  diluted: { brings: { SiH4: 2 %, N2: rest }, full_scale: 2 slm }\n  NH3: { full_scale: 500 sccm }\n  SiH4:'),
+  chamber: PLOVER.replace(
+    '  SiH4:',
+    '  diluted: { brings: { SiH4: 2 %, N2: rest }, full_scale: 2 slm }\n  NH3: { full_scale: 500 sccm }\n  SiH4:',
+  ),
 };
 
 function cautions(...flows: readonly string[]) {
-  const steps = flows.map((one, index) => step('soak', `time: 60 s, pressure: 100 mTorr, flows: { ${one} }`, `step-${String(index)}`));
+  const steps = flows.map((one, index) =>
+    step('soak', `time: 60 s, pressure: 100 mTorr, flows: { ${one} }`, `step-${String(index)}`),
+  );
   return judged(steps.join('\n'), CHAMBER).cautions;
 }
 
@@ -34,7 +39,9 @@ describe('cautions', () => {
   test('count a flow that nobody knows, and not one that is shut', () => {
     expect(cautions('H2: unknown, O2: 100 sccm')[0]).toMatchObject({ kind: 'fuel-with-oxidiser' });
     expect(cautions('H2: 0 sccm, O2: 100 sccm').map((one) => one.kind)).toEqual(['hazard']);
-    expect(cautions('H2: { from: 0 sccm, to: 100 sccm }, O2: 100 sccm')[0]).toMatchObject({ kind: 'fuel-with-oxidiser' });
+    expect(cautions('H2: { from: 0 sccm, to: 100 sccm }, O2: 100 sccm')[0]).toMatchObject({
+      kind: 'fuel-with-oxidiser',
+    });
   });
 
   test('are silent for gases without hazards', () => {

@@ -33,7 +33,11 @@ describe('a value against a bound', () => {
   test('a bound may have both sides, and the side that is crossed decides', () => {
     const both = { at_least: { warning: 0.1, error: 0.02 }, at_most: { note: 0.95, error: 1 } };
     expect(hold(0.5, 0, both).kind).toBe('pass');
-    expect(hold(0.03, 0, both)).toMatchObject({ kind: 'fail', level: 'warning', limit: { side: 'at_least', value: 0.1 } });
+    expect(hold(0.03, 0, both)).toMatchObject({
+      kind: 'fail',
+      level: 'warning',
+      limit: { side: 'at_least', value: 0.1 },
+    });
     expect(hold(0.97, 0, both)).toMatchObject({ kind: 'fail', level: 'note', limit: { side: 'at_most', value: 0.95 } });
     expect(hold(1.2, 0, both)).toMatchObject({ kind: 'fail', level: 'error', limit: { side: 'at_most', value: 1 } });
   });

@@ -17,11 +17,14 @@ function deposit(process: string, pressure: string, film: string, flow = '200 sc
 }
 
 describe('sputter', () => {
-  test.each(['Al', 'Ti', 'Cu', 'Ta', 'W'])('%s over 60 mm at 5 to 10 mTorr is an ordinary window and stays silent', (metal) => {
-    for (const pressure of ['5 mTorr', '7.5 mTorr', '10 mTorr']) {
-      expect(findings(judged(deposit('sputter', pressure, metal), target(metal))), pressure).toEqual([]);
-    }
-  });
+  test.each(['Al', 'Ti', 'Cu', 'Ta', 'W'])(
+    '%s over 60 mm at 5 to 10 mTorr is an ordinary window and stays silent',
+    (metal) => {
+      for (const pressure of ['5 mTorr', '7.5 mTorr', '10 mTorr']) {
+        expect(findings(judged(deposit('sputter', pressure, metal), target(metal))), pressure).toEqual([]);
+      }
+    },
+  );
 
   test('atoms that are thermal long before they arrive fail', () => {
     const one = verdict('sputter/energetic-arrival', deposit('sputter', '80 mTorr', 'Ti', '400 sccm'));
@@ -57,7 +60,10 @@ describe('line of sight', () => {
 
   test('the same throw at 5 mTorr fails', () => {
     const high = deposit('sputter-line-of-sight', '5 mTorr', 'Ti');
-    expect(verdict('sputter-line-of-sight/free-throw', high, target('Ti', '300 mm'))).toMatchObject({ kind: 'fail', level: 'error' });
+    expect(verdict('sputter-line-of-sight/free-throw', high, target('Ti', '300 mm'))).toMatchObject({
+      kind: 'fail',
+      level: 'error',
+    });
   });
 
   test('heavy atoms keep their line through collisions: tungsten passes at a Knudsen number below one', () => {
@@ -85,11 +91,17 @@ describe('residual gas', () => {
   const at = (base: string): Trial => ({ chamber: PLOVER.replace('1e-7 Torr', base) });
 
   test('a film of ordinary rate on a base of 1e-6 Torr stays silent', () => {
-    expect(findings(judged(deposit('sputter', '5 mTorr', 'Ti', '400 sccm', '200 nm/min'), at('1e-6 Torr')))).toEqual([]);
+    expect(findings(judged(deposit('sputter', '5 mTorr', 'Ti', '400 sccm', '200 nm/min'), at('1e-6 Torr')))).toEqual(
+      [],
+    );
   });
 
   test('a slow film behind a throttle on the same base is called impure, on assumed water', () => {
-    const one = verdict('sputter/clean-film', deposit('sputter', '10 mTorr', 'Ti', '60 sccm', '20 nm/min'), at('1e-6 Torr'));
+    const one = verdict(
+      'sputter/clean-film',
+      deposit('sputter', '10 mTorr', 'Ti', '60 sccm', '20 nm/min'),
+      at('1e-6 Torr'),
+    );
     expect(one.kind).toBe('fail');
     expect(one.assumed.map(({ address }) => address)).toContain('assumed.residual.H2O');
   });
@@ -103,10 +115,15 @@ describe('residual gas', () => {
 
 describe('evaporation', () => {
   const lift = (pressure: string, more = '') =>
-    step('evaporation', `time: 60 s, ${pressure}, melts: { al: { temperature: 1250 degC } }, surface: { grows: Al, rate: 2 nm/s }${more}`);
+    step(
+      'evaporation',
+      `time: 60 s, ${pressure}, melts: { al: { temperature: 1250 degC } }, surface: { grows: Al, rate: 2 nm/s }${more}`,
+    );
 
   test('over 500 mm at 1e-6 Torr is silent', () => {
-    expect(findings(judged(lift('throttle: open, flows: {}'), { chamber: PLOVER.replace('1e-7', '1e-6') }))).toEqual([]);
+    expect(findings(judged(lift('throttle: open, flows: {}'), { chamber: PLOVER.replace('1e-7', '1e-6') }))).toEqual(
+      [],
+    );
   });
 
   test('at 1 mTorr atoms collide on their way', () => {
@@ -173,7 +190,9 @@ describe('purge and settle', () => {
     const small: Trial = {
       chamber: PLOVER.replace('diameter: 400 mm', 'volume: 3 cm3, diameter: 400 mm').replace('2 L/s', '0.1 L/s'),
     };
-    expect(findings(judged(step('purge', 'time: 0.5 s, pressure: 1 Torr, flows: { N2: 100 sccm }'), small))).toEqual([]);
+    expect(findings(judged(step('purge', 'time: 0.5 s, pressure: 1 Torr, flows: { N2: 100 sccm }'), small))).toEqual(
+      [],
+    );
   });
 
   test('a purge without gas is none', () => {

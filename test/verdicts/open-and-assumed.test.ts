@@ -5,15 +5,21 @@ const FILM = 'surface: { grows: Ti, rate: 120 nm/min }';
 
 describe('an open verdict', () => {
   test('names every setpoint that would supply its number at once, at the gravest grade', () => {
-    const all = verdicts(step('sputter-line-of-sight', `time: 60 s, pressure: unknown, flows: { Ar: unknown }, ${FILM}`), {
-      chamber: PLOVER.replace('  wti: { material: { W: 70 %, Ti: rest }, throw: 60 mm, generator: magnetron }\n', ''),
-    });
+    const all = verdicts(
+      step('sputter-line-of-sight', `time: 60 s, pressure: unknown, flows: { Ar: unknown }, ${FILM}`),
+      {
+        chamber: PLOVER.replace('  wti: { material: { W: 70 %, Ti: rest }, throw: 60 mm, generator: magnetron }\n', ''),
+      },
+    );
     expect(all.get('sputter-line-of-sight/free-throw')).toMatchObject({
       kind: 'open',
       level: 'error',
       needs: ['flows.Ar', 'pressure'],
     });
-    expect(all.get('sputter-line-of-sight/clean-film')).toMatchObject({ kind: 'open', needs: ['flows.Ar', 'pressure'] });
+    expect(all.get('sputter-line-of-sight/clean-film')).toMatchObject({
+      kind: 'open',
+      needs: ['flows.Ar', 'pressure'],
+    });
   });
 
   test('has no value and rests on nothing', () => {
@@ -27,7 +33,10 @@ describe('an open verdict', () => {
     const energy = (energyOf: string) =>
       verdict(
         'sputter/energetic-arrival',
-        step('sputter', `time: 60 s, pressure: 5 mTorr, flows: { Ar: 100 sccm }, targets: { ti: { energy: ${energyOf} } }, ${FILM}`),
+        step(
+          'sputter',
+          `time: 60 s, pressure: 5 mTorr, flows: { Ar: 100 sccm }, targets: { ti: { energy: ${energyOf} } }, ${FILM}`,
+        ),
       );
     expect(energy('unknown')).toMatchObject({ kind: 'open', needs: ['targets.ti.energy'] });
     expect(energy('8 eV').kind).toBe('pass');
@@ -48,7 +57,10 @@ describe('what does not apply', () => {
   });
 
   test('without a wafer nothing takes up the feed', () => {
-    const bare = step('pecvd', 'time: 60 s, pressure: 2 Torr, flows: { SiH4: 80 sccm }, wafer: none, surface: { grows: SiO2, rate: 100 nm/min }');
+    const bare = step(
+      'pecvd',
+      'time: 60 s, pressure: 2 Torr, flows: { SiH4: 80 sccm }, wafer: none, surface: { grows: SiO2, rate: 100 nm/min }',
+    );
     expect(verdict('pecvd/ample-feed', bare)).toMatchObject({
       kind: 'notApplicable',
       because: 'no wafer is in the chamber',
@@ -57,15 +69,19 @@ describe('what does not apply', () => {
 });
 
 describe('steps whose process assumes nothing', () => {
-  test.each(['unassessed', 'soak', 'ramp', 'load', 'vent', 'season'])('%s is judged by what the chamber can do alone', (process) => {
-    const why = process === 'unassessed' ? 'reason: "to come", ' : '';
-    const judgement = judged(step(process, `${why}time: 60 s, pressure: 5 mTorr, flows: { Ar: 100 sccm }`));
-    const judgedBy = new Set(judgement.steps[0]?.verdicts.map((one) => one.process));
-    expect([...judgedBy]).toEqual(['chamber-fit']);
-  });
+  test.each(['unassessed', 'soak', 'ramp', 'load', 'vent', 'season'])(
+    '%s is judged by what the chamber can do alone',
+    (process) => {
+      const why = process === 'unassessed' ? 'reason: "to come", ' : '';
+      const judgement = judged(step(process, `${why}time: 60 s, pressure: 5 mTorr, flows: { Ar: 100 sccm }`));
+      const judgedBy = new Set(judgement.steps[0]?.verdicts.map((one) => one.process));
+      expect([...judgedBy]).toEqual(['chamber-fit']);
+    },
+  );
 
   test('without anything that the chamber states, nothing is judged', () => {
-    const bare = 'regimen: chamber 1\nname: plover\nbody: { diameter: 400 mm, height: 250 mm, flow: mixed }\ngas_lines: { Ar: { } }\n';
+    const bare =
+      'regimen: chamber 1\nname: plover\nbody: { diameter: 400 mm, height: 250 mm, flow: mixed }\ngas_lines: { Ar: { } }\n';
     const judgement = judged(step('soak', 'time: 60 s, pressure: 5 mTorr, flows: { Ar: 100 sccm }'), { chamber: bare });
     const kinds = new Set(judgement.steps[0]?.verdicts.map(({ kind }) => kind));
     expect([...kinds]).toEqual(['notApplicable']);
@@ -77,7 +93,10 @@ describe('a verdict near its bound', () => {
   const plasma = (pressure: string, gas = '') =>
     verdict(
       'pecvd/collisional-gap',
-      step('pecvd', `time: 60 s, pressure: ${pressure}, flows: { Ar: 100 sccm }, lengths: { gap: 20 mm }, power: { magnetron: 300 W }, temperatures: { ${gas} }`),
+      step(
+        'pecvd',
+        `time: 60 s, pressure: ${pressure}, flows: { Ar: 100 sccm }, lengths: { gap: 20 mm }, power: { magnetron: 300 W }, temperatures: { ${gas} }`,
+      ),
       { chamber: PLOVER.replace('melts: { al: { material: Al, throw: 500 mm } }\n', '') },
     );
 
@@ -102,21 +121,30 @@ describe('a verdict near its bound', () => {
   test('fails at the grade that is sure and says that a graver one may be', () => {
     const one = verdict(
       'sputter-line-of-sight/free-throw',
-      step('sputter-line-of-sight', `time: 60 s, pressure: 1 Pa, flows: { Ar: 200 sccm }, targets: { ti: { voltage: 500 V } }, ${FILM}`),
+      step(
+        'sputter-line-of-sight',
+        `time: 60 s, pressure: 1 Pa, flows: { Ar: 200 sccm }, targets: { ti: { voltage: 500 V } }, ${FILM}`,
+      ),
     );
     expect(one).toMatchObject({ kind: 'fail', level: 'warning', perhaps: 'error' });
     expect(one.uncertainty).toBeGreaterThan((one.value ?? NaN) - 0.3);
   });
 
   test('has a margin: the factor to the limit that decides', () => {
-    const one = verdict('chamber-fit/reach-low', step('soak', 'time: 1 s, pressure: 10 mTorr, flows: { Ar: 100 sccm }'));
+    const one = verdict(
+      'chamber-fit/reach-low',
+      step('soak', 'time: 1 s, pressure: 10 mTorr, flows: { Ar: 100 sccm }'),
+    );
     expect(one.margin).toBeCloseTo(1 / (one.value ?? NaN), 9);
   });
 });
 
 describe('the site’s coverage factor', () => {
   test('widens what is uncertain', () => {
-    const text = step('sputter', `time: 60 s, pressure: 5 mTorr, flows: { Ar: 200 sccm }, targets: { ti: { voltage: 500 V } }, ${FILM}`);
+    const text = step(
+      'sputter',
+      `time: 60 s, pressure: 5 mTorr, flows: { Ar: 200 sccm }, targets: { ti: { voltage: 500 V } }, ${FILM}`,
+    );
     const of = (trial: Trial) => verdict('sputter/energetic-arrival', text, trial).uncertainty ?? NaN;
     expect(of({ site: 'show: { coverage_factor: 3 }\n' }) / of({})).toBeCloseTo(1.5, 9);
   });

@@ -45,7 +45,10 @@ export interface Tried {
 }
 
 /** Judges a recipe of these steps (the items of the list) on a chamber called plover. */
-export function tried(steps: string, { chamber = PLOVER, site = '', files = {}, head = '', today = '2026-06-01' }: Trial = {}): Tried {
+export function tried(
+  steps: string,
+  { chamber = PLOVER, site = '', files = {}, head = '', today = '2026-06-01' }: Trial = {},
+): Tried {
   const siteText = `regimen: site 1\nname: marsh\nchambers: [plover.yaml]\nprocesses: [processes/*.yaml]\nsubstances: [substances/*.yaml]\n${site}`;
   const shelf = mapShelf(new Map(Object.entries({ 'regimen.yaml': siteText, 'plover.yaml': chamber, ...files })));
   const opened = openSite(shelf, '.');
@@ -96,5 +99,7 @@ export function step(process: string, keys: string, name = 'one'): string {
 }
 
 export function told(faults: readonly Fault[]): string {
-  return faults.map(({ place, found, right }) => `${place.file}:${place.line}:${place.column} ${found}: ${right}`).join('\n');
+  return faults
+    .map(({ place, found, right }) => `${place.file}:${place.line}:${place.column} ${found}: ${right}`)
+    .join('\n');
 }

@@ -8,7 +8,10 @@ interface Terms {
   readonly holdsTo?: string;
 }
 
-function waiver({ assumption = 'energetic-arrival', until = '2026-12-31', holdsTo = '' }: Terms = {}, indent = '      '): string {
+function waiver(
+  { assumption = 'energetic-arrival', until = '2026-12-31', holdsTo = '' }: Terms = {},
+  indent = '      ',
+): string {
   const limit = holdsTo === '' ? '' : `\n${indent}  holds_to: ${holdsTo}`;
   return `${indent}- assumption: ${assumption}${limit}
 ${indent}  reason: "Qualified on lot 41."
@@ -65,9 +68,14 @@ describe('a waiver', () => {
 
   test('holds down to the value for which it was granted, of a lower bound', () => {
     const line = (holdsTo: string) =>
-      byName(judged(film(waiver({ assumption: 'free-throw', holdsTo }), { pressure: '10 mTorr', process: 'sputter-line-of-sight' }))).get(
-        'sputter-line-of-sight/free-throw',
-      );
+      byName(
+        judged(
+          film(waiver({ assumption: 'free-throw', holdsTo }), {
+            pressure: '10 mTorr',
+            process: 'sputter-line-of-sight',
+          }),
+        ),
+      ).get('sputter-line-of-sight/free-throw');
     const { value = NaN } = line('0.01') ?? {};
     expect(line('0.01')?.waived).toBeDefined();
     expect(line(String(value * 1.01))?.waived).toBeUndefined();
@@ -104,7 +112,9 @@ describe('a waiver', () => {
     const waived = judgement.steps.map(({ verdicts }) => verdicts.filter((one) => one.waived !== undefined).length);
     expect(waived).toEqual([1, 1]);
     expect(judgement.notes).toEqual([]);
-    expect(judged(film('', { pressure: '5 mTorr' }), { head }).notes.map(({ kind }) => kind)).toEqual(['waiver-unused']);
+    expect(judged(film('', { pressure: '5 mTorr' }), { head }).notes.map(({ kind }) => kind)).toEqual([
+      'waiver-unused',
+    ]);
   });
 
   test('of a name that the step does not have is a fault', () => {

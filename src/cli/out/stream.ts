@@ -24,7 +24,8 @@ export function stream(descriptor: number): Stream {
         writeAll(descriptor, text);
       } catch (error) {
         closed = true;
-        if (codeOf(error) !== 'EPIPE') throw new Error(`output cannot be written: ${codeOf(error) ?? 'unknown'}`, { cause: error });
+        if (codeOf(error) !== 'EPIPE')
+          throw new Error(`output cannot be written: ${codeOf(error) ?? 'unknown'}`, { cause: error });
       }
     },
   };
@@ -33,7 +34,7 @@ export function stream(descriptor: number): Stream {
 /** Writes a text to its end, however slowly it is taken. */
 export function writeAll(descriptor: number, text: string): void {
   const bytes = Buffer.from(text);
-  for (let at = 0; at < bytes.length; ) {
+  for (let at = 0; at < bytes.length;) {
     try {
       at += writeSync(descriptor, bytes, at);
     } catch (error) {
