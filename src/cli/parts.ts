@@ -6,7 +6,7 @@ import type { Job } from './recipe-files.ts';
 import type { Sites } from './sites.ts';
 
 /** Recipes from which on workers earn back what starting them costs. */
-const PAYS_FROM = 400;
+const PAYS_FROM = 1000;
 
 /** The parts of jobs, in their order. The first jobs are at hand already; whether workers pay is told by how many there are. */
 export async function* partsOf(

@@ -1,5 +1,3 @@
-import { BOLTZMANN } from './constants.ts';
-
 /**
  * Reactive atoms that arrive from the residual gas over the atoms of the film that grows.
  *

@@ -29,7 +29,8 @@ const ASSUMED: Readonly<Record<string, Assumption>> = {
     halfWidth: 0.5,
     dimension: 'fraction',
     unit: '',
-    because: 'gas between a wall and a wafer of another temperature: the middle of both, anything between them possible',
+    because:
+      'gas between a wall and a wafer of another temperature: the middle of both, anything between them possible',
   },
   'assumed.residual.H2O': {
     value: 1,
@@ -42,7 +43,8 @@ const ASSUMED: Readonly<Record<string, Assumption>> = {
     spread: 0.4,
     dimension: 'number',
     unit: '',
-    because: 'an emission energy anywhere in the sputter spectrum; standard uncertainty of its logarithm 0.4 (Thompson 1968)',
+    because:
+      'an emission energy anywhere in the sputter spectrum; standard uncertainty of its logarithm 0.4 (Thompson 1968)',
   },
   'accuracy.fast-path': {
     value: 1,

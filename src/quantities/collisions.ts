@@ -53,7 +53,10 @@ export const diffusionCrossSectionOf = quantity<PairArguments>({
   from: ({ of = '', length }, scope) => pairIngredients(of, length, scope, 'diffusion'),
   value: (diameterA, depthA, dipoleA, diameterB, depthB, dipoleB, temperature, accuracyA, accuracyB) => {
     const pair = combine(molecule(diameterA, depthA, dipoleA), molecule(diameterB, depthB, dipoleB));
-    return diffusionCrossSection(pair.diameter, pair.wellDepth, pair.polarity, temperature) / Math.sqrt(accuracyA * accuracyB);
+    return (
+      diffusionCrossSection(pair.diameter, pair.wellDepth, pair.polarity, temperature) /
+      Math.sqrt(accuracyA * accuracyB)
+    );
   },
   remarks: ({ of = '' }, scope, values) => pairRemarks(of, scope, values),
 });
@@ -72,8 +75,10 @@ export const meanFreePathOf = quantity<PathArguments>({
   id: 'mean-free-path',
   symbol: 'λ',
   dimension: 'length',
-  statement: 'Path between collisions: of one gas in the mixture; of the mixture the path flown by all molecules over the collisions they suffer.',
-  source: '1/Σ_j n_j π d_ij² sqrt(1 + m_i/m_j), Jeans; Chapman & Cowling 1970; hard spheres of the diameter that reproduces the viscosity',
+  statement:
+    'Path between collisions: of one gas in the mixture; of the mixture the path flown by all molecules over the collisions they suffer.',
+  source:
+    '1/Σ_j n_j π d_ij² sqrt(1 + m_i/m_j), Jeans; Chapman & Cowling 1970; hard spheres of the diameter that reproduces the viscosity',
   lengths: () => ['feature'],
   subjects: gasesOf,
   whole: true,
@@ -160,7 +165,9 @@ export function leftOut(scope: Scope): readonly string[] {
 }
 
 function leftOutRemarks(scope: Scope): readonly string[] {
-  return leftOut(scope).map((gas) => `${gas} has no collision values and is left out; its mole fraction counts as uncertainty`);
+  return leftOut(scope).map(
+    (gas) => `${gas} has no collision values and is left out; its mole fraction counts as uncertainty`,
+  );
 }
 
 /** The name of a pair, the same whichever gas comes first. */
@@ -210,7 +217,9 @@ function pairRemarks(pair: string, scope: Scope, values: PairArguments): readonl
   const reduced = temperature / Math.sqrt(depthA * depthB);
   const { from, to } = COLLISION_INTEGRAL_RANGE;
   if (reduced < from || reduced > to) {
-    remarks.push(`collision integrals of ${pair} are used outside their range, at a reduced temperature of ${reduced.toPrecision(3)}`);
+    remarks.push(
+      `collision integrals of ${pair} are used outside their range, at a reduced temperature of ${reduced.toPrecision(3)}`,
+    );
   }
   for (const gas of new Set(pair.split('/'))) {
     const estimated = scope.gas(gas)?.estimated;

@@ -42,7 +42,8 @@ export function readingOf(values: Values, node: Node): Reading {
 export function settle(values: Values, node: Node): Missing | Inapplicable | undefined {
   const { slot } = node;
   if (values.settled[slot] === true) return values.absent[slot];
-  const absent = values.origin !== undefined && !values.reaches(node) ? share(values, values.origin, node) : work(values, node);
+  const absent =
+    values.origin !== undefined && !values.reaches(node) ? share(values, values.origin, node) : work(values, node);
   values.settled[slot] = true;
   if (absent !== undefined) values.absent[slot] = absent;
   return absent;
@@ -76,7 +77,8 @@ function work(values: Values, node: Node): Missing | Inapplicable | undefined {
     case 'given':
       return workGiven(values, node);
     case 'constant':
-      return keep(values, node, node.value, false);
+      keep(values, node, node.value, false);
+      return undefined;
     case 'law':
       return workLaw(values, node);
     case 'same':
@@ -86,7 +88,7 @@ function work(values: Values, node: Node): Missing | Inapplicable | undefined {
   }
 }
 
-function keep(values: Values, { slot }: Node, value: number, uncertain: boolean): undefined {
+function keep(values: Values, { slot }: Node, value: number, uncertain: boolean): void {
   values.numbers[slot] = value;
   values.uncertain[slot] = uncertain;
 }
@@ -94,7 +96,8 @@ function keep(values: Values, { slot }: Node, value: number, uncertain: boolean)
 function workGiven(values: Values, node: Leaf): Missing | undefined {
   const given = values.givens.get(node.address) ?? node.fallback;
   if (given === undefined) return { kind: 'missing', needs: [node.address] };
-  return keep(values, node, given.value, given.uncertainty > 0);
+  keep(values, node, given.value, given.uncertainty > 0);
+  return undefined;
 }
 
 function workLaw(values: Values, node: Law): Missing | Inapplicable | undefined {
@@ -104,7 +107,8 @@ function workLaw(values: Values, node: Law): Missing | Inapplicable | undefined 
   const answer = quantity.value(argumentsOf(values, node));
   if (isAbsent(answer)) return named(values, node, answer);
   if (!Number.isFinite(answer)) return inapplicable(`${quantity.id} is undefined at these values`);
-  return keep(values, node, answer, quantity.nominal !== true && anyUncertain(values, node.inputs));
+  keep(values, node, answer, quantity.nominal !== true && anyUncertain(values, node.inputs));
+  return undefined;
 }
 
 /** A law that finds something missing does not know by which address; its entry does. */
@@ -118,7 +122,8 @@ function workSame(values: Values, node: Same): Missing | Inapplicable | undefine
   if (input === undefined) return inapplicable('it has no input');
   const absent = settle(values, input);
   if (absent !== undefined) return absent;
-  return keep(values, node, numberOf(values, input), node.quantity.nominal !== true && anyUncertain(values, node.inputs));
+  keep(values, node, numberOf(values, input), node.quantity.nominal !== true && anyUncertain(values, node.inputs));
+  return undefined;
 }
 
 function workChoice(values: Values, node: Choice): Missing | Inapplicable | undefined {
@@ -143,7 +148,8 @@ function workChoice(values: Values, node: Choice): Missing | Inapplicable | unde
   const input = node.inputs[chosen];
   if (input === undefined) return absences[0] ?? inapplicable('none of them applies');
   values.chosen[node.slot] = chosen;
-  return keep(values, node, worst, values.uncertain[input.slot] ?? false);
+  keep(values, node, worst, values.uncertain[input.slot] ?? false);
+  return undefined;
 }
 
 /** The first input that does not apply, else all that is missing, else nothing. */

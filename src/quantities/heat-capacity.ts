@@ -27,7 +27,10 @@ export function interpolatedHeatCapacity(
   const last = temperatures.length - 1;
   const first = temperatures[0] ?? NaN;
   if (temperature < first - 30 || temperature > (temperatures[last] ?? NaN)) return undefined;
-  const above = Math.max(1, temperatures.findIndex((at) => at >= temperature));
+  const above = Math.max(
+    1,
+    temperatures.findIndex((at) => at >= temperature),
+  );
   const [t0 = NaN, t1 = NaN] = [temperatures[above - 1], temperatures[above]];
   const [c0 = NaN, c1 = NaN] = [values[above - 1], values[above]];
   if (last === 0) return values[0];

@@ -112,7 +112,8 @@ export class StepRun implements Values {
   reaches(node: Node): boolean {
     const known = this.#reached[node.slot];
     if (known !== undefined) return known;
-    const reached = node.kind === 'given' ? this.#differs(node.address) : node.inputs.some((input) => this.reaches(input));
+    const reached =
+      node.kind === 'given' ? this.#differs(node.address) : node.inputs.some((input) => this.reaches(input));
     this.#reached[node.slot] = reached;
     return reached;
   }

@@ -78,17 +78,19 @@ function chain(
 /** Hands a slope on from a node to its inputs. */
 function pass(values: Values, node: Node, slope: number, onlyUncertain: boolean): void {
   // What a run shares with the one it comes from, inputs and all, was worked out there.
-  if (values.origin !== undefined && !values.reaches(node)) return pass(values.origin, node, slope, onlyUncertain);
-  if (node.kind === 'same') return add(node.inputs[0], slope);
+  if (values.origin !== undefined && !values.reaches(node)) pass(values.origin, node, slope, onlyUncertain);
+  else if (node.kind === 'law') passThroughLaw(values, node, slope, onlyUncertain);
+  else if (node.kind === 'same') add(node.inputs[0], slope);
   // The worst of several moves with the one that was chosen.
-  if (node.kind === 'choice') return add(node.inputs[values.chosen[node.slot] ?? -1], slope);
-  if (node.kind !== 'law') return;
+  else if (node.kind === 'choice') add(node.inputs[values.chosen[node.slot] ?? -1], slope);
+}
+
+function passThroughLaw(values: Values, node: Law, slope: number, onlyUncertain: boolean): void {
   const partials = partialsOf(values, node, onlyUncertain);
-  const { inputs } = node;
-  for (let index = 0; index < inputs.length; index++) {
-    const input = inputs[index];
+  for (let index = 0; index < partials.length; index++) {
+    const input = node.inputs[index];
     if (input === undefined || (onlyUncertain && values.uncertain[input.slot] !== true)) continue;
-    slopeTo[input.slot] = (slopeTo[input.slot] ?? 0) + slope * (partials[index] ?? 0);
+    add(input, slope * (partials[index] ?? 0));
   }
 }
 

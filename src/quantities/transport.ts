@@ -80,7 +80,8 @@ export const diffusivityOf = quantity<
   id: 'diffusivity',
   symbol: 'D',
   dimension: 'diffusivity',
-  statement: 'Diffusivity of a gas in the mixture, or of a pair, as in diffusivity:SiH4/N2; of a pure gas its self-diffusion.',
+  statement:
+    'Diffusivity of a gas in the mixture, or of a pair, as in diffusivity:SiH4/N2; of a pure gas its self-diffusion.',
   source: '(1 - x_i)/Σ_j x_j/D_ij, Wilke 1950 and Fairbanks & Wilke 1950; for a trace Blanc 1908',
   subjects: gasesOf,
   from: (reference, scope) => {
@@ -104,18 +105,20 @@ export const diffusivityOf = quantity<
   value: (own, others, diffusivities, self) => (own >= 1 ? self : diffusivityInMixture(own, others, diffusivities)),
 });
 
-export const heatCapacity = quantity<[temperature: number, temperatures: readonly number[], values: readonly number[]]>({
-  id: 'heat-capacity',
-  symbol: 'C_p',
-  dimension: 'heat-capacity',
-  statement: 'Molar heat capacity of a gas at constant pressure.',
-  source: 'interpolated between the published values of the gas',
-  subjects: gasesOf,
-  from: (reference, scope) => heatCapacityIngredients(gasOf(reference, scope), scope),
-  value: (temperature, temperatures, values) =>
-    interpolatedHeatCapacity(temperature, temperatures, values) ??
-    inapplicable('the temperature lies outside the published heat capacities'),
-});
+export const heatCapacity = quantity<[temperature: number, temperatures: readonly number[], values: readonly number[]]>(
+  {
+    id: 'heat-capacity',
+    symbol: 'C_p',
+    dimension: 'heat-capacity',
+    statement: 'Molar heat capacity of a gas at constant pressure.',
+    source: 'interpolated between the published values of the gas',
+    subjects: gasesOf,
+    from: (reference, scope) => heatCapacityIngredients(gasOf(reference, scope), scope),
+    value: (temperature, temperatures, values) =>
+      interpolatedHeatCapacity(temperature, temperatures, values) ??
+      inapplicable('the temperature lies outside the published heat capacities'),
+  },
+);
 
 export const gasConductivity = quantity<[mass: number, viscosity: number, heatCapacity: number]>({
   id: 'gas-conductivity',
@@ -145,7 +148,8 @@ export const thermalConductivityOf = quantity<
   symbol: 'κ',
   dimension: 'thermal-conductivity',
   statement: 'Thermal conductivity, of the mixture or of one of its gases.',
-  source: 'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas its gas-conductivity',
+  source:
+    'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas its gas-conductivity',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {

@@ -68,7 +68,9 @@ export class Givens implements ReadonlyMap<string, Given> {
 
   /** Those that change over the step or are set as a range. */
   spanned(): readonly Given[] {
-    const spanned: Given[] = spannedOf(this.#below).filter(({ address }) => this.get(address)?.span !== undefined && !this.#own.has(address));
+    const spanned: Given[] = spannedOf(this.#below).filter(
+      ({ address }) => this.get(address)?.span !== undefined && !this.#own.has(address),
+    );
     for (const given of this.#own.values()) if (given.span !== undefined) spanned.push(given);
     return spanned;
   }

@@ -1,12 +1,6 @@
 /** What kind of physical value something is. Within one dimension all values are held in its SI unit. */
 export type Dimension = keyof typeof FACTS;
 
-/**
- * What a schema may ask for: a dimension, or `accuracy`, which is a share of the reading or of full scale, or an absolute
- * value in the dimension of what it belongs to. An accuracy is read by `readAccuracy` and has no dimension of its own.
- */
-export type SchemaDimension = Dimension | 'accuracy';
-
 /** Where two or more dimensions are allowed, the first that has the unit holds. */
 export type Dimensions = Dimension | readonly Dimension[];
 

@@ -94,7 +94,10 @@ function gradesIn(dimension: Dimension, limits: GradedLimits, faults: Fault[]): 
 function numberNamed(name: string, place: Place, faults: Fault[]): Reference | undefined {
   const reference = parseReference(name);
   if (reference !== undefined && quantityNamed(reference.id) !== undefined) return reference;
-  const meant = nearest(reference?.id ?? name, allQuantities().map(({ id }) => id));
+  const meant = nearest(
+    reference?.id ?? name,
+    allQuantities().map(({ id }) => id),
+  );
   const right = meant === undefined ? 'name a number of the catalogue: regimen list quantities' : `write ${meant}`;
   faults.push({ place, found: `no number is named '${name}'`, right });
   return undefined;

@@ -50,13 +50,17 @@ function along(ramps: readonly Given[], fraction: number): readonly Change[] {
 function rangeCases(run: StepRun, spans: readonly Given[]): readonly Case[] {
   return spans.flatMap(({ address, span }) => {
     if (span?.kind !== 'range') return [];
-    return [
-      ...limitCase(run, address, 'at_least', span.atLeast),
-      ...limitCase(run, address, 'at_most', span.atMost),
-    ];
+    return [...limitCase(run, address, 'at_least', span.atLeast), ...limitCase(run, address, 'at_most', span.atMost)];
   });
 }
 
-function limitCase(run: StepRun, address: string, limit: 'at_least' | 'at_most', value: number | undefined): readonly Case[] {
-  return value === undefined ? [] : [{ run: run.with({ address, value }), instance: { kind: 'range', address, limit } }];
+function limitCase(
+  run: StepRun,
+  address: string,
+  limit: 'at_least' | 'at_most',
+  value: number | undefined,
+): readonly Case[] {
+  return value === undefined
+    ? []
+    : [{ run: run.with({ address, value }), instance: { kind: 'range', address, limit } }];
 }

@@ -14,15 +14,17 @@ export function judgeAssumption(assumption: Assumption, cases: readonly Case[], 
   const [usual] = cases;
   const references = usual === undefined ? [] : referencesOf(assumption.reference, usual.run);
   let worst: Finding | undefined;
+  let varies = false;
   for (const one of cases) {
     for (const reference of references) {
       // What a case moves may not reach the number: then it stands as it usually does.
       if (one !== usual && !one.run.reaches(one.run.plan.node(reference, assumption.over))) continue;
+      varies ||= one !== usual;
       const finding = find(assumption, reference, one, coverage);
       if (worst === undefined || graver(finding, worst)) worst = finding;
     }
   }
-  if (worst !== undefined) return verdictOf(assumption, worst);
+  if (worst !== undefined) return verdictOf(assumption, varies ? worst : { ...worst, of: { run: worst.of.run } });
   return { ...templateOf(assumption), because: 'the step has nothing that it speaks of' };
 }
 
@@ -126,7 +128,6 @@ function instanceOf({ instance }: Case): { instance?: Instance } {
 }
 
 const NOTHING = {};
-
 
 /** What every verdict on an assumption has. */
 const TEMPLATES = new WeakMap<Assumption, Verdict>();

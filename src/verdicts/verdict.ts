@@ -52,7 +52,12 @@ export interface Verdict {
   readonly assumed: readonly Assumed[];
   readonly cure: readonly string[];
   readonly place: Place;
-  readonly waived?: { readonly reason: string; readonly approved_by: string; readonly until: string; readonly holds_to?: number };
+  readonly waived?: {
+    readonly reason: string;
+    readonly approved_by: string;
+    readonly until: string;
+    readonly holds_to?: number;
+  };
 }
 
 export interface Assumed {
@@ -92,5 +97,14 @@ export interface FuelWithOxidiser {
 
 /** Something worth knowing that no assumption judges. Its words are made by the reports. */
 export type Note =
-  | { readonly kind: 'waiver-unused' | 'waiver-expired' | 'waiver-outgrown'; readonly step: string; readonly waiver: Waiver }
-  | { readonly kind: 'chamber-revision'; readonly qualifiedOn: string; readonly revision: string | undefined; readonly place: Place };
+  | {
+      readonly kind: 'waiver-unused' | 'waiver-expired' | 'waiver-outgrown';
+      readonly step: string;
+      readonly waiver: Waiver;
+    }
+  | {
+      readonly kind: 'chamber-revision';
+      readonly qualifiedOn: string;
+      readonly revision: string | undefined;
+      readonly place: Place;
+    };

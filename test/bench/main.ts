@@ -20,7 +20,10 @@ interface Measured {
 /** Wall time and peak memory of a whole process, median of several runs, the first not counted. */
 function measure(args: readonly string[], runs = RUNS): Measured {
   const results = Array.from({ length: runs + 1 }, () => once(args)).slice(1);
-  return { milliseconds: median(results.map((one) => one.milliseconds)), megabytes: median(results.map((one) => one.megabytes)) };
+  return {
+    milliseconds: median(results.map((one) => one.milliseconds)),
+    megabytes: median(results.map((one) => one.megabytes)),
+  };
 }
 
 function once(args: readonly string[]): Measured {
@@ -63,7 +66,12 @@ function bulk(folder: string, count: number): void {
   writeFileSync(parser, PARSE);
   const floor = measure([parser, join(site, 'recipes')], runs);
   row(`${count} recipes: yaml to positions`, floor, undefined, '');
-  row(`${count} recipes: check, one core`, measure([COMMAND, 'check', site, '--jobs', '1'], runs), floor, 'at most 1.5 x');
+  row(
+    `${count} recipes: check, one core`,
+    measure([COMMAND, 'check', site, '--jobs', '1'], runs),
+    floor,
+    'at most 1.5 x',
+  );
   row(`${count} recipes: check`, measure([COMMAND, 'check', site], runs), floor, '');
 }
 
@@ -94,5 +102,10 @@ try {
 }
 const widths = [0, 1, 2, 3, 4].map((column) => Math.max(...rows.map((cells) => cells[column]?.length ?? 0)));
 for (const cells of rows) {
-  console.log(cells.map((cell, column) => (column === 0 ? cell.padEnd(widths[0] ?? 0) : cell.padStart(widths[column] ?? 0))).join('   ').trimEnd());
+  console.log(
+    cells
+      .map((cell, column) => (column === 0 ? cell.padEnd(widths[0] ?? 0) : cell.padStart(widths[column] ?? 0)))
+      .join('   ')
+      .trimEnd(),
+  );
 }

@@ -53,7 +53,8 @@ const FAULTY: readonly [text: string, dimension: Dimension, found: string, right
 
 describe('a tolerance', () => {
   test.each(WITH_TOLERANCE)('of %j is read', (text, dimension, { value, of }) => {
-    const tolerance = { value: expect.closeTo(value, 12), of };
+    const close: unknown = expect.closeTo(value, 12);
+    const tolerance = { value: close, of };
     expect(readMeasure(text, dimension, { tolerance: true })).toMatchObject({ dimension, tolerance });
   });
 

@@ -155,6 +155,41 @@ describe('whatever a step holds', () => {
   });
 });
 
+test('a step is judged among others as it is alone', () => {
+  const told = (all: readonly Verdict[] = []) =>
+    all.map(({ name, kind, level, value, uncertainty, subject, needs, instance }) => {
+      return { name, kind, level, value, uncertainty, subject, needs, instance };
+    });
+  fc.assert(
+    fc.property(fc.array(fc.tuple(PROCESS, KEYS), { minLength: 2, maxLength: 4 }), (steps) => {
+      const texts = steps.map(([process, keys], index) => step(process, keys, `step-${index}`));
+      const together = tried(texts.join('\n'), { chamber: CHAMBER }).judgement.steps;
+      for (const [index, text] of texts.entries()) {
+        const [alone] = tried(text, { chamber: CHAMBER }).judgement.steps;
+        expect(told(together[index]?.verdicts), text).toEqual(told(alone?.verdicts));
+      }
+    }),
+    { numRuns: 60 },
+  );
+});
+
+test('a step is judged the same whichever step before it differs in one setpoint', () => {
+  fc.assert(
+    fc.property(KEYS, magnitude(0.1, 5000), magnitude(0.1, 5000), (keys, one, other) => {
+      const rest = keys.replace(/(pressure|throttle): (\{[^}]*\}|[^,]*),? ?/, '');
+      const soaks = [one, other].map((pressure, index) =>
+        step('sputter', `pressure: ${pressure} mTorr, ${rest}`, `step-${index}`),
+      );
+      const last = tried(soaks.join('\n'), { chamber: CHAMBER }).judgement.steps[1];
+      const alone = tried(soaks[1] ?? '', { chamber: CHAMBER }).judgement.steps[0];
+      const numbers = (all: readonly Verdict[] = []) =>
+        all.map(({ name, value, uncertainty }) => ({ name, value, uncertainty }));
+      expect(numbers(last?.verdicts)).toEqual(numbers(alone?.verdicts));
+    }),
+    { numRuns: 60 },
+  );
+});
+
 describe('steps of gas', () => {
   const GASES = fc.uniqueArray(fc.constantFrom('Ar', 'N2', 'O2', 'H2', 'SiH4'), { minLength: 1, maxLength: 5 });
   const soak = (pressure: number, flows: readonly string[]) =>
