@@ -4,7 +4,7 @@ import { unitIn } from './lookup.ts';
 import { lookAlikeFault, noNumberFault, spoiltNumberFault } from './number-fault.ts';
 import { numberEnd } from './number.ts';
 import { plainUnit, skipBlanks } from './spelling.ts';
-import { isUnitFault, quoted } from './unit-fault.ts';
+import { quoted } from './unit-fault.ts';
 import { wrongUnitFault } from './wrong-unit.ts';
 import type { Dimensions } from './dimensions.ts';
 import type { Measure } from './measure.ts';

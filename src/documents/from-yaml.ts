@@ -1,0 +1,90 @@
+import { isAlias, isMap, isScalar } from 'yaml';
+import { hasControl } from './characters.ts';
+import { slipIn } from './flow-slips.ts';
+import { emptyAt } from './nodes.ts';
+import type { ParsedNode, Scalar, YAMLMap, YAMLSeq } from 'yaml';
+import type { Fault } from '../shelf/fault.ts';
+import type { Source } from '../shelf/place.ts';
+import type { KeyNode, ListNode, MapNode, Node, NodePair, ScalarNode } from './nodes.ts';
+
+/** Our nodes for those of YAML; what YAML allows in them and we do not goes into the faults. */
+export function fromYaml(source: Source, root: ParsedNode, faults: Fault[]): Node {
+  return toNode({ source, faults }, root);
+}
+
+interface Reading {
+  readonly source: Source;
+  readonly faults: Fault[];
+}
+
+function toNode(reading: Reading, node: ParsedNode): Node {
+  if (isAlias(node)) {
+    refused(reading, node, '*', `the alias *${node.source}`);
+    return { kind: 'scalar', start: node.range[0], end: node.range[1], value: null, source: '' };
+  }
+  refuseProperties(reading, node);
+  if (isScalar(node)) return toScalar(reading, node);
+  return isMap(node) ? toMap(reading, node) : toList(reading, node);
+}
+
+function toScalar({ source, faults }: Reading, node: Scalar.Parsed): ScalarNode {
+  const { value } = node;
+  const [start, end] = node.range;
+  if (node.type === 'QUOTE_DOUBLE' && hasControl(node.source)) {
+    faults.push({
+      place: source.place(start, end),
+      found: 'a control character written as an escape',
+      right: 'remove it',
+    });
+  }
+  const simple = typeof value === 'string' || typeof value === 'number' || typeof value === 'boolean' ? value : null;
+  return { kind: 'scalar', start, end, value: simple, source: node.source };
+}
+
+function toMap(reading: Reading, map: YAMLMap.Parsed): MapNode {
+  const pairs: NodePair[] = [];
+  let previous: YAMLMap.Parsed['items'][number] | undefined;
+  for (const pair of map.items) {
+    const slip = map.flow === true && pair.value === null ? slipIn(reading.source, previous, pair) : undefined;
+    if (slip === undefined) pairs.push(toPair(reading, pair));
+    else reading.faults.push(slip);
+    previous = pair;
+  }
+  const [start, end] = map.range;
+  return { kind: 'map', start, end: map.flow === true ? end : (pairs.at(-1)?.value.end ?? end), pairs };
+}
+
+function toPair(reading: Reading, { key: keyNode, value }: YAMLMap.Parsed['items'][number]): NodePair {
+  const [start, end] = keyNode.range;
+  refuseProperties(reading, keyNode);
+  const key: KeyNode = { start, end, text: keyText(keyNode) };
+  return { key, value: value === null || isEmpty(value) ? emptyAt(key) : toNode(reading, value) };
+}
+
+/** A key's text. */
+export function keyText(key: ParsedNode): string {
+  return isScalar(key) && typeof key.value === 'string' ? key.value : '';
+}
+
+function isEmpty(node: ParsedNode): boolean {
+  return isScalar(node) && node.value === null && node.source === '' && node.anchor === undefined;
+}
+
+function toList(reading: Reading, list: YAMLSeq.Parsed): ListNode {
+  const items = list.items.map((item) => toNode(reading, item));
+  const [start, end] = list.range;
+  return { kind: 'list', start, end: list.flow === true ? end : (items.at(-1)?.end ?? end), items };
+}
+
+function refuseProperties(reading: Reading, node: ParsedNode): void {
+  if (isAlias(node)) return;
+  if (node.anchor !== undefined) refused(reading, node, '&', `the anchor &${node.anchor}`);
+  if (node.tag !== undefined) refused(reading, node, '!', 'a tag');
+}
+
+/** What stands before a node, from its sign on, is told with the node. */
+function refused({ source, faults }: Reading, node: ParsedNode, sign: string, found: string): void {
+  const start = source.text.lastIndexOf(sign, node.range[0]);
+  const right = 'write the value itself, in quotes where it is text';
+  faults.push({ place: source.place(start, node.range[1]), found, right });
+}
