@@ -14,6 +14,7 @@ const ROOMS = [
   'reports',
   'cli',
   'editor',
+  'generate',
 ];
 
 /** Room by room, those that it must not import from. The built-in data are documents that were read when the program was made. */

@@ -32,11 +32,25 @@ const ASSUMED: Readonly<Record<string, Assumption>> = {
     because:
       'gas between a wall and a wafer of another temperature: the middle of both, anything between them possible',
   },
+  'assumed.pump-cooling': {
+    value: 333.15,
+    halfWidth: 40,
+    dimension: 'temperature',
+    unit: 'degC',
+    because: 'hot gas cools to about 60 degC on its way to the pump (common practice)',
+  },
   'assumed.residual.H2O': {
     value: 1,
     dimension: 'fraction',
     unit: '',
     because: 'the residual gas of an unbaked chamber is mostly water (common practice)',
+  },
+  'assumed.residual-sticking': {
+    value: 0.55,
+    halfWidth: 0.45,
+    dimension: 'fraction',
+    unit: '',
+    because: 'of the reactive residual molecules that hit a growing film a tenth to all stay (common practice; fewer on noble metals)',
   },
   'assumed.emission-spread': {
     value: 0,

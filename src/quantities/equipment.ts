@@ -173,6 +173,7 @@ export const plenumPressureOf = quantity<PlenumArguments>({
     const inlet = `chamber.inlets.${of}`;
     if (!scope.setup.inlets.includes(of)) return inapplicable(`the chamber has no inlet ${of} with holes`);
     if (!scope.fed) return inapplicable('no gas flows');
+    if (scope.setup.throttle === 'closed') return inapplicable('the chamber fills behind a closed throttle');
     return [
       { id: 'flow-rate' },
       `${inlet}.holes`,

@@ -34,8 +34,17 @@ export function readingOf(values: Values, node: Node): Reading {
   const absent = settle(values, node);
   if (absent !== undefined) return absent;
   const value = values.numbers[node.slot] ?? NaN;
-  const of = node.kind === 'choice' ? node.subjects[values.chosen[node.slot] ?? -1] : undefined;
+  const of = chosenSubject(values, node);
   return of === undefined ? { kind: 'known', value } : { kind: 'known', value, of };
+}
+
+/** Of the worst of several, which it was. */
+function chosenSubject(values: Values, node: Node): string | undefined {
+  if (node.kind === 'choice') return node.subjects[values.chosen[node.slot] ?? -1];
+  const [input] = node.inputs;
+  if (node.kind !== 'same' || input === undefined) return undefined;
+  settle(values, input);
+  return chosenSubject(values, input);
 }
 
 /** Works out a node and whatever it needs; the answer says why there is no number, where there is none. */

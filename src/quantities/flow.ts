@@ -79,17 +79,16 @@ export const turnoversOf = quantity<[time: number, residence: number]>({
   value: turnovers,
 });
 
-export const pumpTemperature = quantity<[wall: number]>({
+export const pumpTemperature = quantity<[wall: number, warmest: number]>({
   id: 'pump-temperature',
   symbol: 'T_pump',
   dimension: 'temperature',
-  statement: 'Temperature of the gas at the pump: stated, or that of the wall but at most 60 degC.',
-  source: 'gas cools on its way to the pump (common practice)',
-  from: (_, scope) => (scope.states('chamber.pump.temperature') ? 'chamber.pump.temperature' : ['temperatures.wall']),
-  value: (wall) => Math.min(wall, WARMEST_PUMP),
+  statement: 'Temperature of the gas at the pump: stated, or that of the wall but at most about 60 degC.',
+  source: 'min(T_wall, T_cooled); gas cools on its way to the pump (common practice)',
+  from: (_, scope) =>
+    scope.states('chamber.pump.temperature') ? 'chamber.pump.temperature' : ['temperatures.wall', 'assumed.pump-cooling'],
+  value: (wall, warmest) => Math.min(wall, warmest),
 });
-
-const WARMEST_PUMP = 333.15;
 
 export const pumpingSpeedOf = quantity<[flow: number, temperature: number, pressure: number]>({
   id: 'pumping-speed',

@@ -168,7 +168,11 @@ export const numberDensityOf = quantity<[pressure: number, temperature: number]>
   source: 'ideal gas, n = p/(k T)',
   from: ({ length }) => [{ id: 'gas-pressure' }, temperatureAt(length)],
   value: numberDensity,
+  remarks: (_, __, [pressure]) => (pressure > MOST_IDEAL ? ['above 10 bar a gas is no longer ideal'] : []),
 });
+
+/** Pa. */
+const MOST_IDEAL = 1e6;
 
 export const molarMass = quantity<[fractions: readonly number[], masses: readonly number[]]>({
   id: 'molar-mass',

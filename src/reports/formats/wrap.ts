@@ -1,4 +1,4 @@
-import stringWidth from 'string-width';
+import stringWidth from 'fast-string-width';
 
 /** Text broken at blanks into lines of at most so many columns. A word that is longer stands on a line of its own. */
 export function wrap(text: string, width: number): readonly string[] {
