@@ -1,6 +1,8 @@
 import { frameClosing, frameOpening } from '../reports/records/frame.ts';
 import { faultRecord } from '../reports/records/check.ts';
+import { PLAIN_SHOW } from '../steps/show.ts';
 import { VERSION } from './version.ts';
+import type { FrameHead } from '../reports/records/frame.ts';
 import type { Site } from '../steps/site.ts';
 import type { Sink } from './out.ts';
 import type { Report } from './report.ts';
@@ -29,14 +31,22 @@ export function jsonReport(sink: Sink, sites: readonly Site[]): Report {
   };
 }
 
-/** Recipes of several sites have no site in common; the first one's conventions hold for all. */
-function headOf(sites: readonly Site[]): Parameters<typeof frameOpening>[0] {
-  const [first, ...others] = sites;
-  const name = others.length === 0 ? first?.name : undefined;
+/** What all recipes have in common; each recipe states its own as well. */
+function headOf(sites: readonly Site[]): FrameHead {
+  const [first, second] = sites;
+  const site = second === undefined ? first?.name : undefined;
+  const shows = sites.length === 0 ? [PLAIN_SHOW] : sites.map(({ show }) => show);
+  const coverageFactor = common(shows.map((show) => show.coverageFactor));
+  const bands = common(shows.map((show) => show.bands));
   return {
     version: VERSION,
-    ...(name === undefined ? {} : { site: name }),
-    coverageFactor: first?.show.coverageFactor ?? 2,
-    bands: first?.show.bands ?? 'gas-dynamics',
+    ...(site === undefined ? {} : { site }),
+    ...(coverageFactor === undefined ? {} : { coverageFactor }),
+    ...(bands === undefined ? {} : { bands }),
   };
+}
+
+/** What all of several are; undefined where they differ. */
+function common<T>([first, ...others]: readonly T[]): T | undefined {
+  return others.every((other) => other === first) ? first : undefined;
 }

@@ -30,7 +30,7 @@ async function answer(asked: Asked, out: Out): Promise<ExitCode> {
       return tellProblem(out, asked.problem);
     case 'run': {
       const { readOptions, RUNS } = await import('./every-command.ts');
-      const { options, problem } = readOptions(asked.given);
+      const { options, problem } = readOptions(asked.given, asked.args);
       if (problem !== undefined) return tellProblem(out, problem);
       return RUNS[asked.command.name]({ args: asked.args, options, out });
     }

@@ -47,7 +47,7 @@ const NOTHING: Made = { counts: NO_COUNTS, faults: [] };
 const MAKERS: Readonly<Record<Work['command'], (run: Run, work: Work) => Made>> = {
   check(run, work) {
     const judgement = judge(run, work.today);
-    const page = checkPart(judgement, [], work.check);
+    const page = checkPart(judgement, work.check);
     return { texts: drawn(page, work, () => jsonPart(judgement)), counts: page.counts, faults: judgement.faults };
   },
   table(run, work) {

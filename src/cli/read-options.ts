@@ -1,4 +1,5 @@
 import { COLOUR_CHOICES, isColourChoice } from './colour.ts';
+import { outProblem } from './out-targets.ts';
 import { readValue } from './read-value.ts';
 import { ENDINGS, FORMATS, formatOf, isFormat } from './formats.ts';
 import { siteProblem } from './sites.ts';
@@ -13,10 +14,10 @@ import type { Given } from './command-line.ts';
 import type { OptionName } from './options.ts';
 import type { Problem } from './problem.ts';
 
-/** The options of a command line, or the first thing that is wrong with them. */
-export function readOptions(given: Given): Read {
+/** The options of a command line that has these arguments, or the first thing that is wrong with them. */
+export function readOptions(given: Given, args: readonly string[]): Read {
   const problems: Problem[] = [];
-  const options = optionsFrom(given, (problem) => problems.push(problem));
+  const options = optionsFrom(given, args, (problem) => problems.push(problem));
   const [problem] = problems;
   return problem === undefined ? { options } : { problem };
 }
@@ -33,10 +34,10 @@ export function wantsTrace(given: Given): boolean {
 
 type Complain = (problem: Problem) => void;
 
-function optionsFrom(given: Given, complain: Complain): Options {
+function optionsFrom(given: Given, args: readonly string[], complain: Complain): Options {
   const last = (name: OptionName): string | undefined => given.get(name)?.at(-1);
   return {
-    out: readOut(given.get('out') ?? [], complain),
+    out: readOut(given.get('out') ?? [], args, complain),
     format: readWord('--format', last('format') ?? 'text', FORMATS, isFormat, complain) ?? 'text',
     color: readWord('--color', last('color') ?? 'auto', COLOUR_CHOICES, isColourChoice, complain) ?? 'auto',
     units: readUnits(last('units') ?? '', complain),
@@ -77,12 +78,12 @@ function readWord<W extends string>(
   return undefined;
 }
 
-function readOut(paths: readonly string[], complain: Complain): readonly string[] {
-  for (const [index, path] of paths.entries()) {
-    if (paths.indexOf(path) !== index) complain({ found: `--out ${path} stands twice`, right: 'name each file once' });
-    else if (formatOf(path) === undefined)
-      complain({ found: `the ending of --out ${path} names no format`, right: ENDS });
-  }
+function readOut(paths: readonly string[], inputs: readonly string[], complain: Complain): readonly string[] {
+  if (paths.length === 0) return paths;
+  const unnamed = paths.find((path) => formatOf(path) === undefined);
+  if (unnamed !== undefined) complain({ found: `the ending of --out ${unnamed} names no format`, right: ENDS });
+  const problem = outProblem(diskShelf(), paths, inputs);
+  if (problem !== undefined) complain(problem);
   return paths;
 }
 

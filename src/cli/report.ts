@@ -1,3 +1,4 @@
+import { gapBetween } from '../reports/formats/text.ts';
 import { faultBlocks } from '../reports/pages/faults.ts';
 import { drawBlocks, isProse } from './draw.ts';
 import type { Block } from '../reports/page.ts';
@@ -23,13 +24,13 @@ export interface Closing {
   readonly summary: object;
 }
 
-/** For readers: parts with a blank line between, then what all add up to. */
+/** For readers: parts with a blank line between, those of one line each as a list, then what all add up to. */
 export function proseReport(sink: Sink, style: Style): Report {
-  let begun = false;
-  const write = (text: string): void => {
+  let before = '';
+  const write = (text: string, gap = gapBetween(before, text)): void => {
     if (text === '') return;
-    sink.write(begun && style.format === 'text' ? `\n${text}` : text);
-    begun = true;
+    sink.write(style.format === 'text' ? gap + text : text);
+    before = text;
   };
   return {
     tellsFaults: isProse(style.format),
@@ -40,7 +41,7 @@ export function proseReport(sink: Sink, style: Style): Report {
       write(drawBlocks(faultBlocks(fromHere), style));
     },
     close: ({ blocks }) => {
-      write(drawBlocks(blocks, style));
+      write(drawBlocks(blocks, style), before === '' ? '' : '\n');
     },
   };
 }

@@ -34,11 +34,6 @@ export function oddCharacter(key: string): string | undefined {
   return match === null ? undefined : characterName(key.charCodeAt(match.index));
 }
 
-/** Whether a text has any character beyond ASCII, so that its keys are worth a look. */
-export function isAscii(text: string): boolean {
-  return !BEYOND_ASCII.test(text);
-}
-
 /** Whether a text that was written with escapes holds a control character. */
 export function hasControl(text: string): boolean {
   return CONTROL.test(text);
@@ -51,7 +46,6 @@ const FORBIDDEN =
   /[\0-\x08\x0b\x0c\x0e-\x1f\x7f-\x9f\u00ad\u061c\u200b-\u200f\u2028-\u202e\u2060-\u2069\ufeff\ufff9-\ufffb]|\r(?!\n)/g;
 
 const DIRECTION = /[\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069]/;
-const BEYOND_ASCII = /[\u0080-\uffff]/;
 const ODD_BLANK = /[\u00a0\u1680\u2000-\u200a\u202f\u205f\u3000]/g;
 const ODD_IN_KEY = /[\u00a0\u1680\u2000-\u200a\u202f\u205f\u3000\u2010-\u2015\u2212\uff01-\uff5e]/;
 

@@ -20,7 +20,7 @@ interface Reading {
 function toNode(reading: Reading, node: ParsedNode): Node {
   if (isAlias(node)) {
     refused(reading, node, '*', `the alias *${node.source}`);
-    return { kind: 'scalar', start: node.range[0], end: node.range[1], value: null, source: '' };
+    return { kind: 'scalar', ...rangeOf(node), value: null, source: '' };
   }
   refuseProperties(reading, node);
   if (isScalar(node)) return toScalar(reading, node);
@@ -29,7 +29,7 @@ function toNode(reading: Reading, node: ParsedNode): Node {
 
 function toScalar({ source, faults }: Reading, node: Scalar.Parsed): ScalarNode {
   const { value } = node;
-  const [start, end] = node.range;
+  const { start, end } = rangeOf(node);
   if (node.type === 'QUOTE_DOUBLE' && hasControl(node.source)) {
     faults.push({
       place: source.place(start, end),
@@ -43,37 +43,38 @@ function toScalar({ source, faults }: Reading, node: Scalar.Parsed): ScalarNode 
 
 function toMap(reading: Reading, map: YAMLMap.Parsed): MapNode {
   const pairs: NodePair[] = [];
-  let previous: YAMLMap.Parsed['items'][number] | undefined;
-  for (const pair of map.items) {
-    const slip = map.flow === true && pair.value === null ? slipIn(reading.source, previous, pair) : undefined;
-    if (slip === undefined) pairs.push(toPair(reading, pair));
+  let before: KeyNode | undefined;
+  for (const { key: keyNode, value } of map.items) {
+    const key = toKey(reading, keyNode);
+    const slip = map.flow === true && value === null ? slipIn(reading.source, before, key) : undefined;
+    if (slip === undefined) pairs.push({ key, value: toValue(reading, key, value) });
     else reading.faults.push(slip);
-    previous = pair;
+    before = slip === undefined && isScalar(value) ? { ...rangeOf(value), text: value.source } : key;
   }
-  const [start, end] = map.range;
+  const { start, end } = rangeOf(map);
   return { kind: 'map', start, end: map.flow === true ? end : (pairs.at(-1)?.value.end ?? end), pairs };
 }
 
-function toPair(reading: Reading, { key: keyNode, value }: YAMLMap.Parsed['items'][number]): NodePair {
-  const [start, end] = keyNode.range;
-  refuseProperties(reading, keyNode);
-  const key: KeyNode = { start, end, text: keyText(keyNode) };
-  return { key, value: value === null || isEmpty(value) ? emptyAt(key) : toNode(reading, value) };
+function toKey(reading: Reading, node: ParsedNode): KeyNode {
+  refuseProperties(reading, node);
+  return { ...rangeOf(node), text: isScalar(node) && typeof node.value === 'string' ? node.value : '' };
 }
 
-/** A key's text. */
-export function keyText(key: ParsedNode): string {
-  return isScalar(key) && typeof key.value === 'string' ? key.value : '';
-}
-
-function isEmpty(node: ParsedNode): boolean {
-  return isScalar(node) && node.value === null && node.source === '' && node.anchor === undefined;
+function toValue(reading: Reading, key: KeyNode, node: ParsedNode | null): Node {
+  const isEmpty = node === null || (isScalar(node) && node.value === null && node.source === '');
+  if (!isEmpty) return toNode(reading, node);
+  if (node !== null) refuseProperties(reading, node);
+  return emptyAt(key);
 }
 
 function toList(reading: Reading, list: YAMLSeq.Parsed): ListNode {
   const items = list.items.map((item) => toNode(reading, item));
-  const [start, end] = list.range;
+  const { start, end } = rangeOf(list);
   return { kind: 'list', start, end: list.flow === true ? end : (items.at(-1)?.end ?? end), items };
+}
+
+function rangeOf({ range: [start, end] }: ParsedNode): { readonly start: number; readonly end: number } {
+  return { start, end };
 }
 
 function refuseProperties(reading: Reading, node: ParsedNode): void {

@@ -3,11 +3,11 @@ import { nameAt, ownerName, placeOf, pointerOf, within } from './pointers.ts';
 import { childOf, keyRule, rulesAt } from './rules.ts';
 import { nearest } from '../units/suggest.ts';
 import { quoted } from '../units/unit-fault.ts';
-import type { ParsedNode } from 'yaml';
 import type { Fault } from '../shelf/fault.ts';
 import type { Source } from '../shelf/place.ts';
 import type { Pointer } from './document.ts';
 import type { SchemaError } from './generated/validators.js';
+import type { Node } from './nodes.ts';
 import type { Value } from './plain.ts';
 import type { Rule } from './rules.ts';
 import type { Sort } from './sort.ts';
@@ -15,7 +15,7 @@ import type { Sort } from './sort.ts';
 /** A content that does not meet its schema, with the nodes it was read from. */
 export interface Rejected {
   readonly source: Source;
-  readonly root: ParsedNode;
+  readonly root: Node;
   readonly sort: Sort;
   readonly content: Value;
 }

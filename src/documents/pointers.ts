@@ -1,41 +1,32 @@
-import { isMap, isSeq } from 'yaml';
-import { keyText, nodePlace, writtenNode } from './nodes.ts';
+import { nodePlace } from './nodes.ts';
 import { childOf } from './rules.ts';
 import { quoted } from '../units/unit-fault.ts';
-import type { ParsedNode } from 'yaml';
 import type { Source, TextPlace } from '../shelf/place.ts';
 import type { Pointer } from './document.ts';
+import type { KeyNode, Node } from './nodes.ts';
 import type { Value } from './plain.ts';
 import type { Sort } from './sort.ts';
 
 /** Where the value that a pointer leads to stands, or its key; the last place on the way, where it leads past the end. */
-export function placeOf(
-  source: Source,
-  root: ParsedNode,
-  pointer: Pointer,
-  part: 'key' | 'value' = 'value',
-): TextPlace {
-  let node: ParsedNode | null = root;
-  let key: ParsedNode = root;
+export function placeOf(source: Source, root: Node, pointer: Pointer, part: 'key' | 'value' = 'value'): TextPlace {
+  let node = root;
+  let key: Node | KeyNode = root;
   for (const step of pointer) {
     const next = stepInto(node, step);
     if (next === undefined) break;
     node = next.value;
     key = next.key;
   }
-  return nodePlace(source, part === 'key' ? key : writtenNode(key, node));
+  return nodePlace(source, part === 'key' ? key : node);
 }
 
 /** Node and key at one step of a pointer; an entry of a list has no key but itself. */
 function stepInto(
-  node: ParsedNode | null,
+  node: Node,
   step: string | number,
-): { readonly key: ParsedNode; readonly value: ParsedNode | null } | undefined {
-  if (isMap(node)) {
-    const pair = node.items.find((candidate) => keyText(candidate) === String(step));
-    return pair === undefined ? undefined : { key: pair.key, value: pair.value };
-  }
-  const item = isSeq(node) ? node.items[Number(step)] : undefined;
+): { readonly key: Node | KeyNode; readonly value: Node } | undefined {
+  if (node.kind === 'map') return node.pairs.find(({ key }) => key.text === String(step));
+  const item = node.kind === 'list' ? node.items[Number(step)] : undefined;
   return item === undefined ? undefined : { key: item, value: item };
 }
 

@@ -2,15 +2,15 @@ import { readAccuracy, readMeasure } from '../units/read.ts';
 import { nearest } from '../units/suggest.ts';
 import { isUnitFault, needed, quoted } from '../units/unit-fault.ts';
 import { nodePlace } from './nodes.ts';
-import type { Scalar } from 'yaml';
 import type { TextPlace } from '../shelf/place.ts';
 import type { MeasurePlan, Pass } from './measure-plan.ts';
+import type { ScalarNode } from './nodes.ts';
 import type { Accuracy, Fixed, None, Rest, Unknown } from './setpoint.ts';
 
 /** One physical value, an accuracy, or one of the words that may stand instead; a word such as `open` stays text. */
 export function readSingle(
   pass: Pass,
-  node: Scalar.Parsed,
+  node: ScalarNode,
   plan: MeasurePlan,
   name: string,
 ): Fixed | Accuracy | Unknown | None | Rest | string | undefined {
@@ -22,7 +22,7 @@ export function readSingle(
 }
 
 /** One value with its unit. Numbers are read from what is written, since YAML makes others of some. */
-export function readFixed(pass: Pass, node: Scalar.Parsed, plan: MeasurePlan, name: string): Fixed | undefined {
+export function readFixed(pass: Pass, node: ScalarNode, plan: MeasurePlan, name: string): Fixed | undefined {
   const place = nodePlace(pass.source, node);
   const measure = readMeasure(node.source, plan.dimensions, plan.tolerance === true ? WITH_TOLERANCE : ALONE);
   const fault = isUnitFault(measure)
@@ -35,7 +35,7 @@ export function readFixed(pass: Pass, node: Scalar.Parsed, plan: MeasurePlan, na
 const WITH_TOLERANCE = { tolerance: true };
 const ALONE = { tolerance: false };
 
-function accuracy(pass: Pass, node: Scalar.Parsed, plan: MeasurePlan, name: string): Accuracy | undefined {
+function accuracy(pass: Pass, node: ScalarNode, plan: MeasurePlan, name: string): Accuracy | undefined {
   const place = nodePlace(pass.source, node);
   const tolerance = readAccuracy(node.source, plan.dimensions[0]);
   if (!isUnitFault(tolerance)) return { kind: 'accuracy', tolerance, place };

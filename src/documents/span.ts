@@ -1,24 +1,22 @@
-import { isScalar } from 'yaml';
 import { nearest } from '../units/suggest.ts';
 import { either, needed, quoted } from '../units/unit-fault.ts';
 import { readFixed } from './single-value.ts';
-import { keyText, nodePlace, writtenNode } from './nodes.ts';
-import type { YAMLMap } from 'yaml';
+import { nodePlace } from './nodes.ts';
 import type { MeasurePlan, Pass } from './measure-plan.ts';
-import type { NodePair } from './nodes.ts';
+import type { MapNode, NodePair } from './nodes.ts';
 import type { Fixed, Ramp, Range } from './setpoint.ts';
 
 /** Whether a map is written as a ramp or a range. */
-export function isSpan(map: YAMLMap.Parsed): boolean {
-  return map.items.some((pair) => RAMP_KEYS.includes(keyText(pair)) || RANGE_KEYS.includes(keyText(pair)));
+export function isSpan(map: MapNode): boolean {
+  return map.pairs.some((pair) => RAMP_KEYS.includes(pair.key.text) || RANGE_KEYS.includes(pair.key.text));
 }
 
 /** A ramp (`from`, `to`, `over`) or a range (`usually`, `at_least`, `at_most`) in the place of one value. */
-export function readSpan(pass: Pass, map: YAMLMap.Parsed, plan: MeasurePlan, name: string): Ramp | Range | undefined {
+export function readSpan(pass: Pass, map: MapNode, plan: MeasurePlan, name: string): Ramp | Range | undefined {
   const wrong = (found: string, right: string): undefined => {
     pass.faults.push({ place: nodePlace(pass.source, map), found: `${name}: ${found}`, right });
   };
-  const ramp = map.items.some((pair) => keyText(pair) === 'from' || keyText(pair) === 'to');
+  const ramp = map.pairs.some((pair) => pair.key.text === 'from' || pair.key.text === 'to');
   if (!isNearSpan(map)) {
     wrong('a map', needed(plan.dimensions));
     return;
@@ -36,8 +34,8 @@ export function readSpan(pass: Pass, map: YAMLMap.Parsed, plan: MeasurePlan, nam
   return ramp ? toRamp(pass, map, values, name, wrong) : toRange(pass, map, values, wrong);
 }
 
-function isNearSpan(map: YAMLMap.Parsed): boolean {
-  return map.items.some((pair) => nearest(keyText(pair), [...RAMP_KEYS, ...RANGE_KEYS]) !== undefined);
+function isNearSpan(map: MapNode): boolean {
+  return map.pairs.some((pair) => nearest(pair.key.text, [...RAMP_KEYS, ...RANGE_KEYS]) !== undefined);
 }
 
 const RAMP_KEYS: readonly string[] = ['from', 'to', 'over'];
@@ -49,15 +47,15 @@ type Values = ReadonlyMap<string, Fixed>;
 /** The values of a span by key; undefined where one of them, or a key, is wrong. */
 function readValues(
   pass: Pass,
-  map: YAMLMap.Parsed,
+  map: MapNode,
   plan: MeasurePlan,
   name: string,
   keys: readonly string[],
 ): Values | undefined {
   const values = new Map<string, Fixed>();
   let sound = true;
-  for (const pair of map.items) {
-    const key = keyText(pair);
+  for (const pair of map.pairs) {
+    const key = pair.key.text;
     const known = keys.includes(key);
     if (!known) unknownKey(pass, pair, key, name, keys);
     const fixed = known && key !== 'over' ? readEnd(pass, pair, plan, key) : undefined;
@@ -75,15 +73,15 @@ function unknownKey(pass: Pass, pair: NodePair, key: string, name: string, keys:
 
 function readEnd(pass: Pass, pair: NodePair, plan: MeasurePlan, key: string): Fixed | undefined {
   const { value } = pair;
-  if (isScalar(value) && (typeof value.value === 'string' || typeof value.value === 'number')) {
+  if (value.kind === 'scalar' && (typeof value.value === 'string' || typeof value.value === 'number')) {
     return readFixed(pass, value, plan, key);
   }
-  const place = nodePlace(pass.source, writtenNode(pair.key, value));
+  const place = nodePlace(pass.source, value);
   pass.faults.push({ place, found: `${key}: no single value`, right: needed(plan.dimensions) });
   return undefined;
 }
 
-function toRamp(pass: Pass, map: YAMLMap.Parsed, values: Values, name: string, wrong: Wrong): Ramp | undefined {
+function toRamp(pass: Pass, map: MapNode, values: Values, name: string, wrong: Wrong): Ramp | undefined {
   const from = values.get('from');
   const to = values.get('to');
   const over = overOf(pass, map);
@@ -100,21 +98,21 @@ function toRamp(pass: Pass, map: YAMLMap.Parsed, values: Values, name: string, w
   return { kind: 'ramp', from, to, over, place: nodePlace(pass.source, map) };
 }
 
-function overOf(pass: Pass, map: YAMLMap.Parsed): 'step' | 'laps' | undefined {
-  const pair = map.items.find((candidate) => keyText(candidate) === 'over');
+function overOf(pass: Pass, map: MapNode): 'step' | 'laps' | undefined {
+  const pair = map.pairs.find((candidate) => candidate.key.text === 'over');
   if (pair === undefined) return 'step';
-  const value = isScalar(pair.value) ? pair.value.value : undefined;
+  const value = pair.value.kind === 'scalar' ? pair.value.value : undefined;
   if (value === 'step' || value === 'laps') return value;
   const found = typeof value === 'string' ? `over: ${quoted(value)}` : 'over: no word';
   pass.faults.push({
-    place: nodePlace(pass.source, writtenNode(pair.key, pair.value)),
+    place: nodePlace(pass.source, pair.value),
     found,
     right: 'write step or laps',
   });
   return undefined;
 }
 
-function toRange(pass: Pass, map: YAMLMap.Parsed, values: Values, wrong: Wrong): Range | undefined {
+function toRange(pass: Pass, map: MapNode, values: Values, wrong: Wrong): Range | undefined {
   const usually = values.get('usually');
   const least = values.get('at_least');
   const most = values.get('at_most');

@@ -1,19 +1,28 @@
 import { Composer, Lexer, Parser } from 'yaml';
 import { failure, success } from '../shelf/fault.ts';
 import { forbiddenCharacters, oddBlanks } from './characters.ts';
+import { fromYaml } from './from-yaml.ts';
+import { readOrdinary } from './ordinary.ts';
 import { syntaxFaults } from './syntax-faults.ts';
 import { CHOICE } from './sort.ts';
-import type { CST, ParsedNode } from 'yaml';
+import type { CST } from 'yaml';
 import type { Fault, Outcome } from '../shelf/fault.ts';
 import type { Source } from '../shelf/place.ts';
+import type { Node } from './nodes.ts';
 
 /** Collections within collections; deeper ones exhaust the stack of whatever walks them. */
 const DEEPEST = 64;
 
-/** The nodes of a YAML text: one document, without directives, not nested too deep, without errors of syntax. */
-export function readNodes(source: Source): Outcome<ParsedNode> {
+/** The nodes of a text, and what cannot stand in it. An ordinary text has no fault of syntax. */
+export function readNodes(source: Source): Outcome<Node> {
   const forbidden = forbiddenCharacters(source);
   if (forbidden.length > 0) return failure(...forbidden);
+  const ordinary = readOrdinary(source.text);
+  return ordinary === undefined ? readYaml(source) : success(ordinary);
+}
+
+/** The nodes of a YAML text: one document, without directives, not nested too deep, without errors of syntax. */
+export function readYaml(source: Source): Outcome<Node> {
   const tokens = readTokens(source);
   if (tokens.value === undefined) return failure(...tokens.faults);
   const composer = new Composer(OPTIONS);
@@ -21,7 +30,8 @@ export function readNodes(source: Source): Outcome<ParsedNode> {
     const problems = [...document.errors, ...document.warnings];
     if (problems.length > 0) return failure(...causes(source, syntaxFaults(source, problems)));
     if (document.contents === null || isNothing(document.contents.range, source)) break;
-    return success(document.contents);
+    const faults: Fault[] = [];
+    return success(fromYaml(source, document.contents, faults), faults);
   }
   return failure({ place: source.place(0, 0), found: 'an empty file', right: CHOICE });
 }

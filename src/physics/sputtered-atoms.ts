@@ -343,8 +343,9 @@ export function thermalisationDistance(
 const MOST_COLLISIONS = 10000;
 
 /**
- * Throw over the way on which an atom becomes thermal. By Monte Carlo a third of the atoms that arrive are thermal at 0.5, two thirds at 1,
- * four fifths at 1.5, nearly all at 3, for masses of 0.7 to 16 times the gas molecule's.
+ * Throw over the way on which an atom becomes thermal. By Monte Carlo a fifth to a third of the atoms that arrive are thermal at 0.5, two
+ * thirds to five sixths at 1, nine tenths or more at 1.5, nearly all at 3, for masses of 0.7 to 16 times the gas molecule's, which leave
+ * with a cosine distribution.
  *
  *     throw/L
  *
@@ -353,7 +354,7 @@ const MOST_COLLISIONS = 10000;
  * @param throwDistance throw: distance from target to wafer [m]
  * @param distance L: thermalisation distance [m]
  * @returns thermalisation ratio [1]
- * @source definition; Monte Carlo of hard spheres, own
+ * @source definition; own Monte Carlo of hard spheres, repeated in the tests
  * @example thermalisationRatio(0.27, 0.25) -> 1.08
  */
 export function thermalisationRatio(throwDistance: number, distance: number): number {

@@ -22,6 +22,7 @@ export function gasRun(library: Library, { parts, temperature, pressure }: GasSt
   const givens = [
     asked('pressure', pressure, 'pressure', 'Pa'),
     asked('temperatures.gas', temperature, 'temperature', 'K'),
+    asked('temperatures.wall', temperature, 'temperature', 'K'),
     ...[...parts].map(([gas, part]) => asked(`composition.${gas}`, part / total, 'fraction', '')),
   ];
   const step: Step = {

@@ -67,6 +67,7 @@ export class Plan {
   readonly #byName = new Map<string, Node>();
   /** The same, for those who ask with one reference again and again. */
   readonly #byReference = new WeakMap<Reference, Node>();
+  readonly #each = new WeakMap<Reference, readonly Reference[]>();
   readonly #ratios = new WeakMap<Reference, { readonly over: Reference; readonly node: Node }>();
   readonly #open = new Set<string>();
 
@@ -98,6 +99,18 @@ export class Plan {
     this.#open.delete(name);
     this.#byName.set(name, node);
     return node;
+  }
+
+  /** The numbers that one stands for: of the worst of several, or of a role that several atoms fill, each by itself. */
+  each(reference: Reference): readonly Reference[] {
+    let all = this.#each.get(reference);
+    if (all === undefined) {
+      const quantity = quantityNamed(reference.id);
+      const subjects = quantity === undefined ? undefined : this.#several(quantity, reference);
+      all = subjects?.map((of) => ({ ...reference, of })) ?? [reference];
+      this.#each.set(reference, all);
+    }
+    return all;
   }
 
   /** The node of one number over another. */

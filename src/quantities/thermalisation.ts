@@ -119,8 +119,8 @@ export const thermalisationRatioOf = quantity<[distance: number, way: number]>({
   symbol: 'throw/L_th',
   dimension: 'number',
   statement:
-    'Throw over thermalisation distance; a third of the arriving atoms are thermal at 0.5, two thirds at 1, nearly all at 3.',
-  source: 'throw/L_th; shares by own Monte Carlo for mass ratios of 0.7 to 16',
+    'Throw over thermalisation distance; a fifth to a third of the arriving atoms are thermal at 0.5, two thirds or more at 1, nearly all at 3.',
+  source: 'throw/L_th; shares by own Monte Carlo, repeated in the tests, for mass ratios of 0.7 to 16',
   from: (reference, scope) =>
     emittedOr(
       reference,

@@ -36,7 +36,7 @@ export const mixtureViscosityOf = quantity<
   symbol: 'μ',
   dimension: 'viscosity',
   statement: 'Viscosity, of the mixture or of one of its gases.',
-  source: 'Σ x_i μ_i/Σ_j x_j φ_ij, Wilke, J. Chem. Phys. 18, 517 (1950); of one gas its gas-viscosity',
+  source: 'Σ x_i μ_i/Σ_j x_j φ_ij, Wilke, J. Chem. Phys. 18, 517 (1950); of one gas Chapman & Enskog',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {
@@ -149,7 +149,7 @@ export const thermalConductivityOf = quantity<
   dimension: 'thermal-conductivity',
   statement: 'Thermal conductivity, of the mixture or of one of its gases.',
   source:
-    'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas its gas-conductivity',
+    'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas modified Eucken',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {

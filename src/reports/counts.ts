@@ -46,7 +46,7 @@ export const NO_COUNTS: Counts = {
   fuelWithOxidiser: 0,
 };
 
-export function countJudgement({ steps, cautions, notes }: Judgement, faults = 0): Counts {
+export function countJudgement({ steps, cautions, notes }: Judgement): Counts {
   const stepsByWorst = { ...NO_COUNTS.stepsByWorst };
   const verdicts = { ...NO_COUNTS.verdicts };
   const unwaived = { fail: { ...NO_LEVELS }, review: { ...NO_LEVELS }, open: { ...NO_LEVELS } };
@@ -70,7 +70,7 @@ export function countJudgement({ steps, cautions, notes }: Judgement, faults = 0
     waived,
     cautions: cautionCount(cautions),
     notes: notes.length,
-    faults,
+    faults: 0,
     passedOver: 0,
     hazards,
     fuelWithOxidiser: cautions.some(({ kind }) => kind === 'fuel-with-oxidiser') ? 1 : 0,

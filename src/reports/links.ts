@@ -23,9 +23,7 @@ function linkOf(line: Line, numbers: ReadonlyMap<Node, number>, step: StepRun, s
     name: given === undefined ? nodeName(node, step) : '',
     value,
     ...(si === undefined ? {} : { si }),
-    from: node.inputs.flatMap((input) => numbers.get(input) ?? []),
-    grounds:
-      given === undefined ? [lawOf(line), countsOf(node)].filter((text) => text !== '').join('; ') : originOf(given),
+    ...groundsOf(line, numbers),
     remarks: remarks.map(sentence),
   };
 }
@@ -69,19 +67,32 @@ function siText(value: number, dimension: Dimension): string {
   return unit === '1' ? text : `${text} ${unit}`;
 }
 
-/** A law with its source; a number that only stands for another says so. */
-function lawOf({ node }: Line): string {
-  if (node.kind === 'given' || node.kind === 'constant') return '';
-  if (node.kind === 'choice') return `the ${node.quantity.worst ?? 'largest'} of ${listed(node.subjects)}`;
-  if (node.quantity === undefined) return '';
-  return node.quantity.source;
+/** The law and the lines it is read from; a number that only stands for another says for which. */
+function groundsOf({ node, given }: Line, numbers: ReadonlyMap<Node, number>): Pick<Link, 'from' | 'grounds'> {
+  if (given !== undefined) return { from: [], grounds: originOf(given) };
+  const from = node.inputs.flatMap((input) => numbers.get(input) ?? []);
+  if (node.kind === 'same') return { from: [], grounds: `the same as ${from.join(', ')}` };
+  if (node.kind === 'choice')
+    return { from, grounds: `the ${node.quantity.worst ?? 'largest'} of ${listed(node.subjects)}` };
+  if (node.kind === 'given' || node.kind === 'constant') return { from, grounds: '' };
+  const { id, source } = node.quantity ?? { id: '', source: '' };
+  return { from, grounds: [source, countsOf(node, COUNTED.get(id))].filter((text) => text !== '').join('; ') };
 }
 
-/** Counts that the substances fix: atoms in a formula, an atomic number. */
-function countsOf({ inputs }: Node): string {
-  const counts = inputs.flatMap((input) => (input.kind === 'constant' ? [String(input.value)] : []));
-  return counts.length === 0 ? '' : `with the fixed ${counts.length === 1 ? 'count' : 'counts'} ${listed(counts)}`;
+/** Counts that formulas fix. Those of a gas's atoms and charges, which its formula tells anybody, are left out. */
+function countsOf({ inputs }: Node, noun: string | undefined): string {
+  const counts = inputs.flatMap((input) => (input.kind === 'constant' ? [input.value] : []));
+  if (noun === undefined || counts.length === 0) return '';
+  const [last] = counts.slice(-1);
+  return `with ${listed(counts.map(String))} ${last === 1 && counts.length === 1 ? noun : `${noun}s`} by formula`;
 }
+
+/** What is counted in the laws that count in formulas. */
+const COUNTED: ReadonlyMap<string, string> = new Map([
+  ['impurity-ratio', 'atom'],
+  ['utilisation', 'atom'],
+  ['surface-rate', 'molecule'],
+]);
 
 function originOf({ origin }: Given): string {
   if (isDefault(origin)) return `assumed: ${origin.because}`;

@@ -22,6 +22,19 @@ export function readsOf(quantity: Quantity, library: Library): readonly string[]
   return [...names];
 }
 
+/** Whether a number stands for nothing without a length. Of the others the plain form is told: a length changes none of its laws. */
+export function needsLength(id: string): boolean {
+  return NEED_LENGTH.has(id);
+}
+
+const NEED_LENGTH: ReadonlySet<string> = new Set([
+  'length',
+  'pressure-distance',
+  'collisions-straight',
+  'collisions-walk',
+  'diffusion-time',
+]);
+
 function isList(
   recipe: Ingredient | readonly (Ingredient | readonly Ingredient[])[],
 ): recipe is readonly (Ingredient | readonly Ingredient[])[] {
@@ -29,7 +42,7 @@ function isList(
 }
 
 function referencesOf({ id, lengths, subjects, whole }: Quantity, scope: Scope): readonly Reference[] {
-  const [length] = lengths?.(scope) ?? [];
+  const [length] = needsLength(id) ? (lengths?.(scope) ?? []) : [];
   const [of] = subjects?.(scope) ?? [];
   const plain = length === undefined ? { id } : { id, length };
   if (of === undefined) return [plain];
@@ -48,6 +61,7 @@ function spelled(part: Ingredient): string | undefined {
     .replace(/^(targets|melts)\.[a-z]+/, '$1.NAME')
     .replace(/^chamber\.(gas_lines|gauges|inlets)\.[A-Za-z]+/, 'chamber.$1.NAME')
     .replace(/^(accuracy\.(?:viscosity|diffusion))\.[A-Za-z0-9]+/, '$1.GAS')
+    .replace(/\.\d+\./, '.N.')
     .replace(/(residual|speed|pairs|flows)\.(?:Ar|N2)\b/, '$1.GAS')
     .replace(/:(?:Ar|N2)\/(?:Ar|N2)$/, ':GAS/GAS')
     .replace(/:(?:Ar|N2|feed|plate)$/, ':SUBJECT');

@@ -1,4 +1,3 @@
-import { quantityNamed } from '../quantities/catalogue.ts';
 import type { Reference } from '../quantities/reference.ts';
 import type { Reading } from '../quantities/reading.ts';
 import type { StepRun } from '../quantities/run.ts';
@@ -12,7 +11,7 @@ import type { Assumed, Instance, Kind, Level, Verdict } from './verdict.ts';
 /** The verdict on one assumption of a step: the worst over all cases and subjects. */
 export function judgeAssumption(assumption: Assumption, cases: readonly Case[], coverage: number): Verdict {
   const [usual] = cases;
-  const references = usual === undefined ? [] : referencesOf(assumption.reference, usual.run);
+  const references = usual === undefined ? [] : usual.run.plan.each(assumption.reference);
   let worst: Finding | undefined;
   let varies = false;
   for (const one of cases) {
@@ -61,15 +60,6 @@ function graver(one: Finding, other: Finding): boolean {
   const kinds = GRAVITY.indexOf(one.kind) - GRAVITY.indexOf(other.kind);
   if (kinds !== 0) return kinds > 0;
   return one.level === other.level ? one.margin < other.margin : isGraver(one.level, other.level);
-}
-
-/** The numbers that are judged where one stands for several: each subject by itself. */
-function referencesOf(reference: Reference, { plan }: StepRun): readonly Reference[] {
-  const { id, of } = reference;
-  if (of !== 'worst' && of !== 'target' && of !== 'melt') return [reference];
-  const subjects = of === 'worst' ? (quantityNamed(id)?.subjects?.(plan.scope) ?? []) : plan.scope.emittedSubjects(of);
-  if (of !== 'worst' && subjects.length <= 1) return [reference];
-  return subjects.map((subject) => ({ ...reference, of: subject }));
 }
 
 function verdictOf(assumption: Assumption, finding: Finding): Verdict {

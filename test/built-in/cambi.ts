@@ -5,8 +5,8 @@ export interface Partner {
 }
 
 /**
- * The gases, after Gosma, Swaminathan-Gopalan, Subramaniam & Stephani, open data set of variable-soft-sphere parameters;
- * recovered from its pairs.
+ * The gases, after Gosma, Swaminathan-Gopalan, Subramaniam & Stephani, open data set of variable-soft-sphere parameters
+ * (reference from memory, year not recorded); recovered from its pairs.
  */
 export const GASES: Readonly<Record<string, Partner>> = {
   He: { polarisability: 0.2185, electrons: 2 },

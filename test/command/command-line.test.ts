@@ -29,6 +29,14 @@ describe('a wrong command line ends with 2 and one line that says what would be 
     [['gas'], 'NAME is missing; regimen gas NAME[=PARTS]...'],
     [['gas', 'Ar=-1'], "Ar=-1: '-1' is no share; parts above zero, Ar=4"],
     [['gas', 'Ar', '--pressure', '5'], expect.stringMatching(/^--pressure .*5/)],
+    [
+      ['gas', 'Ar', '--pressure', '0 Pa'],
+      "--pressure '0 Pa' is not above zero; a gas has a pressure above 0 Pa: '1 Torr'",
+    ],
+    [['gas', 'Ar', '--temperature', '0 K'], expect.stringMatching(/^--temperature '0 K' is not above zero; /)],
+    [['gas', 'Ar', '--temperature', '-273.15 degC'], expect.stringMatching(/^--temperature .*-273\.15 degC/)],
+    [['gas', 'Ar', '--temperature', '-300 degC'], expect.stringMatching(/^--temperature .*-300 degC/)],
+    [['gas', 'Ar', '--pressure', '-1 Pa'], expect.stringMatching(/^--pressure .*-1 Pa/)],
     [['list', 'gasses'], "list 'gasses' is unknown; did you mean gases?"],
   ])('%j', (args, message) => {
     const { code, out, err } = regimen(args);

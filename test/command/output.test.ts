@@ -59,6 +59,42 @@ describe('--out', () => {
     expect(readFileSync(join(cwd, 'real.md'), 'utf8')).toContain('titanium-seed');
   });
 
+  test('never replaces a document or a recipe that is read, whatever link leads there', () => {
+    const cwd = siteWith({ 'sound.yaml': SOUND });
+    write(join(cwd, 'recipes/named.md'), SOUND);
+    symlinkSync('recipes/sound.yaml', join(cwd, 'link.md'));
+    symlinkSync('recipes', join(cwd, 'folder'));
+    const calls: readonly (readonly [readonly string[], string])[] = [
+      [
+        ['check', '--out', 'good.md', '--out', 'link.md'],
+        "--out link.md is a link to 'recipes/sound.yaml', which is no markdown file; choose another path",
+      ],
+      [
+        ['check', 'recipes/named.md', '--out', 'folder/named.md'],
+        '--out folder/named.md would replace recipes/named.md, which is read; choose another path',
+      ],
+      [
+        ['table', '--out', 'new.md', '--out', './folder/../new.md'],
+        '--out new.md and --out ./folder/../new.md are one file; name each file once',
+      ],
+    ];
+    for (const [args, message] of calls)
+      expect(regimen(args, { cwd })).toEqual({ code: 2, out: '', err: `regimen: ${message}\n` });
+    expect(readFileSync(join(cwd, 'recipes/sound.yaml'), 'utf8')).toBe(SOUND);
+    expect(readFileSync(join(cwd, 'recipes/named.md'), 'utf8')).toBe(SOUND);
+    expect(existsSync(join(cwd, 'good.md')) || existsSync(join(cwd, 'new.md'))).toBe(false);
+  });
+
+  test('takes two names of one file that is not there yet for one', () => {
+    const cwd = siteWith({ 'sound.yaml': SOUND });
+    symlinkSync('recipes', join(cwd, 'folder'));
+    const { code, err } = regimen(['check', '--out', 'recipes/a.md', '--out', 'folder/a.md'], { cwd });
+    expect({ code, err }).toEqual({
+      code: 2,
+      err: 'regimen: --out recipes/a.md and --out folder/a.md are one file; name each file once\n',
+    });
+  });
+
   test.each([
     ['missing/report.md', 'there is no such folder'],
     ['regimen.yaml/report.md', 'its folder is a file'],
@@ -83,6 +119,31 @@ describe('--out', () => {
     const cwd = siteWith({ 'broken.yaml': BROKEN });
     expect(regimen(['check', '--out', 'a.md'], { cwd }).code).toBe(2);
     expect(readFileSync(join(cwd, 'a.md'), 'utf8')).toContain('recipes/broken.yaml:22:11');
+  });
+});
+
+describe('a check of several recipes', () => {
+  const named = (name: string): string => SOUND.replace('name: titanium-seed', `name: ${name}`);
+
+  test('lists those that are clean without blank lines between them', () => {
+    const { out } = regimen(['check'], {
+      cwd: siteWith({ 'a.yaml': named('a'), 'b.yaml': named('b'), 'c.yaml': FAILING, 'd.yaml': named('d') }),
+    });
+    expect(out.split('\n').map((line) => /^\S*/.exec(line)?.[0])).toEqual(
+      expect.arrayContaining(['a', 'b', '', 'hasty', '', 'd', '', '4', '']),
+    );
+    expect(out).toMatch(/^a {3}.*4 pass\nb {3}.*4 pass\n\nhasty {3}/);
+    expect(out).toMatch(/\n\nd {3}.*4 pass\n\n4 recipes, 16 steps/);
+  });
+
+  test('tells a fault of their chamber once', () => {
+    const cwd = siteWith({ 'a.yaml': named('a'), 'b.yaml': named('b') });
+    const chamber = join(cwd, 'chambers/ruff.yaml');
+    write(chamber, readFileSync(chamber, 'utf8').replace('diameter: ', 'diametre: '));
+    const { code, out } = regimen(['check'], { cwd });
+    expect(code).toBe(2);
+    expect(out.match(/^fault .*chambers\/ruff\.yaml:/gm)).toHaveLength(1);
+    expect(out).toMatch(/1 fault: /);
   });
 });
 

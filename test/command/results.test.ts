@@ -2,7 +2,7 @@ import { cpSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { Ajv2020 } from 'ajv/dist/2020.js';
 import { afterAll, describe, expect, test } from 'vitest';
-import { BROKEN, clearFolders, DEMO, FAILING, folderWith, regimen, siteWith, SOUND } from './run.ts';
+import { BROKEN, clearFolders, DEMO, FAILING, folderWith, regimen, siteWith, SOUND, write } from './run.ts';
 
 afterAll(clearFolders);
 
@@ -15,7 +15,7 @@ for (const name of ['common', 'check', 'gas']) {
 
 /** What a schema finds wrong with a text. */
 function wrongIn(text: string, name: string): unknown {
-  const validate = ajv.getSchema(`https://regimen.invalid/schemas/${name}.json`);
+  const validate = ajv.getSchema(`${name}.json`);
   return validate?.(JSON.parse(text)) === true ? [] : (validate?.errors ?? 'no such schema');
 }
 
@@ -26,6 +26,23 @@ describe('JSON', () => {
     ['without a recipe', ['check', folderWith({})]],
   ])('of check %s meets schemas/check.json', (_, args) => {
     expect(wrongIn(regimen([...args, '--format', 'json']).out, 'check')).toEqual([]);
+  });
+
+  test('of several sites says of each recipe by what conventions its numbers are told, and together what they share', () => {
+    const folder = folderWith({});
+    for (const [name, factor] of [
+      ['one', '2'],
+      ['two', '3'],
+    ] as const) {
+      cpSync(siteWith({ 'a.yaml': SOUND }), join(folder, name), { recursive: true });
+      const site = join(folder, name, 'regimen.yaml');
+      write(site, readFileSync(site, 'utf8').replace('show:', `show:\n  coverage_factor: ${factor}`));
+    }
+    const { out } = regimen(['check', '--format', 'json', 'one', 'two'], { cwd: folder });
+    const result: unknown = JSON.parse(out);
+    expect(wrongIn(out, 'check')).toEqual([]);
+    expect(result).toMatchObject({ bands: 'gas-dynamics', recipes: [{ coverage_factor: 2 }, { coverage_factor: 3 }] });
+    expect(result).not.toHaveProperty('coverage_factor');
   });
 
   test('of gas meets schemas/gas.json', () => {

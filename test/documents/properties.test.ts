@@ -175,7 +175,7 @@ describe('whatever the text', () => {
   test('a recipe that reads meets the whole published schema', () => {
     const ajv = new Ajv2020({ strict: false });
     for (const name of ['common', 'recipe']) ajv.addSchema(schemaOf(name));
-    const meets = ajv.getSchema('https://regimen.invalid/schemas/recipe.json');
+    const meets = ajv.getSchema('recipe.json');
     let read = 0;
     fc.assert(
       fc.property(recipe, (text) => {

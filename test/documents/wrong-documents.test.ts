@@ -38,7 +38,7 @@ describe('several mistakes are all told, in the order of the text', () => {
   test('a wrong unit, a misspelt key and a missing one', () => {
     const text = recipeWith('pressure: 30 s', 'flow: { Ar: 4 sccm }').replace('    process: settle\n', '');
     expect(faultsOf(text)).toEqual([
-      "5:5 no process in 'fill'; add it, such as process: ion-etch-directional",
+      "5:5 no process in 'fill'; add it, such as process: pecvd",
       "7:15 pressure: '30 s' is a time; a pressure is needed, in mTorr, Torr, Pa or mbar",
       "8:5 unknown key 'flow' in 'fill'; write flows",
     ]);

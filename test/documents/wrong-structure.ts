@@ -58,7 +58,7 @@ export const WRONG_STRUCTURE: readonly WrongDocument[] = [
     text: 'regimen: recipe 1\nname: trial\nchamber: curlew\nsteps:\n  - name: fill\n',
     at: '5:5',
     found: "no process in 'fill'",
-    right: 'add it, such as process: ion-etch-directional',
+    right: 'add it, such as process: pecvd',
   },
   {
     name: 'no steps',

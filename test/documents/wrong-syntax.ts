@@ -25,6 +25,13 @@ export const WRONG_SYNTAX: readonly WrongDocument[] = [
     right: 'write the value itself, in quotes where it is text',
   },
   {
+    name: 'an anchor of a key',
+    text: recipeWith('&why reason: soak'),
+    at: '8:5',
+    found: 'the anchor &why',
+    right: 'write the value itself, in quotes where it is text',
+  },
+  {
     name: 'an alias',
     text: recipeWith('reason: *why'),
     at: '8:13',
@@ -247,5 +254,12 @@ export const WRONG_SYNTAX: readonly WrongDocument[] = [
     at: '8:16',
     found: 'a # right behind a value',
     right: 'put a blank before the #',
+  },
+  {
+    name: 'no blank behind the colon of the heading in braces',
+    text: '{regimen:recipe 1, name: trial}',
+    at: '1:2',
+    found: 'no blank behind the colon of regimen',
+    right: 'write regimen: recipe 1',
   },
 ];

@@ -112,7 +112,7 @@ describe('mixtures', () => {
 });
 
 describe('free paths and arrivals', () => {
-  // CRC Handbook of Chemistry and Physics, table "Mean free path and related properties of gases", 25 degC and 100 kPa: the same
+  // CRC Handbook of Chemistry and Physics, 100th ed., table "Mean free path and related properties of gases", 25 degC and 100 kPa: the same
   // definition, from measured viscosities. Ours come from Lennard-Jones pairs good to 1 % (N2) or 1.5 % (Ar, O2) of viscosity, helium 2.3 %.
   test.each([
     ['N2', 67.6e-9, 0.02],

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import stringWidth from 'string-width';
+import stringWidth from 'fast-string-width';
 import { csvHeader, csvRows } from '../../src/reports/formats/csv.ts';
 import { drawMarkdown } from '../../src/reports/formats/markdown.ts';
 import { drawText } from '../../src/reports/formats/text.ts';
@@ -11,7 +11,7 @@ import type { Block, Table } from '../../src/reports/page.ts';
 import { deposit, judged, runOf } from './run.ts';
 
 const OPTIONS = { units: new Map(), fold: 'none', blockAt: 'error', unproven: false } as const;
-const CHECK = checkPart(judged(deposit('5 mTorr')), [], OPTIONS).blocks;
+const CHECK = checkPart(judged(deposit('5 mTorr')), OPTIONS).blocks;
 
 const TABLE: Table = {
   kind: 'table',
@@ -96,10 +96,20 @@ describe('CSV', () => {
 
   test('has as many cells in every row as in the header', () => {
     const sheets = [
-      checkPart(judged(deposit('5 mTorr')), [], OPTIONS).sheet(),
+      checkPart(judged(deposit('5 mTorr')), OPTIONS).sheet(),
       tablePage(runOf(deposit('5 mTorr')), { units: new Map() }).sheet(),
     ];
     for (const { columns, rows } of sheets) for (const row of rows) expect(row).toHaveLength(columns.length);
+  });
+});
+
+describe('wrapping', () => {
+  test('leaves a number, its uncertainty and its unit together', () => {
+    expect(wrap('residual H2O 95 %, pressure 5.00 ± 0.12 mTorr', 17)).toEqual([
+      'residual H2O',
+      '95 %, pressure',
+      '5.00 ± 0.12 mTorr',
+    ]);
   });
 });
 

@@ -47,6 +47,17 @@ describe('a derivation', () => {
     expect(links.find(({ symbol }) => symbol === 'accuracy.fast-path')?.grounds).toMatch(/^assumed: /);
   });
 
+  test('says of a number that simply is another one which, not by what law', () => {
+    const gas = links.find(({ name }) => name === 'gas pressure');
+    const pressure = links.find(({ symbol }) => symbol === 'pressure');
+    expect(gas).toMatchObject({ from: [], grounds: `the same as ${pressure?.number ?? NaN}` });
+  });
+
+  test('names the counts that formulas fix', () => {
+    const impurity = derivePage(judgement, step.run, { reference: { id: 'impurity-ratio' } }, UNITS);
+    expect(chainOf(impurity.blocks).at(-1)?.grounds).toMatch(/; with 1 and 1 atoms by formula$/);
+  });
+
   test('closes with bound, source and verdict', () => {
     const text = drawText(blocks, { width: 132, colour: 0 }).replace(/\s+/g, ' ');
     expect(text).toContain('Bound: at least 1 (warning), at least 0.3 (error).');
@@ -60,9 +71,32 @@ describe('the regime table', () => {
     const { columns, rows } = tableOf(tablePage(runOf(deposit('5 mTorr')), { units: UNITS }).blocks);
     const titles = columns.map(({ title }) => title);
     expect(titles).toEqual(
-      expect.arrayContaining(['pressure', 'mean-free-path', 'Kn.gap', 'Kn.throw', 'residence-time', 'turnovers']),
+      expect.arrayContaining([
+        'pressure',
+        'mean-free-path',
+        'Kn.gap',
+        'Kn.throw:target',
+        'residence-time',
+        'turnovers',
+      ]),
     );
     expect(rows[0]?.[titles.indexOf('Kn.gap')]).toMatch(/^0\.\d+ ± 0\.\d+ transition/);
+  });
+
+  test('leaves the throw blank where no generator of the chamber delivers power', () => {
+    const wait = `  - name: wait
+    process: settle
+    time: 10 s
+    pressure: 5 mTorr
+    flows: { Ar: 40 sccm }
+`;
+    const { columns, rows } = tableOf(tablePage(runOf(deposit('5 mTorr') + wait), { units: UNITS }).blocks);
+    const at = columns.findIndex(({ title }) => title === 'Kn.throw:target');
+    expect(rows[0]?.[at]).toMatch(/^0\.\d+ ± /);
+    expect(rows[1]?.[at]).toBe('');
+    const idle = deposit('5 mTorr').replace('power: { magnetron: 4 kW }', 'power: { magnetron: 0 W }');
+    const judgedAll = tableOf(tablePage(runOf(idle), { units: UNITS }).blocks);
+    expect(judgedAll.columns.map(({ title }) => title)).toContain('Kn.throw:target');
   });
 
   test('takes other columns and other units', () => {
@@ -100,6 +134,10 @@ describe('lists', () => {
     expect(reads.get('knudsen')).toContain('mean-free-path');
     expect(reads.get('flow-rate')).toBe('flows.LINE');
     expect(reads.get('turnovers')).toBe('time residence-time');
+    expect(reads.get('heat-capacity')).toBe(
+      'gas-temperature gases.GAS.heat_capacity.N.temperature gases.GAS.heat_capacity.N.is',
+    );
+    expect(reads.get('mixture-free-path')).toBe('mole-fraction:SUBJECT mean-speed:SUBJECT mean-free-path:SUBJECT');
     for (const [id, text] of reads) expect(`${id}: ${text}`).not.toMatch(/[.:](?:Ar|N2|ti|al|process|plate)\b/);
   });
 
@@ -118,6 +156,13 @@ describe('lists', () => {
     );
     expect(rows.get('SiH4')).toEqual(expect.arrayContaining(['SiH4', expect.stringContaining('pyrophoric')]));
     for (const name of site.library.gasNames()) expect(rows.get(name)?.[5]).not.toBe('');
+  });
+
+  test('of units have factors to ten digits', () => {
+    const factors = new Map(tableOf(listUnits().blocks).rows.map(([, unit, factor]) => [unit, factor]));
+    expect(factors.get('atm')).toBe('101325 Pa');
+    expect(factors.get('Torr')).toBe('133.3223684 Pa');
+    expect(factors.get('angstrom')).toBe('1e-10 m');
   });
 
   test('of films and units have a source for each', () => {

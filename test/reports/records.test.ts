@@ -104,6 +104,15 @@ describe('the result of gas', () => {
     expect(GAS.errors).toBeNull();
   });
 
+  test('says of a gas beyond its vapour pressure that it condenses', () => {
+    const at = (temperature: number) => {
+      const run = gasRun(site.library, { parts: new Map([['H2O', 1]]), temperature, pressure: 2700 });
+      return gasRecord([{ name: 'H2O', run }], shownOf(site)).gases[0]?.remarks ?? [];
+    };
+    expect(at(293.15)).toEqual([expect.stringMatching(/^H2O condenses: .* is 1\.1\d* times its vapour pressure/)]);
+    expect(at(303.15)).toEqual([]);
+  });
+
   test('gives argon at 1 Pa and 20 degC a mean free path near 7 mm', () => {
     const path = gasRecord(states, shownOf(site)).gases[0]?.quantities.find(({ id }) => id === 'mean-free-path');
     expect(path !== undefined && 'value' in path ? path.value : NaN).toBeCloseTo(0.0071, 3);

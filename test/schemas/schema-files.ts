@@ -17,7 +17,7 @@ const ajv = withSchemas();
 
 /** The validator at a pointer of a schema file; the whole schema without one. */
 export function validator(file: string, pointer = ''): ValidateFunction {
-  return ajv.compile({ $ref: `https://regimen.invalid/schemas/${file}#${pointer}` });
+  return ajv.compile({ $ref: `${file}#${pointer}` });
 }
 
 /**

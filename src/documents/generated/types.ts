@@ -44,7 +44,7 @@ export interface Recipe {
    */
   title?: string;
   /**
-   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result and compared between two versions.
+   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result.
    */
   revision?: string;
   /**
@@ -60,7 +60,7 @@ export interface Recipe {
    */
   qualified_on?: string;
   /**
-   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and supply.
+   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and power density.
    */
   wafer?: Substrate | 'none' | 'unknown';
   throughout?: Throughout;
@@ -73,7 +73,7 @@ export interface Recipe {
  */
 export interface Throughout {
   /**
-   * How long the step lasts. Feeds turnovers, exposure and everything that runs in time; a range is judged at the usual value and at both limits.
+   * How long the step lasts. Feeds turnovers and exposure; a range is judged at the usual value and at both limits.
    */
   time?: Setpoint;
   /**
@@ -81,7 +81,7 @@ export interface Throughout {
    */
   pressure?: Setpoint;
   /**
-   * Stands in place of a pressure where the valve is set and the pressure follows: open, closed, or how far open.
+   * Stands in place of a pressure where the valve is set and the pressure follows: open, closed, or how far open. With the throttle open the pressure is what the pump leaves. A position is kept for later: no pressure is computed from it yet.
    */
   throttle?: Setpoint | 'open' | 'closed';
   /**
@@ -100,18 +100,18 @@ export interface Throughout {
   melts?: MeltsRun;
   lengths?: Lengths;
   /**
-   * Gas behind the wafer; `none` where there is none. Feeds the heat that crosses the gap to the chuck.
+   * Gas behind the wafer; `none` where there is none. Kept for later: nothing is computed from it yet.
    */
   backside?: BacksideGas | 'none' | 'unknown';
   body?: Body;
   /**
-   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and supply.
+   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and power density.
    */
   wafer?: Substrate | 'none' | 'unknown';
   other?: Other;
 }
 /**
- * Flow through each gas line, by the line's name in the chamber. Feeds mole fractions, residence time, utilisation and carry-over. `{}` says that nothing flows.
+ * Flow through each gas line, by the line's name in the chamber. Feeds mole fractions, residence time and utilisation. `{}` says that nothing flows.
  */
 export interface Flows {
   /**
@@ -137,7 +137,7 @@ export interface Temperatures {
    */
   wall?: Setpoint | Zones;
   /**
-   * Temperature of the wafer's face. Feeds the mean free path in features, surface rates and saturation.
+   * Temperature of the wafer's face. Feeds the mean free path in features, the gas temperature where that is not given, and the Rayleigh number.
    */
   wafer?: Setpoint;
   /**
@@ -145,12 +145,12 @@ export interface Temperatures {
    */
   gas?: Setpoint;
   /**
-   * Temperature of the surface below the wafer. Feeds the heat conducted by the gas behind the wafer.
+   * Temperature of the surface below the wafer. Kept for later: nothing is computed from it yet.
    */
   chuck?: Setpoint;
 }
 /**
- * Power of each generator, by its name in the chamber. Feeds power density and, with the bias voltage, the ion current.
+ * Power of each generator, by its name in the chamber. Feeds power density, and tells that the gas is that of a plasma.
  */
 export interface Power {
   /**
@@ -159,40 +159,40 @@ export interface Power {
   [k: string]: Setpoint;
 }
 /**
- * Share of the time in which a pulsed generator is on, by its name in the chamber.
+ * Share of the time in which a pulsed generator is on, by its name in the chamber. Kept for later: nothing is computed from it yet.
  */
 export interface Duty {
   /**
-   * Share of the time in which this generator is on.
+   * Share of the time in which this generator is on. Kept for later: nothing is computed from it yet.
    */
   [k: string]: Setpoint;
 }
 /**
- * What is known of the plasma. Feeds the sheath's thickness and how often an ion collides in it.
+ * What is known of the plasma. Kept for later: nothing is computed from it yet.
  */
 export interface Plasma {
   /**
-   * Self-bias of the wafer's electrode, by its size; a minus sign changes nothing. Feeds the sheath's thickness and the ion energy.
+   * Self-bias of the wafer's electrode, by its size; a minus sign changes nothing. Kept for later: nothing is computed from it yet.
    */
   bias_voltage?: Setpoint;
   /**
-   * Temperature of the bulk electrons. Feeds Debye length, Bohm speed and sheath.
+   * Temperature of the bulk electrons. Kept for later: nothing is computed from it yet.
    */
   electron_temperature?: Setpoint;
   /**
-   * Electrons in a volume of bulk plasma; at the sheath's edge 0.61 of it. Feeds Debye length and sheath.
+   * Electrons in a volume of bulk plasma. Kept for later: nothing is computed from it yet.
    */
   electron_density?: Setpoint;
   /**
-   * Thickness of the sheath where it was measured. Wins over every formula.
+   * Thickness of the sheath where it was measured. Kept for later: nothing is computed from it yet.
    */
   sheath?: Setpoint;
   /**
-   * The ion that crosses the sheath. Without it that of the most abundant gas.
+   * The ion that crosses the sheath. Kept for later: nothing is computed from it yet.
    */
   ion?: string;
   /**
-   * Ion current over the wafer's area, measured. Gives the sheath where the electron density is not known.
+   * Ion current over the wafer's area, measured. Kept for later: nothing is computed from it yet.
    */
   ion_current?: Setpoint;
 }
@@ -221,11 +221,11 @@ export interface Surface {
    */
   product?: string;
   /**
-   * Share of the sites that a dose is meant to fill. Without it 95 %. Feeds the saturation exposure.
+   * Share of the sites that a dose is meant to fill. Kept for later: nothing is computed from it yet.
    */
   coverage?: Setpoint;
   /**
-   * Real surface over the wafer's flat area, for patterned wafers. Feeds the supply of a dose.
+   * Real surface over the wafer's flat area, for patterned wafers. Kept for later: nothing is computed from it yet.
    */
   enhancement?: Setpoint;
 }
@@ -238,11 +238,11 @@ export interface Reactant {
    */
   gas: string;
   /**
-   * Probability that a molecule that hits an open site reacts. Feeds the flux at the bottom of a feature, the saturation exposure and the surface rate.
+   * Probability that a molecule that hits an open site reacts. Feeds the surface rate and the monolayer time.
    */
   sticking?: Setpoint;
   /**
-   * Molecules that a real area takes up until it is full. Feeds monolayer time and saturation exposure; without it 1e19 1/m2.
+   * Molecules that a real area takes up until it is full. Feeds the monolayer time; without it 1e19 1/m2.
    */
   site_density?: Setpoint;
 }
@@ -318,7 +318,7 @@ export interface Lengths {
   [k: string]: Setpoint | undefined;
 }
 /**
- * The gas space: a cylinder, unless volume and wall area are given. Feeds residence time, the chamber's Knudsen number, wall losses and bulk velocity.
+ * The gas space: a cylinder, unless volume and wall area are given. Feeds residence time, the chamber's Knudsen number, wall collisions and bulk velocity.
  */
 export interface Body {
   /**
@@ -334,11 +334,11 @@ export interface Body {
    */
   length?: Fixed | Unknown;
   /**
-   * Lengths of a tube's heated zones, in order from the gas inlet.
+   * Lengths of a tube's heated zones, in order from the gas inlet. Kept for later: nothing is computed from it yet.
    *
    * @minItems 1
    *
-   * Items: Length of this zone.
+   * Items: Length of this zone. Kept for later: nothing is computed from it yet.
    */
   zones?: [Fixed | Unknown, ...(Fixed | Unknown)[]];
   /**
@@ -346,16 +346,16 @@ export interface Body {
    */
   flow?: 'mixed' | 'radial' | 'axial';
   /**
-   * Whole gas volume up to the throttle, measured. Wins over the cylinder. Feeds residence time and carry-over.
+   * Whole gas volume up to the throttle, measured. Wins over the cylinder. Feeds residence time, turnovers and the leak rate.
    */
   volume?: Fixed | Unknown;
   /**
-   * Whole inner surface that the gas meets, measured. Wins over the cylinder. Feeds wall collisions and losses of radicals.
+   * Whole inner surface that the gas meets, measured. Wins over the cylinder. Feeds wall collisions.
    */
   wall_area?: Fixed | Unknown;
 }
 /**
- * Setpoints that nothing judges. Their units are checked, and two versions of the recipe are compared by them.
+ * Setpoints that nothing judges. Their units are checked.
  */
 export interface Other {
   /**
@@ -364,15 +364,15 @@ export interface Other {
   [k: string]: string | number;
 }
 /**
- * What the chamber holds before the first step. Without it the end of the recipe's own last step.
+ * What the chamber holds before the first step. Kept for later: nothing is computed from it yet.
  */
 export interface StartsIn {
   /**
-   * Pressure before the first step.
+   * Pressure before the first step. Kept for later: nothing is computed from it yet.
    */
   pressure?: Fixed | Unknown;
   /**
-   * Mole fraction of this gas, bare or in percent, or `rest`.
+   * Mole fraction of this gas, bare or in percent, or `rest`. Kept for later: nothing is computed from it yet.
    */
   [k: string]: (Fixed | Unknown | Rest) | (Fixed | Unknown) | undefined;
 }
@@ -418,7 +418,7 @@ export interface Chamber {
    */
   title?: string;
   /**
-   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result and compared between two versions.
+   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result.
    */
   revision?: string;
   /**
@@ -437,7 +437,7 @@ export interface Chamber {
   gas_lines?: GasLines;
   flow_reference?: FlowReference;
   /**
-   * Least and greatest value of a setpoint that the chamber is to be run at, by the setpoint's address. A step beyond them is a finding; cures and windows stay within them.
+   * Least and greatest value of a setpoint that the chamber is to be run at, by the setpoint's address. A step beyond them is a finding.
    */
   limits?: {
     [k: string]: Limits;
@@ -449,7 +449,7 @@ export interface Chamber {
   boat?: Boat;
 }
 /**
- * Lengths that Knudsen numbers, path counts and diffusion times are taken against. Throw, pitch, hole, feature and the space behind the wafer come from targets, boat, inlets, wafer and chuck.
+ * Lengths that Knudsen numbers, path counts and diffusion times are taken against. Throw, pitch, hole and feature come from targets and melts, boat, inlets and wafer.
  */
 export interface ChamberLengths {
   /**
@@ -511,11 +511,11 @@ export interface Generators {
  */
 export interface Generator {
   /**
-   * Its frequency; without it direct current. A driven electrode has a thicker sheath than a direct-current one.
+   * Its frequency; without it direct current. Kept for later: nothing is computed from it yet.
    */
   frequency?: Fixed | Unknown;
   /**
-   * Greatest power that it delivers.
+   * Greatest power that it delivers. Kept for later: nothing is computed from it yet.
    */
   full_scale?: Fixed | Unknown;
 }
@@ -524,7 +524,7 @@ export interface Generator {
  */
 export interface Electrode {
   /**
-   * Diameter of the driven plate. Feeds the residence time in the plasma, power density and ion current.
+   * Diameter of the driven plate. Feeds the residence time in the plasma, flow per area and power density.
    */
   diameter: Fixed | Unknown;
 }
@@ -533,7 +533,7 @@ export interface Electrode {
  */
 export interface Walls {
   /**
-   * Wall material, by its name among the walls. Published recombination and accommodation come with it.
+   * Wall material, by its name among the walls. Kept for later: nothing is computed from it yet.
    */
   material?: string;
   recombination?: Recombination;
@@ -543,24 +543,24 @@ export interface Walls {
   deposited_area?: Fixed | Unknown;
 }
 /**
- * Probability that a radical is lost where it hits the wall, by radical, measured on this chamber. Feeds how many radicals survive.
+ * Probability that a radical is lost where it hits the wall, by radical, measured on this chamber. Kept for later: nothing is computed from it yet.
  */
 export interface Recombination {
   /**
-   * Loss probability of this radical, with a tolerance or within limits where it is known no better.
+   * Loss probability of this radical, with a tolerance or within limits where it is known no better. Kept for later: nothing is computed from it yet.
    */
   [k: string]: Fixed | Range | Unknown;
 }
 /**
- * What the wafer lies on. Feeds the heat that gas carries across the gap behind the wafer.
+ * What the wafer lies on. Kept for later: nothing is computed from it yet.
  */
 export interface Chuck {
   /**
-   * Mean distance between wafer and chuck. Gives the Knudsen number behind the wafer.
+   * Mean distance between wafer and chuck. Kept for later: nothing is computed from it yet.
    */
   backside_gap?: Fixed | Unknown;
   /**
-   * How fully a molecule takes on the temperature of what it hits, 0 to 1, of the gas behind the wafer. Without it a value for the gas, shown as assumed.
+   * How fully a molecule takes on the temperature of what it hits, 0 to 1, of the gas behind the wafer. Kept for later: nothing is computed from it yet.
    */
   accommodation?: Fixed | Unknown;
 }
@@ -577,17 +577,17 @@ export interface Pump {
    */
   lowest_speed?: Fixed | Unknown;
   /**
-   * Speed against the throttle's position, from shut to open. Between two points it is taken as straight.
+   * Speed against the throttle's position, from shut to open. Kept for later: nothing is computed from it yet.
    *
    * @minItems 2
    */
   throttle?: [ThrottlePoint, ThrottlePoint, ...ThrottlePoint[]];
   /**
-   * Time that the throttle takes from shut to open. Without it none.
+   * Time that the throttle takes from shut to open. Kept for later: nothing is computed from it yet.
    */
   travel?: Fixed | Unknown;
   /**
-   * Time constant with which the pressure controller follows its setpoint. Without it it follows at once.
+   * Time constant with which the pressure controller follows its setpoint. Kept for later: nothing is computed from it yet.
    */
   response?: Fixed | Unknown;
   /**
@@ -606,15 +606,15 @@ export interface Pump {
   reference?: PumpReference;
 }
 /**
- * Speed at one position of the throttle.
+ * Speed at one position of the throttle. Kept for later: nothing is computed from it yet.
  */
 export interface ThrottlePoint {
   /**
-   * How far the throttle is open.
+   * How far the throttle is open. Kept for later: nothing is computed from it yet.
    */
   at: Fixed | Unknown;
   /**
-   * Pumping speed at that position.
+   * Pumping speed at that position. Kept for later: nothing is computed from it yet.
    */
   is: Fixed | Unknown;
 }
@@ -660,7 +660,7 @@ export interface Gauge {
    */
   usable_from?: Fixed | Unknown;
   /**
-   * Gas for which an indirect gauge reads true. A gauge that reads every gas alike has none.
+   * Gas for which an indirect gauge reads true. A gauge that reads every gas alike has none. Kept for later: nothing is computed from it yet.
    */
   calibrated_for?: string;
 }
@@ -690,7 +690,7 @@ export interface GasLine {
    */
   accuracy?: Accuracy;
   /**
-   * Time constant with which the flow follows its setpoint. Without it it follows at once.
+   * Time constant with which the flow follows its setpoint. Kept for later: nothing is computed from it yet.
    */
   response?: Fixed | Unknown;
 }
@@ -703,7 +703,7 @@ export interface Draws {
    */
   gas: string;
   /**
-   * Temperature of the source. Gives the vapour pressure.
+   * Temperature of the source. Kept for later: nothing is computed from it yet.
    */
   temperature?: Fixed | Unknown;
 }
@@ -768,11 +768,11 @@ export interface Limits {
   at_most?: string | number;
 }
 /**
- * What is done with the gas behind the pump. Only cautions use it.
+ * What is done with the gas behind the pump. Kept for later: nothing is computed from it yet.
  */
 export interface Exhaust {
   /**
-   * Inert gas that is added behind the pump. Cautions hold flammable gas in the exhaust against it.
+   * Inert gas that is added behind the pump. Kept for later: nothing is computed from it yet.
    */
   dilution: Fixed | Unknown;
 }
@@ -795,7 +795,7 @@ export interface Target {
    */
   throw?: Fixed | Unknown;
   /**
-   * Name of the generator that drives it.
+   * Name of the generator that drives it, one of those of the chamber. Kept for later: nothing is computed from it yet.
    */
   generator?: string;
 }
@@ -823,11 +823,11 @@ export interface Melt {
  */
 export interface Boat {
   /**
-   * How many wafers the boat can hold. How many it does hold is the recipe's count.
+   * How many wafers the boat can hold. How many it does hold is the recipe's count. Kept for later: nothing is computed from it yet.
    */
   slots?: Fixed | Unknown;
   /**
-   * From one wafer to the next. Less the wafer's thickness it is the space that gas has to diffuse into; feeds the Thiele modulus.
+   * From one wafer to the next. Numbers of the length pitch, such as knudsen.pitch, are taken against it.
    */
   pitch?: Fixed | Unknown;
 }
@@ -848,7 +848,7 @@ export interface Substances {
    */
   title?: string;
   /**
-   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result and compared between two versions.
+   * Your own revision of this document, in quotes so that 1.10 stays 1.10.
    */
   revision?: string;
   /**
@@ -860,7 +860,7 @@ export interface Substances {
   films?: Films;
   ions?: Ions;
   /**
-   * Wall materials, by the names that chambers use.
+   * Wall materials, by the names that chambers use. Kept for later: nothing is computed from it yet.
    */
   walls?: {
     [k: string]: Wall;
@@ -899,19 +899,19 @@ export interface Gas {
   vapour_pressure?: VapourPressure;
   breakdown?: Breakdown;
   /**
-   * Whether the gas stays on surfaces, as water, ammonia and metal halides do. A purge of it that passes by the volume alone is then only to be reviewed.
+   * Whether the gas stays on surfaces, as water, ammonia and metal halides do. Kept for later: nothing is computed from it yet.
    */
   clings?: boolean;
   /**
-   * Temperature above which the gas falls apart. Numbers that rest on the gas itself then carry a remark.
+   * Temperature above which the gas falls apart. Kept for later: nothing is computed from it yet.
    */
   decomposes_above?: Fixed | SourcedTemperature;
   /**
-   * How its molecules join, in words, where its numbers then no longer hold.
+   * How its molecules join, in words, where its numbers then no longer hold. Printed where the gas is shown.
    */
   associates?: string;
   /**
-   * Whether it takes no part in any reaction here. An inert gas is no co-reactant and no impurity.
+   * Whether it takes no part in any reaction here. An inert gas is no impurity.
    */
   inert?: boolean;
   /**
@@ -1024,7 +1024,7 @@ export interface HeatCapacityPoint {
   is: Fixed;
 }
 /**
- * Antoine's equation in SI: the decimal logarithm of p in Pa is a - b/(T + c), T in K. Feeds vapour lines, and the check that a vapour does not condense.
+ * Antoine's equation in SI: the decimal logarithm of p in Pa is a - b/(T + c), T in K. Feeds lines that bubble, and the check that a vapour does not condense.
  */
 export interface VapourPressure {
   /**
@@ -1053,27 +1053,27 @@ export interface VapourPressure {
   source: string;
 }
 /**
- * Townsend's constants of the gas in SI. Feeds the Paschen voltage, within the range of the fit.
+ * Townsend's constants of the gas in SI. Kept for later: nothing is computed from it yet.
  */
 export interface Breakdown {
   /**
-   * Ionisations over pressure and length, in 1/(Pa m).
+   * Ionisations over pressure and length, in 1/(Pa m). Kept for later: nothing is computed from it yet.
    */
   a: number;
   /**
-   * Field over pressure, in V/(Pa m).
+   * Field over pressure, in V/(Pa m). Kept for later: nothing is computed from it yet.
    */
   b: number;
   /**
-   * Least field over pressure of the fit, in V/(Pa m).
+   * Least field over pressure of the fit, in V/(Pa m). Kept for later: nothing is computed from it yet.
    */
   from?: number;
   /**
-   * Greatest field over pressure of the fit, in V/(Pa m).
+   * Greatest field over pressure of the fit, in V/(Pa m). Kept for later: nothing is computed from it yet.
    */
   to?: number;
   /**
-   * Electrons set free for each ion that hits the cathode.
+   * Electrons set free for each ion that hits the cathode. Kept for later: nothing is computed from it yet.
    */
   secondary_emission?: Fixed;
   /**
@@ -1082,15 +1082,15 @@ export interface Breakdown {
   source: string;
 }
 /**
- * Shares in air between which it burns. Only cautions use it.
+ * Shares in air between which it burns. Kept for later: nothing is computed from it yet.
  */
 export interface FlammableRange {
   /**
-   * Least share in air that burns.
+   * Least share in air that burns. Kept for later: nothing is computed from it yet.
    */
   at_least: Fixed;
   /**
-   * Greatest share in air that burns.
+   * Greatest share in air that burns. Kept for later: nothing is computed from it yet.
    */
   at_most?: Fixed;
   /**
@@ -1129,7 +1129,7 @@ export interface Atom {
    */
   sublimation_enthalpy?: Fixed | SourcedEnergy;
   /**
-   * Static dipole polarisability in cubic angstrom, without a unit. Pairs may be estimated from it.
+   * Static dipole polarisability in cubic angstrom, without a unit. The built-in pairs were estimated from it. Kept for later: nothing is computed from it yet.
    */
   polarisability_angstrom3?: Fixed | SourcedNumber;
   pairs?: Pairs;
@@ -1202,7 +1202,7 @@ export interface Film {
    */
   molar_mass?: Fixed | SourcedMolarMass;
   /**
-   * Sites on an area of its surface.
+   * Sites on an area of its surface. Kept for later: nothing is computed from it yet.
    */
   site_density?: Fixed | SourcedSiteDensity;
   /**
@@ -1221,13 +1221,13 @@ export interface Film {
   source?: string;
 }
 /**
- * Ions that cross a sheath, by the names that recipes use.
+ * Ions that cross a sheath, by the names that recipes use. Kept for later: nothing is computed from it yet.
  */
 export interface Ions {
   [k: string]: Ion;
 }
 /**
- * An ion that crosses the sheath.
+ * An ion that crosses the sheath. Kept for later: nothing is computed from it yet.
  */
 export interface Ion {
   /**
@@ -1235,11 +1235,11 @@ export interface Ion {
    */
   title?: string;
   /**
-   * Chemical formula, brackets allowed. The element balance counts its atoms.
+   * Chemical formula, brackets allowed. Kept for later: nothing is computed from it yet.
    */
   formula?: string;
   /**
-   * Mass of a mole. Without it that of the gas of its name.
+   * Mass of a mole. Without it that of the gas of its name. Kept for later: nothing is computed from it yet.
    */
   molar_mass?: Fixed | SourcedMolarMass;
   cross_sections?: CrossSections;
@@ -1260,21 +1260,21 @@ export interface Ion {
   source?: string;
 }
 /**
- * Cross-section for losing its direction in a collision, by gas. Feeds the ion's free path in the sheath.
+ * Cross-section for losing its direction in a collision, by gas. Kept for later: nothing is computed from it yet.
  */
 export interface CrossSections {
   [k: string]: CrossSection;
 }
 /**
- * One value, or values by energy, with their source.
+ * One value, or values by energy, with their source. Kept for later: nothing is computed from it yet.
  */
 export interface CrossSection {
   /**
-   * The cross-section at the energies of a sheath.
+   * The cross-section at the energies of a sheath. Kept for later: nothing is computed from it yet.
    */
   is?: Fixed;
   /**
-   * Cross-sections from low to high energy. Between two points it is taken as straight.
+   * Cross-sections from low to high energy. Kept for later: nothing is computed from it yet.
    *
    * @minItems 1
    */
@@ -1285,26 +1285,26 @@ export interface CrossSection {
   source: string;
 }
 /**
- * Cross-section at one energy.
+ * Cross-section at one energy. Kept for later: nothing is computed from it yet.
  */
 export interface CrossSectionPoint {
   /**
-   * Energy of the ion.
+   * Energy of the ion. Kept for later: nothing is computed from it yet.
    */
   energy: Fixed;
   /**
-   * Cross-section at that energy.
+   * Cross-section at that energy. Kept for later: nothing is computed from it yet.
    */
   is: Fixed;
 }
 /**
- * Cross-section for handing over its charge, by gas. Most collisions in a sheath are of this kind: energy is lost, direction mostly kept.
+ * Cross-section for handing over its charge, by gas. Kept for later: nothing is computed from it yet.
  */
 export interface ChargeExchange {
   [k: string]: CrossSection;
 }
 /**
- * A wall material.
+ * A wall material. Kept for later: nothing is computed from it yet.
  */
 export interface Wall {
   /**
@@ -1312,7 +1312,7 @@ export interface Wall {
    */
   title?: string;
   /**
-   * Probability that a radical is lost where it hits the wall, by radical. Feeds how many radicals survive; a range is judged at both ends.
+   * Probability that a radical is lost where it hits the wall, by radical. Kept for later: nothing is computed from it yet.
    */
   recombination?: {
     [k: string]: Probability;
@@ -1334,11 +1334,11 @@ export interface Wall {
   source?: string;
 }
 /**
- * A probability between 0 and 1 with its source.
+ * A probability between 0 and 1 with its source. Kept for later: nothing is computed from it yet.
  */
 export interface Probability {
   /**
-   * The value, with a tolerance, or within limits where it is known no better.
+   * The value, with a tolerance, or within limits where it is known no better. Kept for later: nothing is computed from it yet.
    */
   is: Fixed | Range | Unknown;
   /**
@@ -1347,7 +1347,7 @@ export interface Probability {
   source: string;
 }
 /**
- * How fully a gas takes on the wall's temperature, by gas. Feeds the heat that gas carries behind a wafer.
+ * How fully a gas takes on the wall's temperature, by gas. Kept for later: nothing is computed from it yet.
  */
 export interface Accommodation {
   [k: string]: Probability;
@@ -1369,7 +1369,7 @@ export interface Process {
    */
   title: string;
   /**
-   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result and compared between two versions.
+   * Your own revision of this document, in quotes so that 1.10 stays 1.10.
    */
   revision?: string;
   /**
@@ -1405,7 +1405,7 @@ export interface Assumption {
    */
   statement: string;
   /**
-   * The number that is judged, by its name: its id, then where needed a length, a subject and an instant.
+   * The number that is judged, by its name: its id, then where needed a length and a subject.
    */
   quantity: string;
   /**
@@ -1429,11 +1429,11 @@ export interface Assumption {
    */
   when?: 'given';
   /**
-   * Grade of a review that a rule forces: a gas that clings, a lower bound, a picture that may not hold. Without it note.
+   * Grade of a review whose uncertainty is mostly that of assumed values. Without it note.
    */
   review_level?: 'note' | 'warning' | 'error';
   /**
-   * Addresses of setpoints that may be moved to meet the bound. Each is solved for on its own; `flows` moves all together.
+   * Addresses of setpoints that may be moved to meet the bound. A finding points at the first of them that the recipe states; where the bound would be met is not solved for yet.
    *
    * Items: Address of one setpoint.
    */
@@ -1479,7 +1479,7 @@ export interface Site {
    */
   title?: string;
   /**
-   * Your own revision of this document, in quotes so that 1.10 stays 1.10. It is printed with every result and compared between two versions.
+   * Your own revision of this document, in quotes so that 1.10 stays 1.10.
    */
   revision?: string;
   /**
@@ -1635,26 +1635,26 @@ export interface Show {
   velocity?: string;
 }
 /**
- * How long a gas that clings takes to leave the walls, by gas and wall temperature, measured here. Purges of it are then judged by these times.
+ * How long a gas that clings takes to leave the walls, by gas and wall temperature, measured here. Kept for later: nothing is computed from it yet.
  */
 export interface Clearing {
   /**
-   * Times from low to high wall temperature; between two points the logarithm is taken as straight.
+   * Times from low to high wall temperature. Kept for later: nothing is computed from it yet.
    *
    * @minItems 1
    */
   [k: string]: [ClearingPoint, ...ClearingPoint[]];
 }
 /**
- * Time to leave at one wall temperature.
+ * Time to leave at one wall temperature. Kept for later: nothing is computed from it yet.
  */
 export interface ClearingPoint {
   /**
-   * Wall temperature.
+   * Wall temperature. Kept for later: nothing is computed from it yet.
    */
   wall: Fixed | Unknown;
   /**
-   * Time after which no more of it comes off the wall.
+   * Time after which no more of it comes off the wall. Kept for later: nothing is computed from it yet.
    */
   time: Fixed | Unknown;
 }
@@ -1787,19 +1787,19 @@ export interface Zones {
   zones: [Setpoint, ...Setpoint[]];
 }
 /**
- * Gas, pressure and heat behind the wafer.
+ * Gas, pressure and heat behind the wafer. Kept for later: nothing is computed from it yet.
  */
 export interface BacksideGas {
   /**
-   * Gas that carries the heat.
+   * Gas that carries the heat. Kept for later: nothing is computed from it yet.
    */
   gas: string;
   /**
-   * Pressure behind the wafer. Feeds its Knudsen number and the heat conducted.
+   * Pressure behind the wafer. Kept for later: nothing is computed from it yet.
    */
   pressure?: Setpoint;
   /**
-   * Heat that the wafer takes up from the process. Gives how far it warms above the chuck.
+   * Heat that the wafer takes up from the process. Kept for later: nothing is computed from it yet.
    */
   heat_load?: Setpoint;
 }
@@ -1820,7 +1820,7 @@ export interface Substrate {
    */
   length?: Setpoint;
   /**
-   * Thickness of a wafer. Together with the boat's pitch it leaves the space between wafers.
+   * Thickness of a wafer. Kept for later: nothing is computed from it yet.
    */
   thickness?: Setpoint;
   /**
@@ -1841,7 +1841,7 @@ export interface Substrate {
  */
 export interface Feature {
   /**
-   * A round hole or a long trench. A trench counts as half as deep as a hole of its aspect ratio.
+   * A round hole or a long trench. Kept for later: nothing is computed from it yet.
    */
   shape: 'hole' | 'trench';
   /**
@@ -1849,7 +1849,7 @@ export interface Feature {
    */
   width?: Setpoint;
   /**
-   * Depth to the bottom, mask included. Gives the aspect ratio.
+   * Depth to the bottom, mask included. Kept for later: nothing is computed from it yet.
    */
   depth?: Setpoint;
 }
@@ -1862,7 +1862,7 @@ export interface Cycle {
    */
   name: string;
   /**
-   * How often the steps are run through. A range is judged at the usual value and at both limits.
+   * How often the steps are run through. Gives the whole time of the recipe, of a range by its usual value.
    */
   repeat: Setpoint;
   /**
@@ -1902,7 +1902,7 @@ export interface Step {
    */
   remark?: string;
   /**
-   * How long the step lasts. Feeds turnovers, exposure and everything that runs in time; a range is judged at the usual value and at both limits.
+   * How long the step lasts. Feeds turnovers and exposure; a range is judged at the usual value and at both limits.
    */
   time?: Setpoint;
   /**
@@ -1910,7 +1910,7 @@ export interface Step {
    */
   pressure?: Setpoint;
   /**
-   * Stands in place of a pressure where the valve is set and the pressure follows: open, closed, or how far open.
+   * Stands in place of a pressure where the valve is set and the pressure follows: open, closed, or how far open. With the throttle open the pressure is what the pump leaves. A position is kept for later: no pressure is computed from it yet.
    */
   throttle?: Setpoint | 'open' | 'closed';
   /**
@@ -1929,12 +1929,12 @@ export interface Step {
   melts?: MeltsRun;
   lengths?: Lengths;
   /**
-   * Gas behind the wafer; `none` where there is none. Feeds the heat that crosses the gap to the chuck.
+   * Gas behind the wafer; `none` where there is none. Kept for later: nothing is computed from it yet.
    */
   backside?: BacksideGas | 'none' | 'unknown';
   body?: Body;
   /**
-   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and supply.
+   * What lies in the chamber; `none` where nothing does. Its area feeds utilisation, flow per area and power density.
    */
   wafer?: Substrate | 'none' | 'unknown';
   other?: Other;

@@ -5,7 +5,7 @@ export function wrap(text: string, width: number): readonly string[] {
   if (widthOf(text) <= width) return [text];
   const lines: string[] = [];
   let line = '';
-  for (const word of text.split(' ')) {
+  for (const word of wordsOf(text, width)) {
     const longer = line === '' ? word : `${line} ${word}`;
     if (line !== '' && widthOf(longer) > width) {
       lines.push(line);
@@ -13,6 +13,34 @@ export function wrap(text: string, width: number): readonly string[] {
     } else line = longer;
   }
   return line === '' ? lines : [...lines, line];
+}
+
+/** Words, a number with its uncertainty and its unit being one where the width allows it. */
+function wordsOf(text: string, width: number): readonly string[] {
+  const words: string[] = [];
+  let last = '';
+  let before = '';
+  for (const piece of text.split(' ')) {
+    const joined = `${last} ${piece}`;
+    const isTied = before === '±' || (isNumber(before) && !isNumber(piece));
+    if (isTied && widthOf(joined) <= width) last = joined;
+    else {
+      words.push(last);
+      last = piece;
+    }
+    before = piece;
+  }
+  return [...words.slice(1), last];
+}
+
+/** Whether a word is a number, as far as its ends tell; a unit such as `1/(cm2` has a stroke. */
+function isNumber(word: string): boolean {
+  const begin = word.charCodeAt(word.startsWith('-') ? 1 : 0);
+  return isDigit(begin) && isDigit(word.charCodeAt(word.length - 1)) && !word.includes('/');
+}
+
+function isDigit(code: number): boolean {
+  return code >= 48 && code <= 57;
 }
 
 /** Columns that a text without styles takes up. Most texts are Latin and Greek, which are counted without further ado. */

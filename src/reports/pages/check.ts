@@ -5,8 +5,6 @@ import { noteText } from '../notes.ts';
 import type { CheckOptions, Fold } from '../options.ts';
 import type { Block, CycleBlock, Page, RecipeHead, StepBlock } from '../page.ts';
 import { shownFor, type Shown } from '../shown.ts';
-import type { Fault } from '../../shelf/fault.ts';
-import { faultBlocks } from './faults.ts';
 import { checkSheet } from './check-sheet.ts';
 import { cycleBlock, stepBlock } from './check-step.ts';
 import { outcomeWords } from './outcome.ts';
@@ -17,13 +15,15 @@ export interface Part extends Page {
   readonly counts: Counts;
 }
 
-/** One recipe, judged, with the faults of its document; those that judging found are in the judgement. It depends on nothing but that recipe. */
-export function checkPart(judgement: Judgement, faults: readonly Fault[], options: CheckOptions): Part {
+/**
+ * One recipe, judged. It depends on nothing but that recipe. Its faults are not told here: those of a chamber come with
+ * each of its recipes, and a run tells them once.
+ */
+export function checkPart(judgement: Judgement, options: CheckOptions): Part {
   const shown = shownFor(judgement.run, options.units);
-  const all = [...faults, ...judgement.faults];
   return {
-    blocks: [...faultBlocks(all), ...recipeBlocks(judgement, shown, options)],
-    counts: countJudgement(judgement, all.length),
+    blocks: recipeBlocks(judgement, shown, options),
+    counts: countJudgement(judgement),
     sheet: () => checkSheet(judgement, shown),
   };
 }

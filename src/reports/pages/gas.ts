@@ -9,6 +9,7 @@ import { dimensionOfNumber, filled } from '../number.ts';
 import { print, type Shown } from '../shown.ts';
 import { capital, listed, numberWords, sentence } from '../words.ts';
 import { hazardClauses, practice } from '../cautions.ts';
+import { condensingSentences } from '../condensing.ts';
 import { numberCells } from './table.ts';
 
 /** One gas or mixture at its temperature and pressure. */
@@ -77,6 +78,7 @@ function stateBlocks(state: GasState, shown: Shown): readonly Block[] {
       }),
       key: 0,
     },
+    ...condensingSentences(run).map((text) => ({ kind: 'sentence' as const, weight: 'first' as const, text })),
     ...[...remarks.map(sentence), ...dataSentences(state)].map((text) => ({
       kind: 'sentence' as const,
       weight: 'detail' as const,

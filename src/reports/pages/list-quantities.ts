@@ -3,7 +3,7 @@ import type { Quantity } from '../../quantities/quantity.ts';
 import type { Library } from '../../substances/library.ts';
 import { DIMENSIONS } from '../../units/dimensions.ts';
 import type { Page } from '../page.ts';
-import { readsOf } from '../reads-of.ts';
+import { needsLength, readsOf } from '../reads-of.ts';
 import { listed, sentence } from '../words.ts';
 
 /** Every number of the catalogue: what it is, its law, and what it is read from. */
@@ -41,14 +41,6 @@ export function listQuantities(library: Library): Page {
 /** The id with what may follow it: `knudsen.LENGTH[:SUBJECT]`. */
 function nameOf({ id, lengths, subjects, whole }: Quantity): string {
   const subject = subjects === undefined ? '' : whole === true ? '[:SUBJECT]' : ':SUBJECT';
-  const length = lengths === undefined ? '' : MUST_HAVE_LENGTH.has(id) ? '.LENGTH' : '[.LENGTH]';
+  const length = lengths === undefined ? '' : needsLength(id) ? '.LENGTH' : '[.LENGTH]';
   return `${id}${length}${subject}`;
 }
-
-const MUST_HAVE_LENGTH: ReadonlySet<string> = new Set([
-  'length',
-  'pressure-distance',
-  'collisions-straight',
-  'collisions-walk',
-  'diffusion-time',
-]);

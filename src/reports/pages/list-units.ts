@@ -1,7 +1,6 @@
 import { DIMENSIONS, DIMENSION_NAMES } from '../../units/dimensions.ts';
 import { unitsOf } from '../../units/lookup.ts';
 import type { Unit } from '../../units/table.ts';
-import { printNumber } from '../../units/display.ts';
 import type { Page } from '../page.ts';
 
 /** Every unit that a document may be written in, by dimension, with its factor and where that comes from. */
@@ -50,5 +49,10 @@ export function listUnits(): Page {
 function factorText({ factor, offset, dimension }: Unit): string {
   const { si } = DIMENSIONS[dimension];
   const unit = si === '1' ? '' : ` ${si}`;
-  return `${printNumber(factor)}${unit}${offset === undefined ? '' : ` + ${offset}${unit}`}`;
+  return `${exact(factor)}${unit}${offset === undefined ? '' : ` + ${offset}${unit}`}`;
+}
+
+/** Factors are exact, or quotients of exact numbers, which ten digits tell as well as anybody can use. */
+function exact(factor: number): string {
+  return String(Number(factor.toPrecision(10))).replace('e+', 'e');
 }

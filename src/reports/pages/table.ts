@@ -1,9 +1,9 @@
-import { quantityNamed } from '../../quantities/catalogue.ts';
 import { referenceName, type Reference } from '../../quantities/reference.ts';
 import type { Run, StepRun } from '../../quantities/run.ts';
 import { printNumber } from '../../units/display.ts';
 import type { Block, Page, Sheet } from '../page.ts';
 import { dimensionOfNumber, unitOfNumber } from '../number.ts';
+import { knudsenNumbers, noThrow, STATE, STAY } from '../regime-numbers.ts';
 import { bandOf, inUnit, print, shownFor, spreadInUnit, type AskedUnits, type Shown } from '../shown.ts';
 import { listed } from '../words.ts';
 import { recipeHeadOf } from './recipe-head.ts';
@@ -14,31 +14,31 @@ export interface TableOptions {
   readonly columns?: readonly Reference[];
 }
 
-/** The numbers of every step, one row a step. */
-export function tablePage(run: Run, { units, columns = regimeColumns(run) }: TableOptions): Page {
+/** The numbers of every step, one row a step. What was not asked for is left out where it means nothing. */
+export function tablePage(run: Run, { units, columns: asked }: TableOptions): Page {
   const shown = shownFor(run, units);
+  const columns = asked === undefined ? regimeColumns(run) : asked.map((reference) => ({ reference }));
   return { blocks: tableBlocks(run, columns, shown), sheet: () => tableSheet(run, columns, shown) };
 }
 
-/** Pressure, mean free path, the Knudsen number over each length that a step names, residence time and turnovers. */
-export function regimeColumns({ steps }: Pick<Run, 'steps'>): readonly Reference[] {
-  const lengths = new Set(steps.flatMap(lengthsKnown));
-  return [
-    { id: 'gas-pressure' },
-    { id: 'gas-temperature' },
-    { id: 'mean-free-path' },
-    ...[...lengths].map((length) => ({ id: 'knudsen', length })),
-    { id: 'residence-time' },
-    { id: 'turnovers' },
-  ];
+interface Column {
+  readonly reference: Reference;
+  /** Why the number means nothing in a step, should that be so. */
+  readonly idle?: (step: StepRun) => string | undefined;
 }
 
-function lengthsKnown(step: StepRun): readonly string[] {
-  const lengths = quantityNamed('knudsen')?.lengths?.(step.plan.scope) ?? [];
-  return lengths.filter((length) => step.read({ id: 'length', length }).kind === 'known');
+function regimeColumns({ steps, site }: Run): readonly Column[] {
+  const over = new Map<string, Reference>();
+  for (const step of steps) {
+    for (const reference of knudsenNumbers(step, site)) over.set(referenceName(reference), reference);
+  }
+  return [...STATE, ...over.values(), ...STAY].map((reference) => ({
+    reference,
+    idle: (step) => noThrow(step, reference, site),
+  }));
 }
 
-function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): readonly Block[] {
+function tableBlocks(run: Run, columns: readonly Column[], shown: Shown): readonly Block[] {
   const lacking = lackingSentence(run, columns);
   return [
     recipeHeadOf(run),
@@ -47,7 +47,7 @@ function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): rea
       columns: [
         { title: '', align: 'right' },
         { title: 'step', align: 'left' },
-        ...columns.map((reference) => ({ title: columnTitle(reference), align: 'right' as const })),
+        ...columns.map(({ reference }) => ({ title: columnTitle(reference), align: 'right' as const })),
       ],
       rows: rowsOf(run, columns, shown),
       key: 2,
@@ -57,8 +57,8 @@ function tableBlocks(run: Run, columns: readonly Reference[], shown: Shown): rea
   ];
 }
 
-function rowsOf({ steps }: Run, columns: readonly Reference[], shown: Shown): readonly (readonly string[])[] {
-  const cells = columns.map((reference) => withBands(steps.map((step) => cellOf(step, reference, shown))));
+function rowsOf({ steps }: Run, columns: readonly Column[], shown: Shown): readonly (readonly string[])[] {
+  const cells = columns.map((column) => withBands(steps.map((step) => cellOf(step, column, shown))));
   return steps.map(({ step }, row) => [String(step.number), step.path, ...cells.map((column) => column[row] ?? '')]);
 }
 
@@ -87,10 +87,13 @@ const SHORT: ReadonlyMap<string, string> = new Map([
   ['gas-temperature', 'temperature'],
 ]);
 
-function cellOf(step: StepRun, reference: Reference, shown: Shown): Cell {
+const BLANK: Cell = { text: '', band: '' };
+
+function cellOf(step: StepRun, { reference, idle }: Column, shown: Shown): Cell {
+  if (idle?.(step) !== undefined) return BLANK;
   const reading = step.read(reference);
   if (reading.kind === 'missing') return { text: 'open', band: '' };
-  if (reading.kind === 'inapplicable') return { text: '', band: '' };
+  if (reading.kind === 'inapplicable') return BLANK;
   const expanded = shown.coverage * step.uncertainty(reference);
   const unit = unitOfNumber(shown, step, reference, reading.value);
   const text = print(shown, reading.value, dimensionOfNumber(reference), expanded, unit);
@@ -99,11 +102,12 @@ function cellOf(step: StepRun, reference: Reference, shown: Shown): Cell {
 }
 
 /** What would supply the numbers that are open, all at once. */
-function lackingSentence({ steps }: Run, columns: readonly Reference[]): string | undefined {
+function lackingSentence({ steps }: Run, columns: readonly Column[]): string | undefined {
   const needs = new Map<string, string[]>();
   for (const step of steps) {
     const own = new Set<string>();
-    for (const reference of columns) {
+    for (const { reference, idle } of columns) {
+      if (idle?.(step) !== undefined) continue;
       const reading = step.read(reference);
       if (reading.kind === 'missing') for (const need of reading.needs) own.add(need);
     }
@@ -113,16 +117,19 @@ function lackingSentence({ steps }: Run, columns: readonly Reference[]): string 
   return `Open for want of ${[...needs].map(([need, paths]) => `${need} (${listed(paths)})`).join(', ')}.`;
 }
 
-function tableSheet({ recipe, steps }: Run, columns: readonly Reference[], shown: Shown): Sheet {
+function tableSheet({ recipe, steps }: Run, columns: readonly Column[], shown: Shown): Sheet {
   const rows = steps.flatMap((step) =>
-    columns.map((reference) => [
-      recipe.file,
-      recipe.name,
-      String(step.step.number),
-      step.step.path,
-      referenceName(reference),
-      ...numberCells(step, reference, shown),
-    ]),
+    columns.map(({ reference, idle }) => {
+      const because = idle?.(step);
+      return [
+        recipe.file,
+        recipe.name,
+        String(step.step.number),
+        step.step.path,
+        referenceName(reference),
+        ...(because === undefined ? numberCells(step, reference, shown) : absentCells(because)),
+      ];
+    }),
   );
   return {
     columns: [
@@ -145,8 +152,8 @@ function tableSheet({ recipe, steps }: Run, columns: readonly Reference[], shown
 /** Value, uncertainty, unit, band, whose number, and why there is none. */
 export function numberCells(step: StepRun, reference: Reference, shown: Shown): readonly string[] {
   const reading = step.read(reference);
-  if (reading.kind === 'missing') return ['', '', '', '', '', `needs ${listed(reading.needs)}`];
-  if (reading.kind === 'inapplicable') return ['', '', '', '', '', reading.because];
+  if (reading.kind === 'missing') return absentCells(`needs ${listed(reading.needs)}`);
+  if (reading.kind === 'inapplicable') return absentCells(reading.because);
   const dimension = dimensionOfNumber(reference);
   const unit = unitOfNumber(shown, step, reference, reading.value);
   return [
@@ -157,4 +164,8 @@ export function numberCells(step: StepRun, reference: Reference, shown: Shown): 
     reading.of ?? '',
     '',
   ];
+}
+
+function absentCells(because: string): readonly string[] {
+  return ['', '', '', '', '', because];
 }

@@ -11,7 +11,7 @@ import { cautionTexts } from '../cautions.ts';
 import { blocking, type BlockOptions, type Counts } from '../counts.ts';
 import { noteText } from '../notes.ts';
 import { shownFor, type Shown } from '../shown.ts';
-import { regimeColumns } from '../pages/table.ts';
+import { regimeNumbers } from '../regime-numbers.ts';
 import { inCatalogueOrder, quantityRecord } from './quantity.ts';
 import { verdictRecord } from './verdict.ts';
 
@@ -28,10 +28,16 @@ export function recipeRecord(judgement: Judgement) {
     chamber: chamber.name,
     ...(chamber.revision === undefined ? {} : { chamber_revision: chamber.revision }),
     ...(duration === undefined ? {} : { duration }),
+    ...conventionsRecord(run.site),
     cycles: cycles.map(({ path, repeat }) => ({ path, repeat: repeat.value })),
     steps: steps.map((step) => stepRecord(step, judgement, shown)),
     ...(notes.length === 0 ? {} : { notes: notes.map((note) => noteText(note, judgement)) }),
   };
+}
+
+/** What the numbers and regimes of a recipe are told by, which its site decides. */
+function conventionsRecord({ name, show }: Site) {
+  return { ...(name === undefined ? {} : { site: name }), coverage_factor: show.coverageFactor, bands: show.bands };
 }
 
 export function cautionRecords({ run, cautions }: Judgement) {
@@ -78,7 +84,7 @@ function numbersOf(run: StepRun, verdicts: JudgedStep['verdicts'], site: Site): 
   const shows = site.process(run.step.process)?.shows ?? [];
   const shown = shows.flatMap((name) => parseReference(name) ?? []).filter(({ id }) => quantityNamed(id) !== undefined);
   const judged = verdicts.flatMap(({ reference, over }) => (over === undefined ? [reference] : [reference, over]));
-  return inCatalogueOrder([...regimeColumns({ steps: [run] }), ...shown, ...judged]);
+  return inCatalogueOrder([...regimeNumbers(run, site), ...shown, ...judged]);
 }
 
 function givenRecord(given: Given, { coverage }: Shown) {

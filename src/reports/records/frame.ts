@@ -5,8 +5,9 @@ export interface FrameHead {
   readonly version: string;
   /** Absent without a site, or where the recipes are of several. */
   readonly site?: string;
-  readonly coverageFactor: number;
-  readonly bands: BandConvention;
+  /** Absent where the sites of the recipes differ in it. */
+  readonly coverageFactor?: number;
+  readonly bands?: BandConvention;
 }
 
 /** What stands behind them, known once the last recipe was judged. */
@@ -22,8 +23,8 @@ export function frameOpening({ version, site, coverageFactor, bands }: FrameHead
     format: 1,
     tool: { name: 'regimen', version },
     ...(site === undefined ? {} : { site }),
-    coverage_factor: coverageFactor,
-    bands,
+    ...(coverageFactor === undefined ? {} : { coverage_factor: coverageFactor }),
+    ...(bands === undefined ? {} : { bands }),
   };
   return `${JSON.stringify(head, undefined, 2).slice(0, -2)},\n  "recipes": [`;
 }

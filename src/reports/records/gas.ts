@@ -1,5 +1,6 @@
 import { gasNumbers, type GasState } from '../pages/gas.ts';
 import type { Shown } from '../shown.ts';
+import { condensingSentences } from '../condensing.ts';
 import { inCatalogueOrder, quantityRecord } from './quantity.ts';
 
 /** What is known of gases and mixtures, in SI. */
@@ -10,10 +11,11 @@ export function gasRecord(states: readonly GasState[], shown: Shown) {
 function stateRecord(state: GasState, shown: Shown) {
   const { name, run } = state;
   const { gases } = run.step.setup;
-  const remarks = gases.flatMap((gas) => {
+  const estimates = gases.flatMap((gas) => {
     const estimated = run.plan.scope.gas(gas)?.estimated;
     return estimated === undefined ? [] : [`collision values of ${gas} are estimated: ${estimated}`];
   });
+  const remarks = [...condensingSentences(run), ...estimates];
   return {
     gas: name,
     ...(gases.length > 1
