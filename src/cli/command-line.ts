@@ -20,7 +20,7 @@ export type Given = ReadonlyMap<OptionName, readonly string[]>;
 /** Reads a command line. The parser only takes it apart; what is wrong is worded here. */
 export function readCommandLine(words: readonly string[]): Asked {
   const taken: Taken = { command: undefined, args: [], given: new Map() };
-  const parser = parserFor(taken);
+  const parser = parserFor(words, taken);
   try {
     parser.parse(words, { from: 'user' });
   } catch (error) {
@@ -61,12 +61,13 @@ function argumentProblem({ needs, most, takes, name }: Command, args: readonly s
   return extra === undefined ? undefined : { found: `'${extra}' is one argument too many`, right };
 }
 
-function parserFor(taken: Taken): Parser {
+/** Only a command that stands among the words needs its options, and telling the parser of one takes its time. */
+function parserFor(words: readonly string[], taken: Taken): Parser {
   const parser = silent(new Parser('regimen')).option('--version').helpCommand(false);
   for (const name of COMMON) addOption(parser, name, taken);
   for (const command of COMMANDS) {
     const sub = silent(parser.command(command.name)).argument('[argument...]');
-    for (const name of [...command.options, ...COMMON]) addOption(sub, name, taken);
+    if (words.includes(command.name)) for (const name of [...command.options, ...COMMON]) addOption(sub, name, taken);
     sub.action((args: readonly string[]) => {
       taken.command = command;
       taken.args = args;

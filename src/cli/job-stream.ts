@@ -3,8 +3,8 @@ import type { ToldFault } from './told-fault.ts';
 
 /** Recipes as they are found, and what else was come upon so far. */
 export interface JobStream extends Iterable<Job> {
-  /** The next jobs, at most so many. */
-  take(most: number): readonly Job[];
+  /** The next jobs, at most so many, and none behind the one with which their texts come to so many characters. */
+  take(most: number, length: number): readonly Job[];
   /** Faults since this was last asked. */
   faults(): readonly ToldFault[];
   /** YAML files that are none of ours. */
@@ -24,7 +24,7 @@ export function jobStream(found: Generator<Found, void, undefined>): JobStream {
     }
   };
   return {
-    take: (most) => [...upTo(most, next)],
+    take: (most, length) => [...upTo(most, length, next)],
     faults() {
       const since = faults;
       faults = [];
@@ -33,14 +33,16 @@ export function jobStream(found: Generator<Found, void, undefined>): JobStream {
     get passedOver() {
       return passedOver;
     },
-    [Symbol.iterator]: () => upTo(Infinity, next),
+    [Symbol.iterator]: () => upTo(Infinity, Infinity, next),
   };
 }
 
-function* upTo(most: number, next: () => Job | undefined): Generator<Job, void, undefined> {
-  for (let count = 0; count < most; count += 1) {
+function* upTo(most: number, length: number, next: () => Job | undefined): Generator<Job, void, undefined> {
+  let taken = 0;
+  for (let count = 0; count < most && taken < length; count += 1) {
     const job = next();
     if (job === undefined) return;
+    taken += job.text.length;
     yield job;
   }
 }

@@ -5,7 +5,7 @@ import type { Part, Work } from './part.ts';
 import type { Job } from './recipe-files.ts';
 import type { Sites } from './sites.ts';
 
-/** Recipes from which on workers earn back what starting them costs. */
+/** Recipes from which on workers earn back what starting them costs; fewer that fill what is held at hand are long enough. */
 const PAYS_FROM = 1000;
 
 /** The parts of jobs, in their order. The first jobs are at hand already; whether workers pay is told by how many there are. */
@@ -14,14 +14,19 @@ export async function* partsOf(
   rest: Iterable<Job>,
   work: Work,
   sites: Sites,
-  jobs = first.length < PAYS_FROM ? 1 : availableParallelism(),
+  jobs = paysOff(first) ? availableParallelism() : 1,
 ): AsyncGenerator<Part, void, undefined> {
   if (jobs > 1) return yield* onWorkers(chained(first, rest), work, jobs);
   for (const job of chained(first, rest)) yield makePart(job, work, sites);
 }
 
-/** Jobs to have at hand before any is begun. */
+/** Jobs to have at hand before any is begun, as far as their texts are no more than so many characters. */
 export const AT_HAND = PAYS_FROM;
+export const AT_HAND_LENGTH = 2 ** 22;
+
+function paysOff(first: readonly Job[]): boolean {
+  return first.length >= PAYS_FROM || first.reduce((sum, { text }) => sum + text.length, 0) >= AT_HAND_LENGTH;
+}
 
 function* chained(first: readonly Job[], rest: Iterable<Job>): Generator<Job> {
   yield* first;

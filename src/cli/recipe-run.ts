@@ -5,7 +5,7 @@ import { counted } from '../reports/words.ts';
 import { givenShelf } from './given-shelf.ts';
 import { jobStream } from './job-stream.ts';
 import { openOutputs } from './outputs.ts';
-import { AT_HAND, partsOf } from './parts.ts';
+import { AT_HAND, AT_HAND_LENGTH, partsOf } from './parts.ts';
 import { findRecipes } from './recipe-files.ts';
 import { reportsOn } from './reports.ts';
 import { sitesOn } from './sites.ts';
@@ -56,7 +56,7 @@ async function runOnto(outputs: Outputs, { args, options, out }: Call, what: Rec
   const { shelf, paths, faults } = givenShelf(args, options.at);
   const sites = sitesOn(shelf, options.site);
   const jobs = jobStream(findRecipes(shelf, sites, paths));
-  const first = jobs.take(AT_HAND);
+  const first = jobs.take(AT_HAND, AT_HAND_LENGTH);
   const work = workFor(what, options, outputs, first.length);
   const reports = reportsOn(outputs, shelf, sites.met(), out);
   const begun = reports.faults([...faults.map((fault) => toldPathFault(shelf, '', fault)), ...jobs.faults()]);

@@ -1,17 +1,13 @@
 import { parentPort } from 'node:worker_threads';
-import { diskShelf } from '../shelf/disk.ts';
-import { makePart } from './make-part.ts';
-import { sitesOn } from './sites.ts';
-import type { Errand } from './pool.ts';
-import type { Sites } from './sites.ts';
+import { errandRunner } from './every-command.ts';
+import type { Errand } from './errands.ts';
 
 /*
- * A worker thread: batches of recipes in, their parts out, in order. The main thread tells faults of sites.
+ * A worker thread: batches of recipes in, their parts out.
  */
 
-let sites: Sites | undefined;
+const run = errandRunner();
 
-parentPort?.on('message', ({ work, batch }: Errand) => {
-  const opened = (sites ??= sitesOn(diskShelf(), work.site));
-  parentPort?.postMessage(batch.map((job) => makePart(job, work, opened)));
+parentPort?.on('message', (errand: Errand) => {
+  parentPort?.postMessage(run(errand));
 });

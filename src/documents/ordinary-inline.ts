@@ -29,7 +29,7 @@ export function isAtKey({ text, at }: Reader): boolean {
   return KEY.test(text);
 }
 
-const KEY = /[A-Za-z0-9_][\w.+-]{0,99}:(?=[ \n]|$)/y;
+const KEY = /[A-Za-z0-9_][\w.+-]{0,99}:(?=[ \r\n]|$)/y;
 
 export function pastBlanks(text: string, start: number): number {
   let at = start;
@@ -37,7 +37,14 @@ export function pastBlanks(text: string, start: number): number {
   return at;
 }
 
+export function isLineEnd(text: string, at: number): boolean {
+  const code = text.charCodeAt(at);
+  return code === NEWLINE || code === RETURN || at >= text.length;
+}
+
 export const BLANK = 0x20;
+const NEWLINE = 0x0a;
+const RETURN = 0x0d;
 
 type PlainReader = (reader: Reader) => ScalarNode | undefined;
 
@@ -106,15 +113,13 @@ function skip(reader: Reader, indent: number): void {
   const { text } = reader;
   let at = pastBlanks(text, reader.at);
   let deep = true;
-  while (text.charCodeAt(at) === NEWLINE) {
-    const start = at + 1;
+  while (at < text.length && isLineEnd(text, at)) {
+    const start = text.charCodeAt(at) === RETURN ? at + 2 : at + 1;
     at = pastBlanks(text, start);
     deep = at - start > indent;
   }
   reader.at = deep ? at : text.length;
 }
-
-const NEWLINE = 0x0a;
 
 /** A text in quotes on one line, without escapes. */
 function readQuoted(reader: Reader, quote: string): ScalarNode | undefined {
@@ -142,13 +147,13 @@ function readFlowPlain(reader: Reader): ScalarNode | undefined {
 }
 
 /** Up to what ends a text within braces or brackets; a colon, or a sign that may start a comment, is not ordinary there. */
-const FLOW_TEXT = /[^,[\]{}:#\n]+(?=[,\]}\n])/y;
+const FLOW_TEXT = /[^,[\]{}:#\r\n]+(?=[,\]}\r\n])/y;
 
 /** The text without quotes that ends at an offset, or in the blanks before it. */
 function plainScalar(reader: Reader, limit: number): ScalarNode | undefined {
   const { text, at: start } = reader;
   let end = limit;
-  while (end > start && text.charCodeAt(end - 1) === BLANK) end -= 1;
+  while (end > start && (text.charCodeAt(end - 1) === BLANK || isLineEnd(text, end - 1))) end -= 1;
   const source = text.slice(start, end);
   if (!PLAIN.test(source) || source.includes(': ')) return undefined;
   const value = plainValueOf(source);

@@ -1,15 +1,15 @@
 import { emptyAt } from './nodes.ts';
-import { BLANK, isAtKey, pastBlanks, readInline, readKey } from './ordinary-inline.ts';
+import { BLANK, isAtKey, isLineEnd, pastBlanks, readInline, readKey } from './ordinary-inline.ts';
 import type { KeyNode, ListNode, MapNode, Node, NodePair } from './nodes.ts';
 import type { Reader } from './ordinary-inline.ts';
 
 /**
  * Reads a text of nothing but the ordinary at a fraction of the cost: maps and lists by indentation, in braces and in
  * brackets, texts on one line with and without quotes, comments. It knows no fault: of any other text it makes nothing,
- * and YAML's own reader judges it. What is read here reads the same there.
+ * and YAML's own reader judges it. What is read here reads the same there. Forbidden characters have been looked for.
  */
 export function readOrdinary(text: string): Node | undefined {
-  if (text.includes('\t') || text.includes('\r')) return undefined;
+  if (text.includes('\t')) return undefined;
   const reader: Reader = { text, at: 0, indent: 0 };
   toNextLine(reader);
   const root = reader.indent === 0 && isAtKey(reader) ? readMap(reader, 0, DEEPEST) : undefined;
@@ -88,8 +88,7 @@ function readLine(reader: Reader, indent: number, depth: number): Node | undefin
 function endLine(reader: Reader): boolean {
   const { text } = reader;
   const at = pastBlanks(text, reader.at);
-  const code = text.charCodeAt(at);
-  if (at < text.length && code !== NEWLINE && (code !== HASH || at === reader.at)) return false;
+  if (!isLineEnd(text, at) && (text.charCodeAt(at) !== HASH || at === reader.at)) return false;
   const end = text.indexOf('\n', at);
   reader.at = end === -1 ? text.length : end + 1;
   toNextLine(reader);
@@ -101,8 +100,7 @@ function toNextLine(reader: Reader): void {
   const { text } = reader;
   for (let start = reader.at; start < text.length;) {
     const at = pastBlanks(text, start);
-    const code = text.charCodeAt(at);
-    if (at < text.length && code !== NEWLINE && code !== HASH) {
+    if (!isLineEnd(text, at) && text.charCodeAt(at) !== HASH) {
       reader.at = at;
       reader.indent = at - start;
       return;
@@ -114,6 +112,5 @@ function toNextLine(reader: Reader): void {
   reader.indent = NO_LINE;
 }
 
-const NEWLINE = 0x0a;
 const HASH = 0x23;
 const DASH = 0x2d;

@@ -60,7 +60,10 @@ async function bundle(): Promise<Metafile> {
   return metafile;
 }
 
-/** Modules of Node that a bundled package asks for by `require`, which an ES module does not have, are imported instead. */
+/**
+ * Modules of Node that a bundled package asks for by `require`, which an ES module does not have, are imported instead. None
+ * of the packages starts another program here: what would is left out, since loading it takes longer than reading the command line.
+ */
 const requiredBuiltIns: Plugin = {
   name: 'required-built-ins',
   setup(build) {
@@ -68,10 +71,15 @@ const requiredBuiltIns: Plugin = {
       kind === 'require-call' ? { path, namespace: 'required' } : undefined,
     );
     build.onLoad({ filter: /./, namespace: 'required' }, ({ path }) => ({
-      contents: path === 'node:process' ? 'module.exports = globalThis.process;' : `export * from '${path}';`,
+      contents: STAND_INS.get(path) ?? `export * from '${path}';`,
     }));
   },
 };
+
+const STAND_INS: ReadonlyMap<string, string> = new Map([
+  ['node:process', 'module.exports = globalThis.process;'],
+  ['node:child_process', 'module.exports = {};'],
+]);
 
 /** Declarations of the library face and of all that it names. */
 function writeTypes(): Promise<void> {

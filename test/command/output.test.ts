@@ -2,7 +2,7 @@ import { spawn, spawnSync } from 'node:child_process';
 import { existsSync, readdirSync, readFileSync, symlinkSync } from 'node:fs';
 import { join } from 'node:path';
 import { afterAll, describe, expect, test } from 'vitest';
-import { BROKEN, clearFolders, COMMAND, DEMO, folderWith, regimen, siteWith, SOUND, write } from './run.ts';
+import { BROKEN, clearFolders, COMMAND, DEMO, FAILING, folderWith, regimen, siteWith, SOUND, write } from './run.ts';
 
 afterAll(clearFolders);
 
@@ -129,9 +129,6 @@ describe('a check of several recipes', () => {
     const { out } = regimen(['check'], {
       cwd: siteWith({ 'a.yaml': named('a'), 'b.yaml': named('b'), 'c.yaml': FAILING, 'd.yaml': named('d') }),
     });
-    expect(out.split('\n').map((line) => /^\S*/.exec(line)?.[0])).toEqual(
-      expect.arrayContaining(['a', 'b', '', 'hasty', '', 'd', '', '4', '']),
-    );
     expect(out).toMatch(/^a {3}.*4 pass\nb {3}.*4 pass\n\nhasty {3}/);
     expect(out).toMatch(/\n\nd {3}.*4 pass\n\n4 recipes, 16 steps/);
   });

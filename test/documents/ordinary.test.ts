@@ -36,7 +36,9 @@ const LINES = [
   ...['- e', '- f: 1', ' - h', '  - k: 2', '- l:', '    m: ~', ' {n: o}', '  [p]', ' w', "   'v'", '- {}', 'r: {s: 1,'],
 ];
 
-const lines = fc.array(fc.constantFrom(...LINES), { maxLength: 8 }).map((parts) => ['a:', ...parts].join('\n'));
+const lines = fc
+  .tuple(fc.constantFrom('\n', '\n', '\r\n'), fc.array(fc.constantFrom(...LINES), { maxLength: 8 }))
+  .map(([end, parts]) => ['a:', ...parts].join(end));
 
 /** Parts of texts, parted by `¦`, with `$` for the end of a line: ordinary ones, nearly so, and anything but. */
 const PIECES = [
@@ -93,6 +95,7 @@ describe('ordinary is', () => {
     ['braces over several lines, with a comma before the last', 'a:\n  {\n    b: 1,\n    c: [d, "e"],\n  }\nf: 2\n'],
     ['keys without a value', 'a:\nb:\n  c:\n  d:\ne: 1'],
     ['numbers, words and texts', "a: 1e3\nb: true\nc: ~\nd: '1'\ne: it's 5 # c\nf: x#y:z\ng: -.5 nm\nh: 2027-06-30\n"],
+    ['either line end', 'a:\r\n  - b: c # d\r\n\r\n    e: { f: g,\r\n      h: 1 }\r\n# i\r\n  - "j"\r\n'],
     ['letters of any script', 'title: Übergang µ \u{1F9EA}\n'],
   ])('%s', (_name, text) => {
     expect(agrees(text)).toBe(true);
