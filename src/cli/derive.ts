@@ -79,5 +79,9 @@ function derivedAsked({ verdicts }: JudgedStep, what: string): Derived | { reado
     what,
     verdicts.flatMap(({ name, assumption }) => [assumption, name]),
   );
-  return { problem: meant === undefined ? problem : { found: problem.found, right: `did you mean ${meant}?` } };
+  const judged = verdicts
+    .filter(({ process, reference }) => process !== 'chamber-fit' && reference.id !== 'setpoint')
+    .map(({ assumption }) => assumption);
+  const names = judged.length === 0 ? problem.right : `the step judges ${judged.join(', ')}; or name a number`;
+  return { problem: { found: problem.found, right: meant === undefined ? names : `did you mean ${meant}?` } };
 }

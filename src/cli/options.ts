@@ -10,8 +10,12 @@ export interface OptionFacts {
 }
 
 export const OPTIONS = {
-  out: { value: 'FILE', repeats: true, says: 'write to FILE as well; its ending chooses: .md .csv .json .txt' },
-  format: { value: 'FORMAT', says: 'of standard output: text, markdown, csv or json' },
+  out: {
+    value: 'FILE',
+    repeats: true,
+    says: 'write to FILE as well; its ending chooses: .md .csv .txt (check, gas: .json)',
+  },
+  format: { value: 'FORMAT', says: 'of standard output: text, markdown, csv (check, gas: json)' },
   units: { value: 'LIST', says: 'units to print in: pressure=Pa,length=mm' },
   columns: { value: 'LIST', says: 'names of the numbers to show: knudsen.gap,residence-time' },
   'block-at': { value: 'LEVEL', says: 'failed verdicts that block: error (default), warning, note or never' },

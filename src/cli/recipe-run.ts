@@ -1,3 +1,4 @@
+import { fullName } from './checked-reference.ts';
 import { setImmediate } from 'node:timers/promises';
 import { addCounts, NO_COUNTS } from '../reports/counts.ts';
 import { foldFor } from '../reports/options.ts';
@@ -76,7 +77,7 @@ function workFor({ command }: RecipeCommand, options: Options, { each }: Outputs
     command,
     styles: each.map(({ style }) => style),
     check: { units, blockAt, unproven, fold: foldFor(recipes) },
-    columns,
+    columns: columns.map(fullName),
     ...(today === undefined ? {} : { today }),
     ...(site === undefined ? {} : { site }),
   };

@@ -50,7 +50,8 @@ const ASSUMED: Readonly<Record<string, Assumption>> = {
     halfWidth: 0.45,
     dimension: 'fraction',
     unit: '',
-    because: 'of the reactive residual molecules that hit a growing film a tenth to all stay (common practice; fewer on noble metals)',
+    because:
+      'of the reactive residual molecules that hit a growing film a tenth to all stay (common practice; fewer on noble metals)',
   },
   'assumed.emission-spread': {
     value: 0,

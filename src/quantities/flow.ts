@@ -86,7 +86,9 @@ export const pumpTemperature = quantity<[wall: number, warmest: number]>({
   statement: 'Temperature of the gas at the pump: stated, or that of the wall but at most about 60 degC.',
   source: 'min(T_wall, T_cooled); gas cools on its way to the pump (common practice)',
   from: (_, scope) =>
-    scope.states('chamber.pump.temperature') ? 'chamber.pump.temperature' : ['temperatures.wall', 'assumed.pump-cooling'],
+    scope.states('chamber.pump.temperature')
+      ? 'chamber.pump.temperature'
+      : ['temperatures.wall', 'assumed.pump-cooling'],
   value: (wall, warmest) => Math.min(wall, warmest),
 });
 

@@ -148,8 +148,7 @@ export const thermalConductivityOf = quantity<
   symbol: 'κ',
   dimension: 'thermal-conductivity',
   statement: 'Thermal conductivity, of the mixture or of one of its gases.',
-  source:
-    'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas modified Eucken',
+  source: 'Σ x_i κ_i/Σ_j x_j φ_ij, Wassiljewa 1904 with the coefficients of Wilke 1950; of one gas modified Eucken',
   subjects: gasesOf,
   whole: true,
   from: (reference, scope) => {

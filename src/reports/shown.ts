@@ -89,7 +89,7 @@ export function bandOf({ bands }: Shown, id: string, value: number): string | un
 function isHandy(value: number, unit: string, dimension: Dimension): boolean {
   if (dimension === 'temperature' || value === 0) return true;
   const size = Math.abs(toUnit(value, unit, dimension));
-  return size >= 0.1 && size < 1e5;
+  return size >= 0.1 && size < 1e4;
 }
 
 /** Setpoints whose units stand for all numbers of their dimension. */

@@ -25,7 +25,7 @@ export function readAccuracy(text: string | number, dimension: Dimension): Toler
 /** The text without a tolerance sign in front, which says nothing here. */
 function withoutSign(text: string): string {
   const sign = toleranceSign(text);
-  return sign !== undefined && sign.start === skipBlanks(text, 0) ? text.slice(sign.end) : text;
+  return sign?.start === skipBlanks(text, 0) ? text.slice(sign.end) : text;
 }
 
 function accuracyShare(text: string, { value, of }: Share, dimension: Dimension): Tolerance | UnitFault {

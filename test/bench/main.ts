@@ -55,7 +55,12 @@ function startUp(): void {
   const bare = measure(['-e', '0']);
   row('node -e 0', bare, undefined, '');
   row('--version', measure([COMMAND, '--version']), bare, 'at most 1.5 x');
-  row('check of one file', measure([COMMAND, 'check', 'recipes/recipes/etch/contact-open.yaml']), bare, 'at most 2.5 x');
+  row(
+    'check of one file',
+    measure([COMMAND, 'check', 'recipes/recipes/etch/contact-open.yaml']),
+    bare,
+    'at most 2.5 x',
+  );
 }
 
 function bulk(folder: string, count: number): void {

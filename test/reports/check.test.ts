@@ -42,7 +42,7 @@ describe('a recipe that fails', () => {
     expect(counts.stepsByWorst.fail).toBe(1);
     expect(blocking(counts, OPTIONS)).toBe(1);
     expect(blocking(counts, { blockAt: 'never', unproven: true })).toBe(0);
-    expect(closing(checkClosing(counts, OPTIONS))).toBe('1 recipe, 1 step: 1 fail.  1 blocks.');
+    expect(closing(checkClosing(counts, OPTIONS))).toBe('1 recipe, 1 step: 1 fail.  1 finding blocks.');
   });
 
   test('ends its findings with how many pass beside', () => {

@@ -113,7 +113,10 @@ describe('residual gas', () => {
       const film = slow(rate).find(({ name }) => name === 'sputter/clean-film');
       expect(film?.kind === 'fail' && film.level === 'error', rate).toBe(false);
     }
-    expect(slow('60 nm/min').find(({ name }) => name === 'sputter/clean-film')).toMatchObject({ kind: 'review', level: 'note' });
+    expect(slow('60 nm/min').find(({ name }) => name === 'sputter/clean-film')).toMatchObject({
+      kind: 'review',
+      level: 'note',
+    });
   });
 
   test('noble residual gas does not soil a film', () => {

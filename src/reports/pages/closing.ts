@@ -22,7 +22,11 @@ function closingText(counts: Counts, options: CheckOptions): string {
     ...(waived === 0 ? [] : [`${counted(waived, 'finding')} waived.`]),
     ...(passedOver === 0 ? [] : [`${counted(passedOver, 'other YAML file')} passed over.`]),
     ...(faults === 0 ? [] : [`${counted(faults, 'fault')}: the job could not be done in full.`]),
-    recipes === 0 ? '' : blocks === 0 ? 'Nothing blocks.' : `${blocks} ${blocks === 1 ? 'blocks' : 'block'}.`,
+    recipes === 0
+      ? ''
+      : blocks === 0
+        ? 'Nothing blocks.'
+        : `${counted(blocks, 'finding')} ${blocks === 1 ? 'blocks' : 'block'}.`,
   ];
   return [judged, ...asides].filter((text) => text !== '').join('  ');
 }
