@@ -9,6 +9,7 @@ import * as residual from './residual.ts';
 import * as surfaces from './surfaces.ts';
 import * as thermalisation from './thermalisation.ts';
 import * as transport from './transport.ts';
+import * as tubeFlow from './tube-flow.ts';
 import { dimensionOf } from '../steps/addresses.ts';
 import type { Dimension } from '../units/dimensions.ts';
 import type { Quantity } from './quantity.ts';
@@ -21,6 +22,7 @@ const TOPICS = {
   transport,
   lengths,
   flow,
+  tubeFlow,
   regime,
   surfaces,
   residual,

@@ -10,6 +10,7 @@ import * as residual from '../../src/quantities/residual.ts';
 import * as surfaces from '../../src/quantities/surfaces.ts';
 import * as thermalisation from '../../src/quantities/thermalisation.ts';
 import * as transport from '../../src/quantities/transport.ts';
+import * as tubeFlow from '../../src/quantities/tube-flow.ts';
 import { assumedAddresses, assumedGiven } from '../../src/quantities/assumed.ts';
 import { allQuantities, quantityNamed } from '../../src/quantities/catalogue.ts';
 import { parseReference } from '../../src/quantities/reference.ts';
@@ -22,6 +23,7 @@ const TOPICS = [
   transport,
   lengths,
   flow,
+  tubeFlow,
   regime,
   surfaces,
   residual,
