@@ -2,26 +2,20 @@ import { spawn } from 'node:child_process';
 import { chmodSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { build as bundleWith } from 'esbuild';
-import type { Metafile, Plugin } from 'esbuild';
+import { bundleCommands, COMMANDS, loadedCommands, writeCache } from './commands-script.ts';
+import { COMMON, DIST, requiredBuiltIns } from './bundling.ts';
+import type { Metafile } from 'esbuild';
 
 /*
  * `npm run build`: everything that the package ships, in dist/. What the program needs of other packages is bundled into it,
  * so that the package has no dependencies of its own; their licences come along.
  */
 
-const DIST = 'dist';
-
 /** Each entry becomes dist/NAME.js; what several share is split off, so that a command loads what it needs and no more. */
 const ENTRIES = {
   main: 'src/cli/main.ts',
   worker: 'src/cli/worker.ts',
   index: 'src/index.ts',
-};
-
-/** Of these packages the variants for any platform: they are ES modules throughout, and ask the system for nothing when loaded. */
-const ALIASES = {
-  yaml: './node_modules/yaml/browser/dist/index.js',
-  '#supports-color': './node_modules/chalk/source/vendor/supports-color/browser.js',
 };
 
 /** The command itself: as little as can be, so that all else can be loaded when it is known what is wanted. */
@@ -33,7 +27,9 @@ await main(process.argv.slice(2));
 async function buildAll(): Promise<void> {
   rmSync(DIST, { recursive: true, force: true });
   const types = writeTypes();
-  writeLicences(await bundle());
+  const [metafile] = await Promise.all([bundle(), bundleCommands()]);
+  writeLicences(metafile);
+  await writeCache(join(DIST, COMMANDS));
   writeFileSync(join(DIST, 'regimen.js'), COMMAND);
   chmodSync(join(DIST, 'regimen.js'), 0o755);
   await types;
@@ -41,45 +37,17 @@ async function buildAll(): Promise<void> {
 
 async function bundle(): Promise<Metafile> {
   const { metafile } = await bundleWith({
+    ...COMMON,
     entryPoints: ENTRIES,
     outdir: DIST,
     chunkNames: 'part-[hash]',
-    alias: ALIASES,
-    plugins: [requiredBuiltIns],
-    bundle: true,
+    plugins: [requiredBuiltIns, loadedCommands],
     splitting: true,
     format: 'esm',
-    platform: 'node',
-    target: 'node20',
-    minifySyntax: true,
-    minifyWhitespace: true,
-    legalComments: 'none',
     metafile: true,
-    logLevel: 'warning',
   });
   return metafile;
 }
-
-/**
- * Modules of Node that a bundled package asks for by `require`, which an ES module does not have, are imported instead. None
- * of the packages starts another program here: what would is left out, since loading it takes longer than reading the command line.
- */
-const requiredBuiltIns: Plugin = {
-  name: 'required-built-ins',
-  setup(build) {
-    build.onResolve({ filter: /^node:/ }, ({ path, kind }) =>
-      kind === 'require-call' ? { path, namespace: 'required' } : undefined,
-    );
-    build.onLoad({ filter: /./, namespace: 'required' }, ({ path }) => ({
-      contents: STAND_INS.get(path) ?? `export * from '${path}';`,
-    }));
-  },
-};
-
-const STAND_INS: ReadonlyMap<string, string> = new Map([
-  ['node:process', 'module.exports = globalThis.process;'],
-  ['node:child_process', 'module.exports = {};'],
-]);
 
 /** Declarations of the library face and of all that it names. */
 function writeTypes(): Promise<void> {
