@@ -108,7 +108,7 @@ describe('a walk on disk', () => {
   const shelf = diskShelf();
   write(folder, {
     'site/recipes/a.yaml': '',
-    'site/shared/b.yaml': '',
+    'site/common/b.yaml': '',
     'outside/c.yaml': '',
     'site/recipes/"\n.yaml': '',
   });
@@ -116,7 +116,7 @@ describe('a walk on disk', () => {
   test('links to folders are not followed, links to files only inside the site, and nothing is left out in silence', () => {
     symlinkSync('..', `${site}/recipes/up`);
     symlinkSync('../../outside', `${site}/recipes/linked`);
-    symlinkSync('../shared/b.yaml', `${site}/recipes/inner.yaml`);
+    symlinkSync('../common/b.yaml', `${site}/recipes/inner.yaml`);
     symlinkSync('../../outside/c.yaml', `${site}/recipes/outer.yaml`);
     symlinkSync('gone.yaml', `${site}/recipes/gone.yaml`);
     symlinkSync('loop.yaml', `${site}/recipes/loop.yaml`);
@@ -141,8 +141,8 @@ describe('a walk on disk', () => {
 
   test('a site reached through a link is walked as it is named', () => {
     symlinkSync('site', `${folder}/door`);
-    expect(matching(shelf, `${folder}/door`, [pattern('shared/*.yaml')]).value).toEqual([
-      `${folder}/door/shared/b.yaml`,
+    expect(matching(shelf, `${folder}/door`, [pattern('common/*.yaml')]).value).toEqual([
+      `${folder}/door/common/b.yaml`,
     ]);
   });
 });
