@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, cpSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join, resolve } from 'node:path';
 import { STARTER_CHAMBER } from '../../src/cli/start/chamber.ts';
@@ -26,7 +26,8 @@ export interface Setting {
 
 /** Runs the built command as a user does. Colour variables of whoever runs the tests are taken away. */
 export function regimen(args: readonly string[], { cwd, input, env = {}, uid }: Setting = {}): Ended {
-  const { status, stdout, stderr } = spawnSync(process.execPath, [COMMAND, ...args], {
+  const command = uid === undefined ? COMMAND : commandForAll();
+  const { status, stdout, stderr } = spawnSync(process.execPath, [command, ...args], {
     cwd,
     input,
     env: { ...PLAIN, ...env },
@@ -38,6 +39,16 @@ export function regimen(args: readonly string[], { cwd, input, env = {}, uid }: 
 }
 
 const PLAIN = Object.fromEntries(Object.entries(process.env).filter(([name]) => !/^(NO|FORCE)_COLOR$/.test(name)));
+
+/** The command where anybody may read it: the folder of the checkout may be its owner's alone. */
+function commandForAll(): string {
+  const folder = folderWith({});
+  cpSync(dirname(COMMAND), join(folder, 'dist'), { recursive: true });
+  // Its package tells that it is made of modules.
+  cpSync(resolve('package.json'), join(folder, 'package.json'));
+  chmodSync(folder, 0o755);
+  return join(folder, 'dist', 'regimen.js');
+}
 
 const made: string[] = [];
 
