@@ -4,6 +4,7 @@ import * as equipment from './equipment.ts';
 import * as flow from './flow.ts';
 import * as gas from './gas.ts';
 import * as lengths from './lengths.ts';
+import * as pumping from './pumping.ts';
 import * as regime from './regime.ts';
 import * as residual from './residual.ts';
 import * as surfaces from './surfaces.ts';
@@ -16,12 +17,13 @@ import type { Quantity } from './quantity.ts';
 import type { Reference } from './reference.ts';
 
 /** The topics of the catalogue, in the order in which lists print them. */
-const TOPICS = {
+export const TOPICS = {
   gas,
   collisions,
   transport,
   lengths,
   flow,
+  pumping,
   tubeFlow,
   regime,
   surfaces,

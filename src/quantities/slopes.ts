@@ -36,7 +36,8 @@ export function slopesOf(values: Values, node: Node): readonly Slope[] {
 
 /** The same for the uncertain givens alone. */
 export function contributionsTo(values: Values, node: Node): readonly Slope[] {
-  return values.uncertain[node.slot] === true ? strongestFirst(values, node, true) : [];
+  const known = settle(values, node) === undefined;
+  return known && values.uncertain[node.slot] === true ? strongestFirst(values, node, true) : [];
 }
 
 function strongestFirst(values: Values, node: Node, onlyUncertain: boolean): readonly Slope[] {

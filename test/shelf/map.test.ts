@@ -33,7 +33,7 @@ describe('a shelf over a Map', () => {
     new Map([
       ['site/regimen.yaml', 'site'],
       ['site/recipes/a.yaml', '\uFEFFa'],
-      ['/root/b', 'b'],
+      ['/top/b', 'b'],
     ]),
   );
 
@@ -43,7 +43,7 @@ describe('a shelf over a Map', () => {
       { name: 'recipes', kind: 'folder' },
       { name: 'regimen.yaml', kind: 'file' },
     ]);
-    expect(shelf.list('/').value).toEqual([{ name: 'root', kind: 'folder' }]);
+    expect(shelf.list('/').value).toEqual([{ name: 'top', kind: 'folder' }]);
     expect(mapShelf(new Map()).list('.').value).toEqual([]);
   });
 
